@@ -88,7 +88,11 @@ func (k *checker) declare() {
 	}
 	k.vars(k.Inputs, isInput)
 	k.vars(k.State, isState)
+	// An output may carry the name of a variable: they live in different structs.
+	inside := k.names
+	k.names = map[string]string{}
 	k.vars(k.Outputs, isOutput)
+	k.names = inside
 }
 
 func (k *checker) name(name, what string) {
@@ -104,12 +108,7 @@ func (k *checker) name(name, what string) {
 func (k *checker) vars(vs []*Var, r role) {
 	what := map[role]string{isInput: "input", isState: "variable", isOutput: "output", isLocal: "local variable"}[r]
 	for _, v := range vs {
-		// An output may carry the name of a variable: they live in different structs.
-		if r == isOutput {
-			k.name("out."+v.Name, what)
-		} else {
-			k.name(v.Name, what)
-		}
+		k.name(v.Name, what)
 		k.role[v] = r
 		k.variable(v)
 	}

@@ -1,0 +1,87 @@
+// Package translate turns what was found in the plant room into what the new
+// control must do: a Specification with every figure and its working, and a
+// control program in whole numbers.
+//
+// One file holds one kind of part: probe.go the new sensors, contact.go the
+// two-position controls, latch.go the limits that remember, clock.go the
+// timers, load.go what is switched. Each builds its blocks out of package
+// logic; nothing here knows how a program is run or printed.
+package translate
+
+import (
+	"makebreak/survey"
+	"makebreak/survey/catalogue"
+	"makebreak/translate/logic"
+	"makebreak/translate/sensing"
+)
+
+// Specification is everything that was worked out from one sheet.
+type Specification struct {
+	Survey    *survey.Survey
+	Catalogue *catalogue.Catalogue
+	Figures   Figures
+	Program   *logic.Checked // nil where no program could be made
+	Plan      *Plan          // what in the program belongs to which part; nil with Program
+	Chains    map[string]*sensing.Chain
+	Cycles    map[string]*Cycle // by control
+	Refused   []Refusal
+}
+
+// Refusal is a part of the sheet that was not translated, and why.
+type Refusal struct {
+	About  string // id of the control
+	Why    string
+	Source survey.Source
+}
+
+// Plan says which variable of the program stands for which part of the sheet,
+// for those who put faults into it or print it.
+type Plan struct {
+	Sensors  map[string]*Probe    // by sensor
+	Contacts map[string]*Contact  // by control
+	Loads    map[string]*Switched // by load
+	Signals  map[string]*logic.Var
+	Timers   map[string]*logic.Var
+	Fault    *logic.Var
+	Bits     []logic.Flag
+}
+
+// Figure is one derived value with its history.
+type Figure struct {
+	About   string   `json:"about"`
+	Name    string   `json:"name"`
+	Value   *float64 `json:"value"` // nil where it is not determined
+	Unit    string   `json:"unit"`
+	From    string   `json:"from"`
+	Working string   `json:"working"` // where Value is nil: the reason
+}
+
+// Figures is a list in the order of working out.
+type Figures []Figure
+
+// Get finds a figure.
+func (fs Figures) Get(about, name string) (Figure, bool) {
+	for _, f := range fs {
+		if f.About == about && f.Name == name {
+			return f, true
+		}
+	}
+	return Figure{}, false
+}
+
+// Value gives a figure's value where it is determined.
+func (fs Figures) Value(about, name string) (float64, bool) {
+	f, ok := fs.Get(about, name)
+	if !ok || f.Value == nil {
+		return 0, false
+	}
+	return *f.Value, true
+}
+
+func (fs *Figures) add(about, name string, value float64, unit, from, working string) {
+	*fs = append(*fs, Figure{about, name, &value, unit, from, working})
+}
+
+func (fs *Figures) open(about, name, unit, from, reason string) {
+	*fs = append(*fs, Figure{about, name, nil, unit, from, reason})
+}
