@@ -2,13 +2,15 @@ module makebreak
 
 go 1.26.0
 
-require go.yaml.in/yaml/v4 v4.0.0
+require (
+	github.com/expr-lang/expr v1.17.8
+	go.yaml.in/yaml/v4 v4.0.0
+)
 
 require (
 	github.com/cespare/xxhash/v2 v2.3.0 // indirect
 	github.com/clipperhouse/displaywidth v0.10.0 // indirect
 	github.com/clipperhouse/uax29/v2 v2.6.0 // indirect
-	github.com/expr-lang/expr v1.17.8 // indirect
 	github.com/fatih/color v1.18.0 // indirect
 	github.com/google/go-cmp v0.7.0 // indirect
 	github.com/guptarohit/asciigraph v0.10.0 // indirect

@@ -1,6 +1,6 @@
 // Package survey reads the sheet that an engineer wrote in the plant room.
 //
-// Load turns YAML into a Survey in which every value remembers where it stood
+// Read turns YAML into a Survey in which every value remembers where it stood
 // and how it was written, so that everything derived from it can say where it
 // came from. Whatever is wrong with the sheet is reported in one go, as
 // Diagnostics, each with file, line, column, key path, what was found and what
