@@ -68,10 +68,6 @@ func (b *builder) triggered(t *survey.Timer, w *wiring, cause *logic.Expr, after
 	return logic.Is(v, clockRunning)
 }
 
-// keptParts is how finely a periodic clock that resumes after a power cut
-// remembers where it was. Every part is a write to the memory that survives.
-const keptParts = 16
-
 // periodic builds a clock that runs once in a period, counted from start to start.
 func (b *builder) periodic(t *survey.Timer, w *wiring) *logic.Expr {
 	id := t.ID.V
@@ -91,7 +87,7 @@ func (b *builder) periodic(t *survey.Timer, w *wiring) *logic.Expr {
 	case "run":
 		at.Start = last.Value // the first step begins a period
 	case "resume":
-		p := b.place(t, at, every)
+		p := b.place(t, at, lasts, every)
 		next = logic.Select(logic.Prev(p.awake), next, logic.Mul(logic.Prev(p.kept), logic.C(p.part)))
 		begins = logic.Or(begins, logic.And(logic.Not(logic.Prev(p.awake)), logic.Lt(logic.Use(at), logic.C(lasts))))
 		after = p.keep
@@ -126,7 +122,7 @@ type place struct {
 	keep  []logic.Block
 }
 
-func (b *builder) place(t *survey.Timer, at *logic.Var, every *logic.Const) place {
+func (b *builder) place(t *survey.Timer, at *logic.Var, lasts, every *logic.Const) place {
 	id := t.ID.V
 	p := place{part: b.constant(logic.Const{
 		Name: id + "_part", Value: max(every.Value/keptParts, 1), Unit: "steps", Means: "how finely the place is kept over a power cut",
@@ -134,6 +130,8 @@ func (b *builder) place(t *survey.Timer, at *logic.Var, every *logic.Const) plac
 	})}
 	p.kept = b.state(logic.Var{Name: b.name(id, "place"), What: "parts of the period gone by", Kind: logic.Int,
 		Range: logic.Range{Lo: 0, Hi: every.Value / p.part.Value}, Survives: true})
+	// Without a record it begins where it would have just finished running.
+	p.kept.Start = min((lasts.Value+p.part.Value-1)/p.part.Value, p.kept.Range.Hi)
 	p.awake = b.truth(b.name(id, "awake"), "the place has been found again after the start", false)
 	p.keep = []logic.Block{
 		&logic.Set{Var: p.kept, To: logic.Div(logic.Use(at), logic.C(p.part))},

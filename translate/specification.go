@@ -20,11 +20,19 @@ type Specification struct {
 	Survey    *survey.Survey
 	Catalogue *catalogue.Catalogue
 	Figures   Figures
-	Program   *logic.Checked // nil where no program could be made
-	Plan      *Plan          // what in the program belongs to which part; nil with Program
-	Chains    map[string]*sensing.Chain
-	Cycles    map[string]*Cycle // by control
-	Refused   []Refusal
+	Program   *logic.Checked            // nil where no program could be made
+	Plan      *Plan                     // what in the program belongs to which part; nil with Program
+	Chains    map[string]*sensing.Chain // by sensor
+	Budgets   []ErrorBudget
+	// Thresholds of the translated controls, by control.
+	Thresholds map[string]Thresholds
+	Refused    []Refusal
+}
+
+// ErrorBudget is the error of a sensor at one edge of one control.
+type ErrorBudget struct {
+	Control, Sensor, Edge string
+	sensing.Budget
 }
 
 // Refusal is a part of the sheet that was not translated, and why.

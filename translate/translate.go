@@ -14,7 +14,7 @@ import (
 // it goes. Program is nil where any diagnostic is an error, or where nothing
 // in the sheet is to be replaced.
 func Translate(s *survey.Survey) (*Specification, survey.Diagnostics) {
-	spec := &Specification{Survey: s, Chains: map[string]*sensing.Chain{}, Cycles: map[string]*Cycle{}}
+	spec := &Specification{Survey: s, Chains: map[string]*sensing.Chain{}, Thresholds: map[string]Thresholds{}}
 	b := newBuilder(spec)
 	cat, err := catalogue.Load()
 	if err != nil {
@@ -141,7 +141,6 @@ func (b *builder) probes() {
 		if b.needed(s.ID.V) {
 			p := b.probe(s)
 			b.plan.Sensors[s.ID.V] = p
-			b.flags = append([]logic.Flag(nil), b.flags...)
 			b.flag(s.ID.V, describe(s.What.V, "sensor "+s.ID.V)+": not believed", logic.Is(p.State, probeFaulty))
 		}
 	}

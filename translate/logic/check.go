@@ -66,13 +66,20 @@ type checker struct {
 	*Checked
 	role  map[*Var]role
 	names map[string]string
-	at    int   // block being checked
-	own   Block // machine whose actions are being checked
+	at    int            // block being checked
+	own   Block          // machine whose actions are being checked
+	known map[*Var]Range // what is known more closely where the checker stands
 	errs  []error
 }
 
 func (k *checker) fail(format string, args ...any) {
-	k.errs = append(k.errs, fmt.Errorf(format, args...))
+	err := fmt.Errorf(format, args...)
+	for _, e := range k.errs {
+		if e.Error() == err.Error() {
+			return
+		}
+	}
+	k.errs = append(k.errs, err)
 }
 
 func (k *checker) declare() {

@@ -1,12 +1,14 @@
 package logic
 
-// rangeOf works out what an expression can be, and notes it for every node.
+// rangeOf works out what an expression can be, and notes it for every node. A
+// node that stands in several places is noted with all that it can be.
 func (k *checker) rangeOf(e *Expr) Range {
-	if r, done := k.Ranges[e]; done {
-		return r
-	}
 	args := make([]Range, len(e.Args))
 	for i, a := range e.Args {
+		if e.Op == OpSelect && i > 0 {
+			k.within(e.Args[0], i == 1, func() { args[i] = k.rangeOf(a) })
+			continue
+		}
 		args[i] = k.rangeOf(a)
 	}
 	k.kinds(e)
@@ -15,8 +17,68 @@ func (k *checker) rangeOf(e *Expr) Range {
 		k.fail("%s can be %d..%d, more than 32 bits", e, r.Lo, r.Hi)
 		r = Int32
 	}
-	k.Ranges[e] = r
+	if before, seen := k.Ranges[e]; seen {
+		k.Ranges[e] = before.with(r)
+	} else {
+		k.Ranges[e] = r
+	}
 	return r
+}
+
+// within runs f under the assumption that a condition came out as stated: what
+// it compares with a number is then known more closely.
+func (k *checker) within(c *Expr, outcome bool, f func()) {
+	before := k.known
+	k.known = map[*Var]Range{}
+	for v, r := range before {
+		k.known[v] = r
+	}
+	k.assume(c, outcome)
+	f()
+	k.known = before
+}
+
+func (k *checker) assume(c *Expr, outcome bool) {
+	switch {
+	case c.Op == OpNot:
+		k.assume(c.Args[0], !outcome)
+	case c.Op == OpAnd && outcome, c.Op == OpOr && !outcome:
+		for _, a := range c.Args {
+			k.assume(a, outcome)
+		}
+	case c.Op.IsCompare() && c.Args[0].Var != nil:
+		op := c.Op
+		if !outcome {
+			op = negated[op]
+		}
+		v, to := c.Args[0].Var, k.Ranges[c.Args[1]]
+		r := k.rangeNow(v)
+		switch op {
+		case OpLt:
+			r.Hi = min(r.Hi, to.Hi-1)
+		case OpLe:
+			r.Hi = min(r.Hi, to.Hi)
+		case OpGt:
+			r.Lo = max(r.Lo, to.Lo+1)
+		case OpGe:
+			r.Lo = max(r.Lo, to.Lo)
+		case OpEq:
+			r = Range{max(r.Lo, to.Lo), min(r.Hi, to.Hi)}
+		}
+		if r.Lo <= r.Hi {
+			k.known[v] = r
+		}
+	}
+}
+
+var negated = map[Op]Op{OpEq: OpNe, OpNe: OpEq, OpLt: OpGe, OpGe: OpLt, OpLe: OpGt, OpGt: OpLe}
+
+// rangeNow is what a variable can be where the checker stands.
+func (k *checker) rangeNow(v *Var) Range {
+	if r, ok := k.known[v]; ok {
+		return r
+	}
+	return v.Range
 }
 
 func (k *checker) node(e *Expr, a []Range) Range {
@@ -27,7 +89,7 @@ func (k *checker) node(e *Expr, a []Range) Range {
 		return Range{e.Const.Value, e.Const.Value}
 	case OpUse, OpPrev:
 		k.read(e)
-		return e.Var.Range
+		return k.rangeNow(e.Var)
 	case OpAdd:
 		return Range{a[0].Lo + a[1].Lo, a[0].Hi + a[1].Hi}
 	case OpSub:

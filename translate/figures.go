@@ -1,0 +1,81 @@
+package translate
+
+import (
+	"fmt"
+	"strings"
+
+	"makebreak/survey"
+	"makebreak/translate/sensing"
+)
+
+// figures works out everything that has a number before the program is built.
+func (b *builder) figures() {
+	for _, c := range b.survey.Controls {
+		b.asked(c)
+		if chain := b.spec.Chains[c.Sensor.V]; chain != nil && translated(c) {
+			b.switching(c, chain)
+		}
+	}
+}
+
+// asked lists what the sheet asks for, whether the part is replaced or stays.
+func (b *builder) asked(c *survey.Control) {
+	if !c.Switching() {
+		return
+	}
+	b.askedEdge(c, "make", c.MakesAt)
+	b.askedEdge(c, "break", c.BreaksAt)
+}
+
+func (b *builder) askedEdge(c *survey.Control, name string, f survey.Field[float64]) {
+	if !f.Set {
+		b.spec.Figures.open(c.ID.V, name, "degC", f.Path, "not known")
+		return
+	}
+	b.spec.Figures.add(c.ID.V, name, f.V, "degC", f.Path, "asked for: "+f.Text)
+}
+
+// switching works out thresholds and errors of a translated control.
+func (b *builder) switching(c *survey.Control, chain *sensing.Chain) {
+	t, ok := b.thresholds(c, chain)
+	if !ok {
+		return
+	}
+	b.spec.Thresholds[c.ID.V] = t
+	b.edgeFigures(c, "make", c.MakesAt, t.Make, t.Why)
+	b.edgeFigures(c, "break", c.BreaksAt, t.Break, t.Why)
+}
+
+func (b *builder) edgeFigures(c *survey.Control, name string, asked survey.Field[float64], h sensing.Threshold, why string) {
+	fs := &b.spec.Figures
+	fs.add(c.ID.V, name+"_counts", float64(h.Counts), "counts", asked.Path, h.Working+"; "+why)
+	fs.add(c.ID.V, name+"_switches_at", h.SwitchesAt, "degC", asked.Path, h.Working)
+
+	// The first control on a sensor names its edges plainly; a second one says whose they are.
+	about := c.Sensor.V + "/" + name
+	if _, taken := fs.Get(about, "count_width"); taken {
+		about = c.Sensor.V + "/" + c.ID.V + "_" + name
+	}
+	fs.add(about, "count_width", h.CountWidth, "K", asked.Path, "change of temperature for one count at this threshold")
+	budget, err := b.spec.Chains[c.Sensor.V].Budget(asked.V)
+	if err != nil {
+		fs.open(about, "error_worst", "K", asked.Path, err.Error())
+		return
+	}
+	b.spec.Budgets = append(b.spec.Budgets, ErrorBudget{Control: c.ID.V, Sensor: c.Sensor.V, Edge: name, Budget: budget})
+	working := budgetText(budget)
+	fs.add(about, "error_worst", budget.WorstCase, "K", asked.Path, "all causes at their worst, the same way: "+working)
+	fs.add(about, "error_rss", budget.RSS, "K", asked.Path, "root sum of squares, for independent causes: "+working)
+}
+
+func budgetText(b sensing.Budget) string {
+	var parts []string
+	for _, l := range b.Lines {
+		parts = append(parts, fmt.Sprintf("%s %s", l.Name, kelvins(l.Kelvin)))
+	}
+	text := strings.Join(parts, ", ")
+	if len(b.Missing) > 0 {
+		text += "; without: " + strings.Join(b.Missing, ", ")
+	}
+	return text
+}
