@@ -114,17 +114,21 @@ func (b *builder) out(name, what string) *logic.Var {
 }
 
 // pulse gives a load with a pulsed drive a second output that changes at every
-// step while the load is on, and rests otherwise: when the program stops, so
-// do the pulses, and the drive lets go.
+// step while the coil is driven, and rests otherwise: when the program stops,
+// so do the pulses, and the drive lets go.
 func (b *builder) pulse(s *Switched) {
 	if s.Output == nil || s.Output.Drive.V != "pulsed" {
 		return
 	}
 	id := s.Load.ID.V
+	driven := logic.Use(s.Out)
+	if s.Load.Rest.V.Energised() {
+		driven = logic.Not(driven)
+	}
 	was := b.truth(b.name(id, "pulse"), "level of the pulsed drive", false)
 	now := b.out(id+"_drive", "pulses for the drive of "+s.Load.What.V)
 	b.add(
-		&logic.Define{Var: now, As: logic.And(logic.Use(s.Out), logic.Not(logic.Prev(was)))},
+		&logic.Define{Var: now, As: logic.And(driven, logic.Not(logic.Prev(was)))},
 		&logic.Set{Var: was, To: logic.Use(now)},
 	)
 }
