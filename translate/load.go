@@ -1,8 +1,6 @@
 package translate
 
 import (
-	"fmt"
-
 	"makebreak/survey"
 	"makebreak/translate/logic"
 )
@@ -82,13 +80,15 @@ func (b *builder) switched(l *survey.Load, w *wiring) *Switched {
 	b.withoutEffect(s, w)
 
 	var goesOn, goesOff []*logic.Transition
-	stop := logic.Or(fault, flag(s.NoEffect, logic.Use), flag(s.Welded, logic.Use))
+	kept := logic.Or(flag(s.NoEffect, logic.Use), flag(s.Welded, logic.Use))
+	stop := logic.Or(fault, kept)
+	free := logic.And(good, logic.Not(kept)) // a good probe has not failed
 	if safeOn {
 		goesOn = append(goesOn, unless(stop, loadOn, "its safe state is on")...)
 		goesOn = append(goesOn, &logic.Transition{To: loadOn, When: logic.And(want, proofs, lasted(minOff)), Why: "called for"})
-		goesOff = append(goesOff, &logic.Transition{To: loadOff, When: logic.And(logic.Not(want), good, logic.Not(stop), lasted(minOn)), Why: "no longer called for"})
+		goesOff = append(goesOff, &logic.Transition{To: loadOff, When: logic.And(logic.Not(want), free, lasted(minOn)), Why: "no longer called for"})
 	} else {
-		goesOn = append(goesOn, &logic.Transition{To: loadOn, When: logic.And(want, good, logic.Not(stop), proofs, lasted(minOff)), Why: "called for"})
+		goesOn = append(goesOn, &logic.Transition{To: loadOn, When: logic.And(want, free, proofs, lasted(minOff)), Why: "called for"})
 		goesOff = append(goesOff, unless(stop, loadOff, "its safe state is off, before any minimum on time")...)
 		if minOn != nil {
 			permit := w.holding(held).condition(tree, at)
@@ -280,5 +280,3 @@ func signal(s *survey.Survey, id string) *survey.Signal {
 	}
 	return nil
 }
-
-func (s *Switched) String() string { return fmt.Sprintf("load %s", s.Load.ID.V) }

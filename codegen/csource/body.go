@@ -371,7 +371,7 @@ func (w *printer) remember() {
 func (w *printer) step() {
 	w.line("void %s_step(struct %s *m, const struct %s_in *in, struct %s_out *out)\n{", w.lo, w.lo, w.lo, w.lo)
 	for _, v := range w.p.Locals {
-		w.line("    %s %s; /* %s */", typeOf(v), v.Name, Comment(v.What))
+		w.member(typeOf(v), v.Name, v.What)
 	}
 	if len(w.p.Locals) > 0 {
 		w.line("")
@@ -408,7 +408,13 @@ func (w *printer) readsInputs() bool {
 
 // assign prints an assignment, broken at its junctions where it is long.
 func (w *printer) assign(indent, to, value string, e *logic.Expr) {
-	if len(indent)+len(to)+len(value)+4 <= lineWidth || (e.Op != logic.OpAnd && e.Op != logic.OpOr) {
+	fits := len(indent)+len(to)+len(value)+4 <= lineWidth
+	if condition, branches, ok := strings.Cut(value, " ? "); !fits && ok && e.Op == logic.OpSelect {
+		w.line("%s%s = %s", indent, to, condition)
+		w.line("%s    ? %s;", indent, branches)
+		return
+	}
+	if fits || (e.Op != logic.OpAnd && e.Op != logic.OpOr) {
 		w.line("%s%s = %s;", indent, to, value)
 		return
 	}

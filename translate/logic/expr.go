@@ -94,14 +94,18 @@ func Lookup(t *Table, x *Expr) *Expr {
 	return &Expr{Op: OpLookup, Table: t, Args: []*Expr{x}, Kind: Int}
 }
 
-// Not, And and Or simplify where an operand is a bare truth value, so that a
-// line of old wiring without a term does not leave one behind in the C.
+// Not, And and Or simplify where an operand is a bare truth value or a
+// comparison, so that a line of old wiring without a term does not leave one
+// behind in the C, and a comparison reads the way a person would write it.
 func Not(a *Expr) *Expr {
 	if v, ok := truth(a); ok {
 		return boolean(!v)
 	}
 	if a.Op == OpNot {
 		return a.Args[0]
+	}
+	if opposite, ok := negated[a.Op]; ok {
+		return two(opposite, a.Args[0], a.Args[1], Bool)
 	}
 	return &Expr{Op: OpNot, Args: []*Expr{a}, Kind: Bool}
 }

@@ -66,9 +66,9 @@ var load = sync.OnceValues(func() (*Rules, error) {
 	return rules, nil
 })
 
-// Load gives the rules that come with the program. An error means that the
+// Builtin gives the rules that come with the program. An error means that the
 // program was built from broken data.
-func Load() (*Rules, error) { return load() }
+func Builtin() (*Rules, error) { return load() }
 
 // Merge adds a site's own rules. It can add, never redefine or lower one: an
 // id that is known already is an error. The receiver is left as it is; where
