@@ -93,16 +93,16 @@ const longest = 1<<31 - 2
 func (b *builder) steps(name string, seconds float64, from survey.Source, what string) *logic.Const {
 	n := max(int64(math.Ceil(seconds/b.step-1e-9)), 1)
 	if n > longest {
-		b.fail(from, "time too long for the step", fmt.Sprintf("%s is %d steps of %s", from.Text, n, span(b.step)), fmt.Sprintf("at most %d steps: a longer called_every or a shorter time", longest))
+		b.fail(from, "time too long for the step", fmt.Sprintf("%s is %d steps of %s", from.Text, n, Span(b.step)), fmt.Sprintf("at most %d steps: a longer called_every or a shorter time", longest))
 		n = longest
 	}
 	return b.constant(logic.Const{
 		Name:    name,
 		Value:   n,
 		Unit:    "steps",
-		Means:   what + " " + span(seconds),
+		Means:   what + " " + Span(seconds),
 		Origin:  origin(from),
-		Working: fmt.Sprintf("%s / %s a step, rounded up", span(seconds), span(b.step)),
+		Working: fmt.Sprintf("%s / %s a step, rounded up", Span(seconds), Span(b.step)),
 	})
 }
 

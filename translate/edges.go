@@ -51,7 +51,7 @@ func (b *builder) edges(c *survey.Control, p *Probe, acts bool) (makes, breaks *
 	}
 	declare := func(h sensing.Threshold, name string, from survey.Source) *edge {
 		k := b.constant(logic.Const{
-			Name: c.ID.V + "_" + name, Value: h.Counts, Unit: "counts", Means: degrees(h.Asked),
+			Name: c.ID.V + "_" + name, Value: h.Counts, Unit: "counts", Means: Degrees(h.Asked),
 			Origin: origin(from), Working: h.Working,
 		})
 		return &edge{Const: k, AtLeast: h.AtLeast, At: h.SwitchesAt}
@@ -96,7 +96,7 @@ func (b *builder) thresholds(c *survey.Control, chain *sensing.Chain) (Threshold
 		t.Break, t.Make, err = sensing.Apart(t.Break, t.Make, keepUpper)
 	}
 	if err != nil {
-		b.fail(c.Source, "make and break cannot be told apart by "+c.Sensor.V, err.Error(), fmt.Sprintf("more converter bits, or another divider: one count is %s here", kelvins(t.Break.CountWidth)))
+		b.fail(c.Source, "make and break cannot be told apart by "+c.Sensor.V, err.Error(), fmt.Sprintf("more converter bits, or another divider: one count is %s here", Kelvins(t.Break.CountWidth)))
 		return t, false
 	}
 	return t, true

@@ -71,7 +71,7 @@ func (b *builder) edgeFigures(c *survey.Control, name string, asked survey.Field
 func budgetText(b sensing.Budget) string {
 	var parts []string
 	for _, l := range b.Lines {
-		parts = append(parts, fmt.Sprintf("%s %s", l.Name, kelvins(l.Kelvin)))
+		parts = append(parts, fmt.Sprintf("%s %s", l.Name, Kelvins(l.Kelvin)))
 	}
 	text := strings.Join(parts, ", ")
 	if len(b.Missing) > 0 {

@@ -33,7 +33,7 @@ func (b *builder) withoutEffect(s *Switched, w *wiring) {
 	id, p := s.Load.ID.V, e.probe
 	limit := b.steps(id+"_effect_within", e.within, e.from, "an effect is expected within")
 	limit.Working = e.working + "; " + limit.Working
-	least := b.constant(logic.Const{Name: id + "_effect", Value: e.counts, Unit: "counts", Means: kelvins(e.kelvin) + " towards the set point",
+	least := b.constant(logic.Const{Name: id + "_effect", Value: e.counts, Unit: "counts", Means: Kelvins(e.kelvin) + " towards the set point",
 		Origin: origin(e.from), Working: fmt.Sprintf("%s of the differential", number(effectShare, 2))})
 
 	from := b.state(logic.Var{Name: b.name(id, "effect_from"), What: "reading furthest back since " + id + " came on", Kind: logic.Int, Range: p.Raw.Range})
@@ -128,7 +128,7 @@ func (b *builder) slowest(k *Contact, pr survey.Process) (effect, bool) {
 	delay := pr.DeadTime.V + k.Probe.Sensor.Lag.V
 	e.within = slack * (answer + delay)
 	e.working = fmt.Sprintf("%s times the slowest expected answer: %s × ln((%s + %s)/%s) = %s, and %s of dead time and lag",
-		number(slack, 1), span(pr.TimeConstant.V), kelvins(drive), kelvins(e.kelvin), kelvins(drive), span(answer), span(delay))
+		number(slack, 1), Span(pr.TimeConstant.V), Kelvins(drive), Kelvins(e.kelvin), Kelvins(drive), Span(answer), Span(delay))
 	return e, true
 }
 

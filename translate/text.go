@@ -19,17 +19,17 @@ func number(v float64, decimals int) string {
 	return s
 }
 
-// degrees prints a temperature, kelvins a difference.
-func degrees(v float64) string { return number(v, 2) + " degC" }
-func kelvins(v float64) string { return number(v, 2) + " K" }
+// Degrees prints a temperature, Kelvins a difference.
+func Degrees(v float64) string { return number(v, 2) + " degC" }
+func Kelvins(v float64) string { return number(v, 2) + " K" }
 
-// span prints a time in the units a person would say it in.
-func span(seconds float64) string {
+// Span prints a time in the units a person would say it in.
+func Span(seconds float64) string {
 	switch {
 	case math.IsInf(seconds, 1):
 		return "for ever"
 	case seconds < 0:
-		return "-" + span(-seconds)
+		return "-" + Span(-seconds)
 	case seconds < 1:
 		return number(seconds*1000, 1) + " ms"
 	case seconds < 120:

@@ -7,11 +7,13 @@ import (
 	"makebreak/translate/logic"
 )
 
-// Row is a stretch of steps on the same inputs, during which no output changes.
+// Row is a stretch of steps on the same inputs, during which no output changes,
+// or, with a pulsed drive, the outputs alternate.
 type Row struct {
 	Inputs  []int64 // in the order of Program.Inputs
 	Steps   int
 	Outputs []int64 // after each of the steps, in the order of Program.Outputs
+	Then    []int64 // nil, or the outputs after the second, fourth … step
 	State   []int64 // after the last one, in the order of Program.State
 }
 
@@ -37,8 +39,8 @@ func (s Source) Check(vectors []Vector) string {
 }
 
 func (w *printer) checkTypes() {
-	w.comment("", "Inputs held for so many steps; the outputs after each of them; the state after the last.")
-	w.line("struct row {\n    uint32_t steps;\n    struct %s_in in;\n    struct %s_out out;\n    struct %s after;\n};\n", w.lo, w.lo, w.lo)
+	w.comment("", "Inputs held for so many steps; the outputs after each odd and each even step of them; the state after the last.")
+	w.line("struct row {\n    uint32_t steps;\n    struct %s_in in;\n    struct %s_out odd;\n    struct %s_out even;\n    struct %s after;\n};\n", w.lo, w.lo, w.lo, w.lo)
 	w.line("static unsigned long passed;\nstatic unsigned long failed;\n")
 	w.line("static void verdict(bool good, const char *what, unsigned long vector, unsigned long row, unsigned long step)\n{")
 	w.line("    if (good) {\n        passed++;\n        return;\n    }\n    failed++;")
@@ -69,7 +71,11 @@ func (w *printer) rows(vectors []Vector) {
 	for i, v := range vectors {
 		w.line("    /* vector %d */", i+1)
 		for _, r := range v.Rows {
-			w.line("    {%du, %s, %s,", r.Steps, w.list(w.p.Inputs, r.Inputs, inputType), w.list(w.p.Outputs, r.Outputs, typeOf))
+			even := r.Then
+			if even == nil {
+				even = r.Outputs
+			}
+			w.line("    {%du, %s, %s, %s,", r.Steps, w.list(w.p.Inputs, r.Inputs, inputType), w.list(w.p.Outputs, r.Outputs, typeOf), w.list(w.p.Outputs, even, typeOf))
 			w.line("     %s},", w.list(w.p.State, r.State, typeOf))
 		}
 	}
@@ -125,7 +131,7 @@ func (w *printer) comparisons() {
 	w.line("    (void)memset(&m, 0xA5, sizeof m); /* nothing may rest on zeroed memory */\n    (void)memset(&out, 0, sizeof out);")
 	w.line("    %s_start(&m, v->has_record ? &v->record : NULL);", w.lo)
 	w.line("    for (i = v->first; i < v->end; i++) {\n        for (n = 0u; n < rows[i].steps; n++) {\n            %s_step(&m, &rows[i].in, &out);", w.lo)
-	w.line("            verdict(same_out(&out, &rows[i].out), \"output\", number, (unsigned long)(i - v->first), (unsigned long)n);\n        }")
+	w.line("            verdict(same_out(&out, ((n & 1u) == 0u) ? &rows[i].odd : &rows[i].even), \"output\", number, (unsigned long)(i - v->first), (unsigned long)n);\n        }")
 	w.line("        verdict(same_state(&m, &rows[i].after), \"state\", number, (unsigned long)(i - v->first), (unsigned long)n);\n    }\n}\n")
 }
 

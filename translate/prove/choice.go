@@ -6,6 +6,7 @@ import "makebreak/translate/logic"
 // condition over its atoms.
 type choice struct {
 	part    part
+	block   int
 	atoms   []*logic.Expr
 	tree    *tree
 	sides   [][]side // for each atom: what the rest must be for it to decide

@@ -36,7 +36,6 @@ type goal struct {
 	Goal
 	soft  bool // not worth telling when missed
 	done  bool
-	found bool // by the search
 	node  *node
 	best  []*node // where the search has been nearest to it
 	dist  int     // how near
@@ -48,10 +47,14 @@ type goal struct {
 	value  bool // of the atom or the outcome
 	near   near
 	seen   func() bool
-	start  *startGoal
-	change *changeGoal
+	slot   int   // of a start value
+	wrong  int64 // what a start value must not be taken for
+	change *logic.Program
 
-	skipped int
+	changed *logic.Run // of change, once it is asked for
+	checks  int
+	then    func()
+	rest    int // steps to let pass before it is asked for again
 }
 
 const outcome = -1
@@ -61,13 +64,13 @@ type near uint8
 
 const (
 	anywhere near = iota
-	equal         // the same
-	close         // one apart
-	apart         // more than nothing apart
+	equal
+	oneApart
+	unequal
 )
 
-// want gives the distance to a goal of a choice: 0 when its atom decides as
-// wanted, more the further the terms are from it.
+// distance is how far a step was from a goal of a choice: 0 when its atom
+// decides as wanted, more the further the terms are from that.
 func (g *goal) distance(atoms, same, next uint64) int {
 	c := g.choice
 	if g.atom == outcome {
@@ -86,15 +89,15 @@ func (g *goal) distance(atoms, same, next uint64) int {
 				d++
 			}
 		}
-	case close:
+	case oneApart:
 		if next&bit == 0 {
 			d++
 			if same&bit == 0 {
 				d++
 			}
 		}
-	case apart:
-		if same&bit != 0 {
+	case unequal:
+		if same&bit != 0 && next&bit == 0 {
 			d++
 		}
 	}
@@ -150,17 +153,17 @@ func holds(value bool) string {
 // where they are the same.
 func boundaries(c *choice, i int, a *logic.Expr, ranges map[*logic.Expr]logic.Range) []*goal {
 	same := a.Op == logic.OpEq || a.Op == logic.OpLe || a.Op == logic.OpGe
-	make := func(n near, value bool, text string) *goal {
+	want := func(n near, value bool, text string) *goal {
 		g := &goal{choice: c, atom: i, value: value, near: n}
 		g.Kind, g.Text = BoundaryGoal, fmt.Sprintf("%s: (%s) decides with %s", c.part.where, a, text)
 		return g
 	}
 	gs := []*goal{
-		make(equal, same, "both sides the same"),
-		make(close, !same, "its sides one apart"),
+		want(equal, same, "both sides the same"),
+		want(oneApart, !same, "its sides one apart"),
 	}
 	if a.Op != logic.OpEq && a.Op != logic.OpNe && beyond(a, ranges) {
-		g := make(apart, same, "its sides well apart")
+		g := want(unequal, same, "its sides well apart")
 		g.soft = true
 		gs = append(gs, g)
 	}

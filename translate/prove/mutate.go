@@ -21,7 +21,7 @@ type Mutant struct {
 func Mutants(p *logic.Program) []Mutant {
 	m := &mutator{p: p}
 	m.constants()
-	m.tables()
+	m.out = append(m.out, tableMutants(p)...)
 	for i, b := range p.Order {
 		m.block(i, b)
 		for n, part := range parts(b) {
@@ -110,20 +110,21 @@ func rewritten(order []logic.Block, f func(*logic.Expr) *logic.Expr, tail func(l
 	return out
 }
 
-// tables moves each point of each table by one.
-func (m *mutator) tables() {
-	for i, t := range m.p.Tables {
+// tableMutants moves each point of each table by one.
+func tableMutants(p *logic.Program) []Mutant {
+	m := &mutator{p: p}
+	for i, t := range p.Tables {
 		for n := range t.X {
 			for _, d := range []int64{-1, 1} {
 				m.table(i, t, fmt.Sprintf("value %d of %s %+d", n+1, t.Name, d), func(c *logic.Table) { c.Y[n] += d })
-				if n == 0 || n == len(t.X)-1 || (t.X[n]+d > t.X[n-1] && t.X[n]+d < t.X[n+1]) {
-					m.table(i, t, fmt.Sprintf("point %d of %s %+d", n+1, t.Name, d), func(c *logic.Table) { c.X[n] += d })
-				}
+				m.table(i, t, fmt.Sprintf("point %d of %s %+d", n+1, t.Name, d), func(c *logic.Table) { c.X[n] += d })
 			}
 		}
 	}
+	return m.out
 }
 
+// table puts a changed copy in place of a table, unless its points no longer rise.
 func (m *mutator) table(i int, t *logic.Table, what string, change func(*logic.Table)) {
 	other := *t
 	other.X, other.Y = slices.Clone(t.X), slices.Clone(t.Y)
@@ -169,41 +170,54 @@ func unchanged(s *logic.Set) *logic.Set {
 
 func (m *mutator) transition(i int, b *logic.Machine, s, t int) {
 	way := &transition{machine: b, from: s, way: b.At[s].Goes[t]}
-	copied := func() (*logic.Machine, *logic.Transition) {
-		c := mapped(b, func(e *logic.Expr) *logic.Expr { return e }).(*logic.Machine)
-		return c, c.At[s].Goes[t]
-	}
 	for to := range b.At {
 		if to == way.way.To {
 			continue
 		}
-		c, other := copied()
-		other.To = to
+		c := copied(b)
+		c.At[s].Goes[t].To = to
 		m.add(withBlock(m.p, i, c), "%s leads to %s", way, b.Var.Enum.Words[to].Name)
 	}
 	for n, a := range way.way.Do {
-		c, other := copied()
-		other.Do = slices.Delete(slices.Clone(other.Do), n, n+1)
-		m.add(withBlock(m.p, i, c), "%s, change of %s left out", way, a.Var.Name)
+		m.add(withBlock(m.p, i, withoutAction(b, s, t, n)), "%s, change of %s left out", way, a.Var.Name)
 	}
+}
+
+func copied(b *logic.Machine) *logic.Machine {
+	return mapped(b, func(e *logic.Expr) *logic.Expr { return e }).(*logic.Machine)
+}
+
+// withoutAction is a machine with the n-th action of a transition left out.
+func withoutAction(b *logic.Machine, state, way, n int) *logic.Machine {
+	c := copied(b)
+	t := c.At[state].Goes[way]
+	t.Do = slices.Delete(t.Do, n, n+1)
+	return c
 }
 
 // expression changes one node of an expression at a time.
 func (m *mutator) expression(i, n int, p part) {
-	at, divides := 0, map[*logic.Expr]bool{}
-	p.expr.Walk(func(e *logic.Expr) {
+	at := 0
+	var visit func(e *logic.Expr, divides bool)
+	visit = func(e *logic.Expr, divides bool) {
 		here := at
 		at++
-		if e.Op == logic.OpDiv || e.Op == logic.OpToward {
-			divides[e.Args[len(e.Args)-1]] = true
-		}
-		for _, c := range changes(e, divides[e]) {
+		for _, c := range changes(e, divides) {
 			block := replaced(m.p.Order[i], n, func(whole *logic.Expr) *logic.Expr {
-				return node(whole, here, func(*logic.Expr) *logic.Expr { return c.to })
+				return edited(whole, here, func(*logic.Expr) *logic.Expr { return c.to })
 			})
 			m.add(withBlock(m.p, i, block), "%s: %s", p.where, c.what)
 		}
-	})
+		for k, a := range e.Args {
+			visit(a, divisor(e, k))
+		}
+	}
+	visit(p.expr, false)
+}
+
+// divisor reports whether the k-th operand of a node divides.
+func divisor(e *logic.Expr, k int) bool {
+	return (e.Op == logic.OpDiv || e.Op == logic.OpToward) && k == len(e.Args)-1
 }
 
 type change struct {
@@ -330,11 +344,7 @@ func (v *Vector) passes(c *logic.Checked, p *logic.Program, r *logic.Run) bool {
 		row := &v.Rows[i]
 		for n := range row.Steps {
 			r.Step(row.Inputs)
-			want := row.Outputs
-			if n%2 == 1 && row.Then != nil {
-				want = row.Then
-			}
-			if !slices.Equal(outs.read(r), want) {
+			if !slices.Equal(outs.read(r), row.due(n)) {
 				return false
 			}
 		}

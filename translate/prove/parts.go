@@ -133,9 +133,9 @@ func mappedMachine(b *logic.Machine, f func(*logic.Expr) *logic.Expr, set func(*
 	return &c
 }
 
-// node applies f to the n-th node of an expression, counted as Walk meets
+// edited applies f to the n-th node of an expression, counted as Walk meets
 // them, and copies only what lies above it.
-func node(e *logic.Expr, n int, f func(*logic.Expr) *logic.Expr) *logic.Expr {
+func edited(e *logic.Expr, n int, f func(*logic.Expr) *logic.Expr) *logic.Expr {
 	at := -1
 	var visit func(e *logic.Expr) *logic.Expr
 	visit = func(e *logic.Expr) *logic.Expr {

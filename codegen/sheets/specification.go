@@ -1,0 +1,206 @@
+package sheets
+
+import (
+	"bytes"
+	"encoding/json"
+	"fmt"
+
+	"makebreak/translate"
+	"makebreak/translate/faults"
+	"makebreak/translate/logic"
+	"makebreak/translate/risk"
+)
+
+// Specification prints specification.json: everything that was worked out, for
+// other programs to read.
+func Specification(spec *translate.Specification, a *risk.Assessment, functions []faults.Row) ([]byte, error) {
+	return indented(specification{
+		Format:    1,
+		Equipment: map[string]string{"id": spec.Survey.Equipment.ID.V, "title": spec.Survey.Equipment.Title.V, "site": spec.Survey.Equipment.Site.V},
+		Figures:   spec.Figures,
+		Findings:  keyed(RiskColumns, RiskRows(a.Findings)),
+		Functions: keyed(FunctionColumns, FunctionRows(functions)),
+		Program:   program(spec),
+		Budgets:   budgets(spec),
+	})
+}
+
+type specification struct {
+	Format    int                 `json:"format"`
+	Equipment map[string]string   `json:"equipment"`
+	Figures   translate.Figures   `json:"figures"`
+	Findings  []map[string]string `json:"findings"`
+	Functions []map[string]string `json:"functions"`
+	Program   *programJSON        `json:"program"` // null where none could be made
+	Budgets   []budgetJSON        `json:"error_budgets"`
+}
+
+type programJSON struct {
+	ID         string         `json:"id"`
+	StepMS     int64          `json:"step_ms"`
+	Constants  []constJSON    `json:"constants"`
+	Inputs     []varJSON      `json:"inputs"`
+	State      []varJSON      `json:"state"`
+	Outputs    []varJSON      `json:"outputs"`
+	Steps      []string       `json:"steps"`
+	Machines   []machineJSON  `json:"machines"`
+	Properties []propertyJSON `json:"never"`
+}
+
+type constJSON struct {
+	Name    string `json:"name"`
+	Value   int64  `json:"value"`
+	Unit    string `json:"unit"`
+	Means   string `json:"means"`
+	From    string `json:"from"`
+	Working string `json:"working"`
+}
+
+type varJSON struct {
+	Name     string `json:"name"`
+	What     string `json:"what"`
+	Low      int64  `json:"low"`
+	High     int64  `json:"high"`
+	Start    int64  `json:"start"`
+	Survives bool   `json:"survives_power_cut"`
+}
+
+type machineJSON struct {
+	Name        string           `json:"name"`
+	What        string           `json:"what"`
+	States      []string         `json:"states"`
+	Safe        string           `json:"safe"`
+	Transitions []transitionJSON `json:"transitions"`
+}
+
+type transitionJSON struct {
+	From string `json:"from"`
+	To   string `json:"to"`
+	When string `json:"when"`
+	Why  string `json:"why"`
+}
+
+type propertyJSON struct {
+	Name  string `json:"name"`
+	Never string `json:"never"`
+	Why   string `json:"why"`
+}
+
+type budgetJSON struct {
+	Control string             `json:"control"`
+	Sensor  string             `json:"sensor"`
+	Edge    string             `json:"edge"`
+	At      float64            `json:"at_degc"`
+	Worst   float64            `json:"worst_k"`
+	RSS     float64            `json:"rss_k"`
+	Lines   []contributionJSON `json:"contributions"`
+	Missing []string           `json:"missing"`
+}
+
+type contributionJSON struct {
+	Name    string  `json:"name"`
+	Kelvin  float64 `json:"k"`
+	Share   float64 `json:"share"`
+	Working string  `json:"working"`
+}
+
+func program(spec *translate.Specification) *programJSON {
+	p := spec.Program
+	if p == nil {
+		return nil
+	}
+	out := &programJSON{ID: p.ID, StepMS: p.StepMS, Inputs: vars(p.Inputs), State: vars(p.State), Outputs: vars(p.Outputs)}
+	for _, c := range p.Consts {
+		out.Constants = append(out.Constants, constJSON{c.Name, c.Value, c.Unit, c.Means, c.Origin, c.Working})
+	}
+	for _, b := range p.Order {
+		out.Steps = append(out.Steps, block(b))
+		if m, ok := b.(*logic.Machine); ok {
+			out.Machines = append(out.Machines, machine(m))
+		}
+	}
+	for _, n := range p.Never {
+		out.Properties = append(out.Properties, propertyJSON{n.Name, n.Bad.String(), n.Why})
+	}
+	return out
+}
+
+func vars(vs []*logic.Var) []varJSON {
+	var out []varJSON
+	for _, v := range vs {
+		out = append(out, varJSON{v.Name, v.What, v.Range.Lo, v.Range.Hi, v.Start, v.Survives})
+	}
+	return out
+}
+
+func machine(m *logic.Machine) machineJSON {
+	words := m.Var.Enum.Words
+	out := machineJSON{Name: m.Var.Name, What: m.What, Safe: words[m.Safe].Name}
+	for i, s := range m.At {
+		out.States = append(out.States, words[i].Name)
+		for _, t := range s.Goes {
+			out.Transitions = append(out.Transitions, transitionJSON{words[i].Name, words[t.To].Name, t.When.String(), t.Why})
+		}
+	}
+	return out
+}
+
+// block says in one line what a block of a step does.
+func block(b logic.Block) string {
+	switch b := b.(type) {
+	case *logic.Define:
+		return fmt.Sprintf("%s is %s", b.Var.Name, b.As)
+	case *logic.Set:
+		if b.When == nil {
+			return fmt.Sprintf("%s becomes %s", b.Var.Name, b.To)
+		}
+		return fmt.Sprintf("%s becomes %s when %s", b.Var.Name, b.To, b.When)
+	case *logic.Timer:
+		text := fmt.Sprintf("%s counts steps up to %s; from 0 when %s", b.Var.Name, b.Limit.Name, b.Restart)
+		if b.Hold != nil {
+			text += fmt.Sprintf("; stands still while %s", b.Hold)
+		}
+		return text
+	case *logic.Machine:
+		return fmt.Sprintf("machine %s: %s", b.Var.Name, b.What)
+	case *logic.Flags:
+		return fmt.Sprintf("%s gathers %d faults", b.Out.Name, len(b.Bits))
+	}
+	return ""
+}
+
+func budgets(spec *translate.Specification) []budgetJSON {
+	var out []budgetJSON
+	for _, b := range spec.Budgets {
+		j := budgetJSON{Control: b.Control, Sensor: b.Sensor, Edge: b.Edge, At: b.At, Worst: b.WorstCase, RSS: b.RSS, Missing: b.Missing}
+		for _, l := range b.Lines {
+			j.Lines = append(j.Lines, contributionJSON{l.Name, l.Kelvin, l.Share, l.Working})
+		}
+		out = append(out, j)
+	}
+	return out
+}
+
+func keyed(columns []string, rows [][]string) []map[string]string {
+	out := []map[string]string{}
+	for _, r := range rows {
+		m := map[string]string{}
+		for i, c := range columns {
+			m[c] = r[i]
+		}
+		out = append(out, m)
+	}
+	return out
+}
+
+// indented prints JSON with its signs as they are.
+func indented(v any) ([]byte, error) {
+	var b bytes.Buffer
+	e := json.NewEncoder(&b)
+	e.SetEscapeHTML(false)
+	e.SetIndent("", "  ")
+	if err := e.Encode(v); err != nil {
+		return nil, err
+	}
+	return b.Bytes(), nil
+}
