@@ -36,16 +36,16 @@ func (d *decoder) check(s *Survey) {
 // identities gives every name of the sheet its meaning and reports doubles.
 func (d *decoder) identities(s *Survey) map[string]string {
 	known := map[string]string{}
-	line := map[string]int{}
+	at := map[string]Source{}
 	add := func(f Field[string], what string) {
 		if !f.Set {
 			return
 		}
 		if known[f.V] != "" {
-			d.failAt(f.Source, "name given twice", quote(f.V), fmt.Sprintf("a name of its own; there is a %s of that name on line %d", known[f.V], line[f.V]))
+			d.failAt(f.Source, "name given twice", quote(f.V), fmt.Sprintf("a name of its own; there is a %s of that name on line %d", known[f.V], at[f.V].Line))
 			return
 		}
-		known[f.V], line[f.V] = what, f.Line
+		known[f.V], at[f.V] = what, f.Source
 	}
 	for _, x := range s.Dangers {
 		add(x.ID, "danger")
@@ -65,10 +65,10 @@ func (d *decoder) identities(s *Survey) map[string]string {
 	for _, x := range s.Electronics.Sensors {
 		add(x.ID, "sensor")
 	}
-	for name := range known {
+	for _, name := range sortedKeys(known) {
 		for _, suffix := range []string{"_reset", "_seen", "_drive"} {
 			if base, ok := strings.CutSuffix(name, suffix); ok && known[base] != "" {
-				d.failAt(Source{Path: name, Line: line[name], Col: 1}, "name is taken by the program", quote(name), fmt.Sprintf("another name: %s makes a %s of its own", base, name))
+				d.failAt(at[name], "name is taken by the program", quote(name), fmt.Sprintf("another name: %s makes a %s of its own", base, name))
 			}
 		}
 	}

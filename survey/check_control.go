@@ -97,6 +97,9 @@ func (d *decoder) thresholds(s *Survey, c *Control) {
 	}
 	oneEdge := c.Reset.V == ResetOneShot && (c.BreaksAt.Set || c.MakesAt.Set)
 	if !c.BreaksAt.Set || !c.MakesAt.Set {
+		if unread(c.BreaksAt) || unread(c.MakesAt) || unread(c.SetPoint) || unread(c.Differential) {
+			return // has been said
+		}
 		unknown := c.BreaksAt.Written() || c.MakesAt.Written() || c.SetPoint.Written()
 		if !some && !unknown && !oneEdge {
 			d.failAt(c.Source, "where does it make and break?", "neither breaks_at and makes_at nor set_point, marks and differential", "breaks_at and makes_at, as measured; `unknown` is an answer for a part that stays")
@@ -113,6 +116,9 @@ func (d *decoder) thresholds(s *Survey, c *Control) {
 	}
 	d.inSensorsRange(s, c)
 }
+
+// unread reports a value that was written and could not be read.
+func unread(f Field[float64]) bool { return f.Written() && !f.Set && f.Text != "unknown" }
 
 func stated(f Field[float64]) string {
 	if f.Written() {

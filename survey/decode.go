@@ -426,6 +426,9 @@ func sortedKeys[V any](m map[string]V) []string {
 }
 
 func oneOf(found string, words []string) string {
+	if len(words) == 1 {
+		return words[0]
+	}
 	s := "one of " + strings.Join(words, ", ")
 	if near := nearest(found, words); near != "" {
 		s += "; did you mean " + near + "?"
@@ -433,9 +436,15 @@ func oneOf(found string, words []string) string {
 	return s
 }
 
+// readable is how many words a person looks through in a message.
+const readable = 16
+
 func didYouMean(found string, words []string) string {
 	if near := nearest(found, words); near != "" {
 		return "did you mean " + near + "?"
+	}
+	if len(words) > readable {
+		return "a key of this section; `makebreak survey schema` lists them"
 	}
 	return "one of " + strings.Join(words, ", ")
 }

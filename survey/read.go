@@ -76,14 +76,18 @@ func (d *decoder) tree(data []byte) (*yaml.Node, bool) {
 	if line, col, depth := bracketDepth(data); depth > deepest {
 		return refuse(line, col, "nested too deeply", fmt.Sprintf("%d open brackets", depth), fmt.Sprintf("at most %d levels", deepest))
 	}
-	var doc yaml.Node
-	if err := yaml.Load(data, &doc, yaml.WithSingleDocument()); err != nil {
+	var docs []yaml.Node
+	if err := yaml.Load(data, &docs, yaml.WithAllDocuments()); err != nil {
 		line, col, text := yamlError(err)
 		return refuse(line, col, "not readable as YAML", text, "one YAML document; `makebreak survey new` writes one to start from")
 	}
-	if doc.Kind != yaml.DocumentNode || len(doc.Content) == 0 || isNull(doc.Content[0]) {
+	if len(docs) > 1 {
+		return refuse(max(docs[1].Line, 1), max(docs[1].Column, 1), "more than one document", fmt.Sprintf("%d documents", len(docs)), "one sheet a file, without a line of three dashes inside")
+	}
+	if len(docs) == 0 || len(docs[0].Content) == 0 || isNull(docs[0].Content[0]) {
 		return refuse(1, 1, "nothing in this sheet", "no keys", "a sheet; `makebreak survey new` writes one to start from")
 	}
+	doc := docs[0]
 	nodes := 0
 	if !d.plainTree(doc.Content[0], 0, &nodes) {
 		return nil, false
