@@ -15,7 +15,9 @@ func (b *builder) figures() {
 		if chain := b.spec.Chains[c.Sensor.V]; chain != nil && translated(c) {
 			b.switching(c, chain)
 		}
+		b.overshoot(c)
 	}
+	b.margins()
 }
 
 // asked lists what the sheet asks for, whether the part is replaced or stays.
@@ -54,7 +56,7 @@ func (b *builder) edgeFigures(c *survey.Control, name string, asked survey.Field
 	// The first control on a sensor names its edges plainly; a second one says whose they are.
 	about := c.Sensor.V + "/" + name
 	if _, taken := fs.Get(about, "count_width"); taken {
-		about = c.Sensor.V + "/" + c.ID.V + "_" + name
+		about = c.Sensor.V + "/" + c.ID.V + "/" + name
 	}
 	fs.add(about, "count_width", h.CountWidth, "K", asked.Path, "change of temperature for one count at this threshold")
 	budget, err := b.spec.Chains[c.Sensor.V].Budget(asked.V)

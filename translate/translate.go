@@ -133,6 +133,7 @@ func (b *builder) program() {
 		return
 	}
 	b.spec.Program, b.spec.Plan = checked, b.plan
+	b.comesUp()
 }
 
 // probes builds the sensors that the program needs.

@@ -137,8 +137,14 @@ func (w *printer) comparisons() {
 
 // records checks that only a good record is believed.
 func (w *printer) records() {
+	first := make([]int64, len(w.p.State))
+	for i, v := range w.p.State {
+		first[i] = v.Start
+	}
+	w.line("static const struct %s first = %s;\n", w.lo, w.list(w.p.State, first, typeOf))
 	w.line("static void records(void)\n{\n    struct %s fresh;\n    struct %s m;\n    struct %s_remembered r;\n", w.lo, w.lo, w.lo)
-	w.line("    (void)memset(&fresh, 0xA5, sizeof fresh);\n    (void)memset(&m, 0x5A, sizeof m);\n    %s_start(&fresh, NULL);\n", w.lo)
+	w.line("    (void)memset(&m, 0x5A, sizeof m);\n    (void)memset(&fresh, 0xA5, sizeof fresh);\n    %s_start(&fresh, NULL);", w.lo)
+	w.line("    verdict(same_state(&fresh, &first), \"start without a record\", 0ul, 0ul, 0ul);\n")
 	blank := func(fill, what string) {
 		w.line("    (void)memset(&r, %s, sizeof r);\n    %s_start(&m, &r);\n    verdict(same_state(&m, &fresh), \"start with %s\", 0ul, 0ul, 0ul);", fill, w.lo, what)
 	}

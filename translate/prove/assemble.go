@@ -115,7 +115,9 @@ func (a *assembler) lead(g *goal) {
 }
 
 // mustStart reports whether a goal is about the first step.
-func (a *assembler) mustStart(g *goal) bool { return g.choice == nil && g.seen == nil && g.change == nil }
+func (a *assembler) mustStart(g *goal) bool {
+	return g.choice == nil && g.seen == nil && g.change == nil
+}
 
 // wayTo gives the legs that lead to a node, neighbours with like inputs joined.
 func wayTo(n *node) (root *node, way []leg) {

@@ -1,0 +1,153 @@
+package translate
+
+import (
+	"fmt"
+	"math"
+
+	"makebreak/survey"
+	"makebreak/translate/logic"
+)
+
+// drive is the process at its worst: where it settles with the load on, and how fast.
+type drive struct {
+	settles, tau, dead float64
+	from               survey.Source
+}
+
+// worstDrive takes the figure that drives furthest from a temperature; reason
+// says what is missing.
+func worstDrive(p survey.Process, from float64) (d drive, reason string) {
+	switch {
+	case !p.SettlesOn.Set && !p.Worst.SettlesOn.Set:
+		return d, "not determined: where the process settles with the load on is not on the sheet"
+	case !p.TimeConstant.Set:
+		return d, "not determined: the time constant of the process is not on the sheet"
+	}
+	d = drive{settles: p.SettlesOn.V, tau: p.TimeConstant.V, dead: p.DeadTime.V, from: p.SettlesOn.Source}
+	if w := p.Worst.SettlesOn; w.Set && (!p.SettlesOn.Set || math.Abs(w.V-from) > math.Abs(d.settles-from)) {
+		d.settles, d.from = w.V, w.Source
+	}
+	return d, ""
+}
+
+// slope is how fast the temperature moves at t, K/s: (settles − t)/τ for a
+// first-order process.
+func (d drive) slope(t float64) float64 { return (d.settles - t) / d.tau }
+
+// overshoot works out by how much the medium goes on after a hardware limit
+// has cut its load. The element lags a steady rise by slope × lag; after the
+// cut the load still works for the dead time. The slope is taken where the
+// limit acts and not allowed to fall, so the figure is on the safe side.
+func (b *builder) overshoot(c *survey.Control) {
+	if c.Plan.V == survey.Replace || !c.Switching() || len(c.Cuts) == 0 {
+		return
+	}
+	const name = "overshoot_after_cut"
+	fs := &b.spec.Figures
+	at := c.BreaksAt
+	if !at.Set {
+		fs.open(c.ID.V, name, "K", at.Path, "not determined: the temperature at which it acts is not on the sheet")
+		return
+	}
+	d, reason := worstDrive(b.survey.Process, at.V)
+	if reason != "" {
+		fs.open(c.ID.V, name, "K", "process", reason)
+		return
+	}
+	lag, lagFrom, ok := b.elementLag(c)
+	if !ok {
+		fs.open(c.ID.V, name, "K", c.Lag.Path, "not determined: neither the sheet nor the catalogue gives the lag of "+c.Element.V)
+		return
+	}
+	toward := d.slope(at.V)
+	if (c.Action.V == survey.BreaksOnRise) != (toward > 0) {
+		fs.add(c.ID.V, name, 0, "K", d.from.Path, "the load does not drive beyond this limit: it settles at "+Degrees(d.settles))
+		return
+	}
+	value := math.Abs(toward) * (lag + d.dead)
+	fs.add(c.ID.V, name, value, "K", d.from.Path, fmt.Sprintf("(%s − %s) / %s × (lag %s, %s + dead time %s)",
+		Degrees(d.settles), Degrees(at.V), Span(d.tau), Span(lag), lagFrom, Span(d.dead)))
+}
+
+// elementLag is the sensing lag of an old element: as the sheet has it, else
+// the longest that is usual for it.
+func (b *builder) elementLag(c *survey.Control) (seconds float64, from string, ok bool) {
+	if c.Lag.Set {
+		return c.Lag.V, c.Lag.Path, true
+	}
+	e, found := b.spec.Catalogue.Element(c.Element.V)
+	if !found {
+		return 0, "", false
+	}
+	lag, found := e.Lag(b.survey.Equipment.Medium.V)
+	return lag.To, "the longest usual for " + c.Element.V + ", " + lag.Source.String(), found
+}
+
+// margins compares, for every danger that is a temperature, how far the medium
+// can move before a bad probe is declared with how far away the danger is.
+func (b *builder) margins() {
+	for _, x := range b.survey.Dangers {
+		limit := x.Above
+		if x.Below.Set {
+			limit = x.Below
+		}
+		if !limit.Set {
+			continue
+		}
+		for _, c := range b.survey.Controls {
+			if translated(c) && c.Duty.V == survey.Operating && b.spec.Chains[c.Sensor.V] != nil {
+				b.margin(x, limit, c)
+				break
+			}
+		}
+	}
+}
+
+func (b *builder) margin(x *survey.Danger, limit survey.Field[float64], c *survey.Control) {
+	fs := &b.spec.Figures
+	edge := c.BreaksAt
+	if x.Below.Set == (c.Action.V == survey.BreaksOnRise) {
+		edge = c.MakesAt
+	}
+	fs.add(x.ID.V, "margin_to_danger", math.Abs(limit.V-edge.V), "K", limit.Path, fmt.Sprintf("from %s of %s to %s", Degrees(edge.V), c.ID.V, Degrees(limit.V)))
+	d, reason := worstDrive(b.survey.Process, edge.V)
+	if reason != "" {
+		fs.open(x.ID.V, "rise_before_fault", "K", "process", reason)
+		return
+	}
+	s := b.sensor(c.Sensor.V)
+	wait := s.FaultAfter.V + 3*b.step + s.Lag.V + d.dead
+	fs.add(x.ID.V, "rise_before_fault", math.Abs(d.slope(edge.V))*wait, "K", d.from.Path,
+		fmt.Sprintf("|%s − %s| / %s × (fault_after %s + three steps + lag %s + dead time %s)", Degrees(d.settles), Degrees(edge.V), Span(d.tau), Span(s.FaultAfter.V), Span(s.Lag.V), Span(d.dead)))
+}
+
+func (b *builder) sensor(id string) *survey.Sensor {
+	for _, s := range b.survey.Electronics.Sensors {
+		if s.ID.V == id {
+			return s
+		}
+	}
+	return &survey.Sensor{}
+}
+
+// comesUp runs the finished program from bad memories and notes, for every
+// limit with a manual reset, whether it comes up tripped from all of them.
+func (b *builder) comesUp() {
+	run := b.spec.Program.NewRun()
+	n := len(b.spec.Program.Survivors())
+	bad := []*logic.Record{nil, {Values: make([]int64, n)}, {Values: make([]int64, n), Check: 0xFFFF}}
+	for _, c := range b.survey.Controls {
+		k := b.plan.Contacts[c.ID.V]
+		if k == nil || !k.Latches || c.Reset.V != survey.ResetManual {
+			continue
+		}
+		tripped := 1.0
+		for _, r := range bad {
+			run.Start(r)
+			if run.Get(k.State) != latchTripped {
+				tripped = 0
+			}
+		}
+		b.spec.Figures.add(c.ID.V, "comes_up_tripped", tripped, "", c.Reset.Path, "program started without a record, with a blank one and with a wrong check word; 1: tripped after each")
+	}
+}
