@@ -44,15 +44,15 @@ func write(d disk, dir string, files []File) (err error) {
 	if real, err := filepath.EvalSymlinks(dir); err == nil {
 		dir = real
 	}
-	exists, err := folder(dir)
-	if err != nil {
-		return err
-	}
 	parent := filepath.Dir(dir)
 	if err := os.MkdirAll(parent, 0o777); err != nil {
 		return err
 	}
 	if err := tidy(dir); err != nil {
+		return err
+	}
+	exists, err := folder(dir)
+	if err != nil {
 		return err
 	}
 	if err := d.check("mkdir", parent); err != nil {
@@ -103,9 +103,11 @@ func tidy(dir string) error {
 	aside := filepath.Join(filepath.Dir(dir), "."+filepath.Base(dir)+oldMark)
 	if _, err := os.Stat(aside); err == nil {
 		if _, err := os.Stat(dir); errors.Is(err, fs.ErrNotExist) {
-			return os.Rename(aside, dir)
+			err = os.Rename(aside, dir)
+		} else {
+			err = os.RemoveAll(aside)
 		}
-		if err := os.RemoveAll(aside); err != nil {
+		if err != nil {
 			return err
 		}
 	}

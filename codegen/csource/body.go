@@ -348,7 +348,7 @@ func (w *printer) checkWord() {
 
 func (w *printer) remember() {
 	w.line("bool %s_remember(const struct %s *m, struct %s_remembered *r)\n{", w.lo, w.lo, w.lo)
-	w.line("    const uint16_t before = r->check;\n    bool changed = false;\n")
+	w.line("    uint16_t check;\n    bool changed = false;\n")
 	for _, v := range w.p.Survivors() {
 		now := "m->" + v.Name
 		if v.Kind == logic.Bool {
@@ -365,7 +365,7 @@ func (w *printer) remember() {
 	if len(w.p.Survivors()) == 0 {
 		w.line("    (void)m;")
 	}
-	w.line("    r->check = check_word(r);\n    return changed || (r->check != before);\n}\n")
+	w.line("    check = check_word(r);\n    if (r->check != check) {\n        r->check = check;\n        changed = true;\n    }\n    return changed;\n}\n")
 }
 
 func (w *printer) step() {

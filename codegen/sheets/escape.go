@@ -39,11 +39,16 @@ func Visible(s string) string {
 	return b.String()
 }
 
-// Markdown makes text stand for itself in Markdown, also in a table cell.
+// Markdown makes text stand for itself in Markdown, also in a table cell. An
+// underscore inside a word is left alone: there it means nothing (CommonMark
+// 0.31, 6.2).
 func Markdown(s string) string {
 	var b strings.Builder
-	for _, r := range s {
+	runes := []rune(s)
+	for i, r := range runes {
 		switch {
+		case r == '_' && i > 0 && i+1 < len(runes) && wordRune(runes[i-1]) && wordRune(runes[i+1]):
+			b.WriteRune(r)
 		case r == '\n':
 			b.WriteString("<br>")
 		case r == '\t':
@@ -64,6 +69,10 @@ func Markdown(s string) string {
 		}
 	}
 	return b.String()
+}
+
+func wordRune(r rune) bool {
+	return r == '_' || r >= '0' && r <= '9' || r >= 'a' && r <= 'z' || r >= 'A' && r <= 'Z'
 }
 
 // CSV prints rows by RFC 4180. A text that a spreadsheet would take for a

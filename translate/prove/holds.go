@@ -54,7 +54,7 @@ func (s *search) counterexample() *Counterexample {
 // steps will do it.
 func (s *search) shortest(v *violation) *Counterexample {
 	root, way := wayTo(v.at)
-	t := &trial{run: s.c.NewRun(), record: root.record, property: v.property}
+	t := &trial{run: alone(s.c, v.property), record: root.record}
 	if n, ok := t.breaks(way); ok {
 		way = cutTo(way, n)
 	}
@@ -82,10 +82,17 @@ func (s *search) shortest(v *violation) *Counterexample {
 const mostTrial = 2_000_000
 
 type trial struct {
-	run      *logic.Run
-	record   *logic.Record
-	property *logic.Property
-	spent    int
+	run    *logic.Run
+	record *logic.Record
+	spent  int
+}
+
+// alone makes a run that watches one property only.
+func alone(c *logic.Checked, p *logic.Property) *logic.Run {
+	k, q := *c, *c.Program
+	q.Never = []*logic.Property{p}
+	k.Program = &q
+	return k.NewRun()
 }
 
 // breaks reports after how many steps the legs break the property.
@@ -99,7 +106,7 @@ func (t *trial) breaks(way []leg) (steps int, ok bool) {
 			t.run.Step(l.inputs)
 			steps++
 			t.spent++
-			if t.run.Violated() == t.property {
+			if t.run.Violated() != nil {
 				return steps, true
 			}
 		}

@@ -46,7 +46,7 @@ func (s *search) judgeHit(h *hit) {
 // away is how far a goal of a choice is from being reached in this step.
 // Deciding is not enough: the difference must show.
 func (s *search) away(g *goal, h *hit) int {
-	d := g.distance(h.atoms, h.same, h.close)
+	d := g.distance(h.atoms, h.same, h.next)
 	if d > 0 {
 		return d + 1
 	}

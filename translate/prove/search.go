@@ -54,10 +54,10 @@ type search struct {
 
 // hit is a decision as it was taken in the present step.
 type hit struct {
-	n                  int32
-	outcome            bool
-	shown, asked       bool // whether its flip has been tried, and showed
-	atoms, same, close uint64
+	n                 int32
+	outcome           bool
+	shown, asked      bool // whether its flip has been tried, and showed
+	atoms, same, next uint64
 }
 
 // violation is where a property was first found broken.
@@ -122,7 +122,7 @@ func (s *search) note(d int, outcome bool, atoms, same, close uint64) {
 	}
 	s.pattern = h ^ atoms<<20
 	if len(s.choices[d].open) > 0 {
-		s.hits = append(s.hits, hit{n: int32(d), outcome: outcome, atoms: atoms, same: same, close: close})
+		s.hits = append(s.hits, hit{n: int32(d), outcome: outcome, atoms: atoms, same: same, next: close})
 	}
 }
 

@@ -1,0 +1,441 @@
+/* wah1_check.c: recorded inputs through the program; runs on any host
+ *
+ * Equipment: Warm-air heater, joinery workshop
+ * Site: Old Quay Joinery
+ * Printed by makebreak 0.1.0 from sheet.yaml
+ * Sheet SHA-256: b318e6b5696aaa536be0f12bde773165258387b28b91ac06c88802479138f8e6
+ *
+ * Replaces:
+ * - fan_disc: snap disc on the exchanger, starts the fan once it is warm
+ * - exchanger_stat: second disc, holds the exchanger down
+ *
+ * Stays hard-wired, and must:
+ * - exchanger_limit: rod limit across the exchanger, manual reset, in the burner's safety chain
+ *
+ * This helps to plan; it decides nothing. Local codes, the equipment's listing or approval, and a
+ * licensed person decide.
+ * Independent hardware limits stay in place, hard-wired, and are tested before anything else is
+ * touched.
+ * Isolate, lock off and prove dead before working on the equipment.
+ * The C is a skeleton to start from. It has not been certified for any purpose; no claim of
+ * compliance is made for it.
+ * Software cannot see what it has no input for. A finding of grade stop is ended only by changing
+ * the design.
+ */
+#include "wah1.h"
+
+#include <stdio.h>
+#include <string.h>
+
+/* Inputs held for so many steps; the outputs after each odd and each even step of them; the state
+ * after the last.
+ */
+struct row {
+    uint32_t steps;
+    struct wah1_in in;
+    struct wah1_out odd;
+    struct wah1_out even;
+    struct wah1 after;
+};
+
+static unsigned long passed;
+static unsigned long failed;
+
+static void verdict(bool good, const char *what, unsigned long vector, unsigned long row, unsigned long step)
+{
+    if (good) {
+        passed++;
+        return;
+    }
+    failed++;
+    if (failed <= 20ul) {
+        (void)printf("vector %lu row %lu step %lu: %s differs\n", vector, row, step, what);
+    }
+}
+
+static const struct row rows[] = {
+    /* vector 1 */
+    {1u, {false, false, 0u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 0u, 1u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 1u, 1u}},
+    {10u, {false, true, 0u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 0u, 11u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 11u, 1u}},
+    {1u, {false, true, 0u}, {false, true, 1u}, {false, true, 1u},
+     {0u, 3u, 0u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 12u, 1u}},
+    {1u, {false, true, 0u}, {false, true, 1u}, {false, true, 1u},
+     {0u, 3u, 1u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 13u, 1u}},
+    {11u, {false, true, 0u}, {false, true, 1u}, {false, true, 1u},
+     {0u, 3u, 12u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 24u, 1u}},
+    {1u, {false, true, 0u}, {false, true, 1u}, {false, true, 1u},
+     {0u, 3u, 12u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 25u, 1u}},
+    {1414u, {false, true, 0u}, {false, true, 1u}, {false, true, 1u},
+     {0u, 3u, 12u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 1439u, 1u}},
+    {1u, {false, true, 0u}, {false, true, 1u}, {false, true, 1u},
+     {0u, 3u, 12u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 0u, 0u, 1u}},
+    {1u, {false, true, 0u}, {false, true, 1u}, {false, true, 1u},
+     {0u, 3u, 12u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 0u, 1u, 1u}},
+    {1439u, {false, true, 0u}, {false, true, 1u}, {false, true, 1u},
+     {0u, 3u, 12u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 0u, 1440u, 1u}},
+    {1u, {false, true, 0u}, {false, true, 1u}, {false, true, 1u},
+     {0u, 3u, 12u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 0u, 1440u, 1u}},
+    {1u, {false, true, 381u}, {false, true, 1u}, {false, true, 1u},
+     {1u, 3u, 12u, 381u, 0u, 1u, 0u, 0u, 0u, 0u, false, 0u, 1440u, 1u}},
+    {1u, {false, false, 1u}, {false, true, 1u}, {false, true, 1u},
+     {0u, 3u, 12u, 381u, 0u, 1u, 0u, 0u, 381u, 0u, false, 0u, 1440u, 1u}},
+    {1u, {false, false, 479u}, {false, true, 1u}, {false, true, 1u},
+     {1u, 3u, 12u, 479u, 381u, 1u, 0u, 0u, 381u, 0u, false, 0u, 1440u, 1u}},
+    /* vector 2 */
+    {1u, {false, false, 0u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 0u, 1u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 1u, 1u}},
+    {2u, {false, false, 0u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 0u, 3u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 3u, 1u}},
+    {1u, {false, true, 0u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 0u, 4u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 4u, 1u}},
+    {1u, {false, true, 381u}, {false, true, 0u}, {false, true, 0u},
+     {1u, 0u, 5u, 381u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 5u, 1u}},
+    {2u, {false, false, 479u}, {false, true, 0u}, {false, true, 0u},
+     {3u, 0u, 7u, 479u, 479u, 1u, 0u, 0u, 479u, 0u, false, 1u, 7u, 1u}},
+    {1u, {false, false, 479u}, {false, true, 0u}, {false, true, 0u},
+     {4u, 1u, 0u, 479u, 479u, 1u, 0u, 0u, 479u, 0u, false, 1u, 8u, 1u}},
+    {1u, {false, false, 479u}, {false, true, 0u}, {false, true, 0u},
+     {5u, 1u, 1u, 479u, 479u, 1u, 0u, 0u, 479u, 0u, false, 1u, 9u, 1u}},
+    {35u, {false, false, 479u}, {false, true, 0u}, {false, true, 0u},
+     {40u, 1u, 12u, 479u, 479u, 1u, 0u, 0u, 479u, 0u, false, 1u, 44u, 1u}},
+    {1u, {false, false, 479u}, {false, true, 0u}, {false, true, 0u},
+     {40u, 1u, 12u, 479u, 479u, 1u, 0u, 0u, 479u, 0u, false, 1u, 45u, 1u}},
+    {1395u, {false, false, 479u}, {false, true, 0u}, {false, true, 0u},
+     {40u, 1u, 12u, 479u, 479u, 1u, 0u, 0u, 479u, 0u, false, 0u, 0u, 1u}},
+    {1u, {false, false, 473u}, {false, true, 0u}, {false, true, 0u},
+     {40u, 1u, 12u, 473u, 479u, 1u, 0u, 0u, 479u, 0u, false, 0u, 1u, 1u}},
+    {1u, {false, false, 473u}, {false, true, 0u}, {false, true, 0u},
+     {40u, 1u, 12u, 473u, 473u, 1u, 0u, 0u, 473u, 0u, false, 0u, 2u, 1u}},
+    {1u, {true, true, 480u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 2u, 0u, 473u, 473u, 1u, 0u, 0u, 473u, 0u, false, 0u, 3u, 1u}},
+    {1u, {false, false, 370u}, {false, true, 0u}, {false, true, 0u},
+     {1u, 2u, 1u, 370u, 473u, 1u, 0u, 0u, 473u, 0u, false, 0u, 4u, 1u}},
+    {2u, {false, false, 370u}, {false, true, 0u}, {false, true, 0u},
+     {3u, 2u, 3u, 370u, 370u, 1u, 0u, 0u, 370u, 0u, false, 0u, 6u, 1u}},
+    {1u, {false, false, 370u}, {false, true, 0u}, {false, true, 0u},
+     {4u, 1u, 0u, 370u, 370u, 1u, 1u, 0u, 370u, 0u, false, 0u, 7u, 1u}},
+    {1u, {false, false, 370u}, {false, true, 0u}, {false, true, 0u},
+     {5u, 1u, 1u, 370u, 370u, 1u, 1u, 0u, 370u, 0u, false, 0u, 8u, 1u}},
+    /* vector 3 */
+    {3u, {false, false, 0u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 0u, 3u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 3u, 1u}},
+    {1u, {false, true, 0u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 0u, 4u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 4u, 1u}},
+    {4u, {false, true, 361u}, {false, true, 0u}, {false, true, 0u},
+     {4u, 1u, 0u, 361u, 361u, 1u, 1u, 0u, 361u, 0u, false, 1u, 8u, 1u}},
+    {8u, {false, false, 65535u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 2u, 7u, 361u, 361u, 1u, 1u, 0u, 361u, 0u, false, 1u, 16u, 1u}},
+    {1u, {false, false, 65535u}, {false, true, 1u}, {false, true, 1u},
+     {0u, 3u, 0u, 361u, 361u, 1u, 0u, 0u, 361u, 0u, false, 1u, 17u, 1u}},
+    {39u, {false, false, 479u}, {false, true, 1u}, {false, true, 1u},
+     {39u, 3u, 12u, 479u, 479u, 1u, 0u, 0u, 479u, 0u, false, 1u, 56u, 1u}},
+    {1u, {false, false, 479u}, {false, true, 0u}, {false, true, 0u},
+     {40u, 1u, 0u, 479u, 479u, 1u, 0u, 0u, 479u, 0u, false, 1u, 57u, 1u}},
+    {1u, {false, false, 474u}, {false, true, 0u}, {false, true, 0u},
+     {40u, 1u, 1u, 474u, 479u, 1u, 0u, 0u, 479u, 0u, false, 1u, 58u, 1u}},
+    {1u, {false, false, 479u}, {false, true, 0u}, {false, true, 0u},
+     {40u, 1u, 2u, 479u, 474u, 1u, 0u, 0u, 479u, 0u, false, 1u, 59u, 1u}},
+    {1u, {false, false, 346u}, {false, true, 0u}, {false, true, 0u},
+     {40u, 1u, 3u, 346u, 479u, 1u, 0u, 0u, 474u, 0u, false, 1u, 60u, 1u}},
+    {1u, {false, false, 346u}, {false, true, 0u}, {false, true, 0u},
+     {40u, 1u, 4u, 346u, 346u, 0u, 1u, 0u, 346u, 0u, false, 1u, 61u, 1u}},
+    {1u, {false, false, 346u}, {false, true, 0u}, {false, true, 0u},
+     {40u, 1u, 5u, 346u, 346u, 0u, 1u, 0u, 346u, 0u, false, 1u, 62u, 1u}},
+    {1u, {true, false, 346u}, {true, false, 0u}, {true, false, 0u},
+     {40u, 1u, 6u, 346u, 346u, 0u, 1u, 1u, 346u, 0u, false, 2u, 0u, 0u}},
+    {1u, {true, false, 346u}, {true, false, 0u}, {true, false, 0u},
+     {40u, 1u, 7u, 346u, 346u, 0u, 1u, 1u, 346u, 1u, false, 2u, 1u, 0u}},
+    {1u, {true, false, 346u}, {true, false, 0u}, {true, false, 0u},
+     {40u, 1u, 8u, 346u, 346u, 0u, 1u, 1u, 346u, 2u, false, 2u, 2u, 0u}},
+    {1u, {true, false, 341u}, {true, false, 0u}, {true, false, 0u},
+     {40u, 1u, 9u, 341u, 346u, 0u, 1u, 1u, 346u, 3u, false, 2u, 3u, 0u}},
+    {1u, {true, false, 341u}, {true, false, 0u}, {true, false, 0u},
+     {40u, 1u, 10u, 341u, 341u, 0u, 1u, 1u, 341u, 4u, false, 2u, 4u, 0u}},
+    {626u, {true, false, 341u}, {true, false, 0u}, {true, false, 0u},
+     {40u, 1u, 12u, 341u, 341u, 0u, 1u, 1u, 341u, 630u, false, 2u, 630u, 0u}},
+    {1u, {true, false, 341u}, {false, true, 2u}, {false, true, 2u},
+     {40u, 1u, 12u, 341u, 341u, 0u, 1u, 0u, 341u, 631u, true, 1u, 0u, 1u}},
+    {1u, {true, false, 341u}, {false, true, 2u}, {false, true, 2u},
+     {40u, 1u, 12u, 341u, 341u, 0u, 1u, 0u, 341u, 0u, true, 1u, 1u, 1u}},
+    /* vector 4 */
+    {3u, {false, false, 0u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 0u, 3u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 3u, 1u}},
+    {1u, {false, true, 0u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 0u, 4u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 4u, 1u}},
+    {1u, {false, true, 381u}, {false, true, 0u}, {false, true, 0u},
+     {1u, 0u, 5u, 381u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 5u, 1u}},
+    {3u, {false, false, 479u}, {false, true, 0u}, {false, true, 0u},
+     {4u, 1u, 0u, 479u, 479u, 1u, 0u, 0u, 479u, 0u, false, 1u, 8u, 1u}},
+    {2u, {false, false, 473u}, {false, true, 0u}, {false, true, 0u},
+     {6u, 1u, 2u, 473u, 473u, 1u, 0u, 0u, 473u, 0u, false, 1u, 10u, 1u}},
+    {3u, {false, false, 370u}, {false, true, 0u}, {false, true, 0u},
+     {9u, 1u, 5u, 370u, 370u, 1u, 1u, 0u, 370u, 0u, false, 1u, 13u, 1u}},
+    {2u, {false, false, 480u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 2u, 1u, 370u, 370u, 1u, 1u, 0u, 370u, 0u, false, 1u, 15u, 1u}},
+    {4u, {false, false, 346u}, {false, true, 0u}, {false, true, 0u},
+     {4u, 1u, 0u, 346u, 346u, 0u, 1u, 0u, 346u, 0u, false, 1u, 19u, 1u}},
+    {3u, {true, false, 346u}, {true, false, 0u}, {true, false, 0u},
+     {7u, 1u, 3u, 346u, 346u, 0u, 1u, 1u, 346u, 2u, false, 2u, 2u, 0u}},
+    {3u, {true, false, 341u}, {true, false, 0u}, {true, false, 0u},
+     {10u, 1u, 6u, 341u, 341u, 0u, 1u, 1u, 341u, 5u, false, 2u, 5u, 0u}},
+    {2u, {true, false, 346u}, {true, false, 0u}, {true, false, 0u},
+     {12u, 1u, 8u, 346u, 346u, 0u, 1u, 1u, 346u, 0u, false, 2u, 7u, 0u}},
+    {1u, {false, false, 381u}, {false, true, 0u}, {false, true, 0u},
+     {13u, 1u, 9u, 381u, 346u, 0u, 1u, 0u, 346u, 1u, false, 1u, 0u, 1u}},
+    {1u, {false, false, 381u}, {false, true, 0u}, {false, true, 0u},
+     {14u, 1u, 10u, 381u, 381u, 1u, 1u, 0u, 381u, 0u, false, 1u, 1u, 1u}},
+    {2u, {false, false, 385u}, {false, true, 0u}, {false, true, 0u},
+     {16u, 1u, 12u, 385u, 385u, 1u, 0u, 0u, 385u, 0u, false, 1u, 3u, 1u}},
+    {1u, {true, false, 341u}, {false, true, 0u}, {false, true, 0u},
+     {17u, 1u, 12u, 341u, 385u, 1u, 0u, 0u, 385u, 0u, false, 1u, 4u, 1u}},
+    {2u, {true, false, 341u}, {true, false, 0u}, {true, false, 0u},
+     {19u, 1u, 12u, 341u, 341u, 0u, 1u, 1u, 341u, 1u, false, 2u, 1u, 0u}},
+    {2u, {false, false, 359u}, {false, true, 0u}, {false, true, 0u},
+     {21u, 1u, 12u, 359u, 359u, 0u, 1u, 0u, 359u, 0u, false, 1u, 1u, 1u}},
+    {1u, {true, true, 480u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 2u, 0u, 359u, 359u, 0u, 1u, 0u, 359u, 0u, false, 1u, 2u, 1u}},
+    {7u, {true, true, 480u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 2u, 7u, 359u, 359u, 0u, 1u, 0u, 359u, 0u, false, 1u, 9u, 1u}},
+    {1u, {true, true, 480u}, {false, true, 1u}, {false, true, 1u},
+     {0u, 3u, 0u, 359u, 359u, 1u, 0u, 0u, 359u, 0u, false, 1u, 10u, 1u}},
+    /* vector 5 */
+    {3u, {false, false, 0u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 0u, 3u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 3u, 1u}},
+    {1u, {false, true, 0u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 0u, 4u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 4u, 1u}},
+    {1u, {false, true, 381u}, {false, true, 0u}, {false, true, 0u},
+     {1u, 0u, 5u, 381u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 5u, 1u}},
+    {3u, {false, false, 479u}, {false, true, 0u}, {false, true, 0u},
+     {4u, 1u, 0u, 479u, 479u, 1u, 0u, 0u, 479u, 0u, false, 1u, 8u, 1u}},
+    {2u, {false, false, 473u}, {false, true, 0u}, {false, true, 0u},
+     {6u, 1u, 2u, 473u, 473u, 1u, 0u, 0u, 473u, 0u, false, 1u, 10u, 1u}},
+    {3u, {false, false, 370u}, {false, true, 0u}, {false, true, 0u},
+     {9u, 1u, 5u, 370u, 370u, 1u, 1u, 0u, 370u, 0u, false, 1u, 13u, 1u}},
+    {2u, {false, false, 480u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 2u, 1u, 370u, 370u, 1u, 1u, 0u, 370u, 0u, false, 1u, 15u, 1u}},
+    {4u, {false, false, 346u}, {false, true, 0u}, {false, true, 0u},
+     {4u, 1u, 0u, 346u, 346u, 0u, 1u, 0u, 346u, 0u, false, 1u, 19u, 1u}},
+    {3u, {true, false, 346u}, {true, false, 0u}, {true, false, 0u},
+     {7u, 1u, 3u, 346u, 346u, 0u, 1u, 1u, 346u, 2u, false, 2u, 2u, 0u}},
+    {3u, {true, false, 341u}, {true, false, 0u}, {true, false, 0u},
+     {10u, 1u, 6u, 341u, 341u, 0u, 1u, 1u, 341u, 5u, false, 2u, 5u, 0u}},
+    {1u, {true, false, 294u}, {true, false, 0u}, {true, false, 0u},
+     {11u, 1u, 7u, 294u, 341u, 0u, 1u, 1u, 341u, 6u, false, 2u, 6u, 0u}},
+    {3u, {true, false, 480u}, {true, false, 0u}, {true, false, 0u},
+     {0u, 2u, 2u, 294u, 341u, 0u, 1u, 1u, 294u, 9u, false, 2u, 9u, 0u}},
+    {5u, {true, true, 480u}, {true, false, 0u}, {true, false, 0u},
+     {0u, 2u, 7u, 294u, 341u, 0u, 1u, 1u, 294u, 14u, false, 2u, 14u, 0u}},
+    {1u, {true, true, 480u}, {false, true, 1u}, {false, true, 1u},
+     {0u, 3u, 0u, 294u, 341u, 1u, 0u, 0u, 294u, 15u, false, 1u, 0u, 1u}},
+    /* vector 6 */
+    {3u, {false, false, 0u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 0u, 3u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 3u, 1u}},
+    {1u, {false, true, 0u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 0u, 4u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 4u, 1u}},
+    {1u, {false, true, 381u}, {false, true, 0u}, {false, true, 0u},
+     {1u, 0u, 5u, 381u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 5u, 1u}},
+    {3u, {false, false, 479u}, {false, true, 0u}, {false, true, 0u},
+     {4u, 1u, 0u, 479u, 479u, 1u, 0u, 0u, 479u, 0u, false, 1u, 8u, 1u}},
+    {2u, {false, false, 473u}, {false, true, 0u}, {false, true, 0u},
+     {6u, 1u, 2u, 473u, 473u, 1u, 0u, 0u, 473u, 0u, false, 1u, 10u, 1u}},
+    {3u, {false, false, 370u}, {false, true, 0u}, {false, true, 0u},
+     {9u, 1u, 5u, 370u, 370u, 1u, 1u, 0u, 370u, 0u, false, 1u, 13u, 1u}},
+    {2u, {false, false, 480u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 2u, 1u, 370u, 370u, 1u, 1u, 0u, 370u, 0u, false, 1u, 15u, 1u}},
+    {4u, {false, false, 346u}, {false, true, 0u}, {false, true, 0u},
+     {4u, 1u, 0u, 346u, 346u, 0u, 1u, 0u, 346u, 0u, false, 1u, 19u, 1u}},
+    {2u, {true, false, 346u}, {true, false, 0u}, {true, false, 0u},
+     {6u, 1u, 2u, 346u, 346u, 0u, 1u, 1u, 346u, 1u, false, 2u, 1u, 0u}},
+    {1u, {true, false, 381u}, {true, false, 0u}, {true, false, 0u},
+     {7u, 1u, 3u, 381u, 346u, 0u, 1u, 1u, 346u, 2u, false, 2u, 2u, 0u}},
+    {1u, {true, false, 381u}, {true, true, 0u}, {true, true, 0u},
+     {8u, 1u, 4u, 381u, 381u, 1u, 1u, 1u, 381u, 0u, false, 2u, 3u, 1u}},
+    {1u, {true, false, 341u}, {true, true, 0u}, {true, true, 0u},
+     {9u, 1u, 5u, 341u, 381u, 1u, 1u, 1u, 381u, 1u, false, 2u, 4u, 1u}},
+    {1u, {true, false, 341u}, {true, false, 0u}, {true, false, 0u},
+     {10u, 1u, 6u, 341u, 341u, 0u, 1u, 1u, 341u, 2u, false, 2u, 5u, 0u}},
+    {2u, {true, false, 344u}, {true, false, 0u}, {true, false, 0u},
+     {12u, 1u, 8u, 344u, 344u, 0u, 1u, 1u, 341u, 4u, false, 2u, 7u, 0u}},
+    {4u, {false, true, 364u}, {false, true, 0u}, {false, true, 0u},
+     {16u, 1u, 12u, 364u, 364u, 1u, 1u, 0u, 364u, 0u, false, 1u, 3u, 1u}},
+    {2u, {false, true, 348u}, {false, true, 0u}, {false, true, 0u},
+     {18u, 1u, 12u, 348u, 348u, 1u, 1u, 0u, 348u, 0u, false, 1u, 5u, 1u}},
+    {1u, {true, true, 347u}, {true, true, 0u}, {true, true, 0u},
+     {19u, 1u, 12u, 347u, 348u, 1u, 1u, 1u, 348u, 0u, false, 2u, 0u, 1u}},
+    {1u, {true, true, 347u}, {true, false, 0u}, {true, false, 0u},
+     {20u, 1u, 12u, 347u, 347u, 0u, 1u, 1u, 347u, 1u, false, 2u, 1u, 0u}},
+    {629u, {true, true, 347u}, {true, false, 0u}, {true, false, 0u},
+     {40u, 1u, 12u, 347u, 347u, 0u, 1u, 1u, 347u, 630u, false, 2u, 630u, 0u}},
+    {1u, {true, true, 347u}, {false, true, 2u}, {false, true, 2u},
+     {40u, 1u, 12u, 347u, 347u, 0u, 1u, 0u, 347u, 631u, true, 1u, 0u, 1u}},
+    {1u, {false, true, 292u}, {false, true, 2u}, {false, true, 2u},
+     {0u, 2u, 0u, 347u, 347u, 0u, 1u, 0u, 347u, 0u, true, 1u, 1u, 1u}},
+    /* vector 7 */
+    {1u, {false, false, 0u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 0u, 1u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 1u, 1u}},
+    {2880u, {false, false, 369u}, {false, true, 0u}, {false, true, 0u},
+     {40u, 1u, 12u, 369u, 369u, 1u, 1u, 0u, 369u, 0u, false, 0u, 1440u, 1u}},
+    {1u, {true, false, 369u}, {true, true, 0u}, {true, true, 0u},
+     {40u, 1u, 12u, 369u, 369u, 1u, 1u, 1u, 369u, 0u, false, 2u, 0u, 1u}},
+    /* vector 8 */
+    {1u, {false, false, 0u}, {false, true, 0u}, {false, true, 0u},
+     {0u, 0u, 1u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 1u, 1u}},
+    {4u, {false, false, 371u}, {false, true, 0u}, {false, true, 0u},
+     {4u, 1u, 0u, 371u, 371u, 1u, 0u, 0u, 371u, 0u, false, 1u, 5u, 1u}},
+    {1u, {true, true, 293u}, {false, true, 0u}, {false, true, 0u},
+     {5u, 1u, 1u, 293u, 371u, 1u, 0u, 0u, 371u, 0u, false, 1u, 6u, 1u}},
+    {3u, {true, false, 346u}, {true, false, 0u}, {true, false, 0u},
+     {8u, 1u, 4u, 346u, 346u, 0u, 1u, 1u, 346u, 2u, false, 2u, 2u, 0u}},
+    {1u, {true, false, 382u}, {true, false, 0u}, {true, false, 0u},
+     {9u, 1u, 5u, 382u, 346u, 0u, 1u, 1u, 346u, 3u, false, 2u, 3u, 0u}},
+    {1u, {true, false, 382u}, {false, true, 0u}, {false, true, 0u},
+     {10u, 1u, 6u, 382u, 382u, 1u, 0u, 0u, 382u, 0u, false, 1u, 0u, 1u}},
+    {1u, {true, false, 341u}, {false, true, 0u}, {false, true, 0u},
+     {11u, 1u, 7u, 341u, 382u, 1u, 0u, 0u, 382u, 0u, false, 1u, 1u, 1u}},
+    {2u, {true, false, 341u}, {true, false, 0u}, {true, false, 0u},
+     {13u, 1u, 9u, 341u, 341u, 0u, 1u, 1u, 341u, 1u, false, 2u, 1u, 0u}},
+    {2u, {false, false, 360u}, {false, true, 0u}, {false, true, 0u},
+     {15u, 1u, 11u, 360u, 360u, 1u, 1u, 0u, 360u, 0u, false, 1u, 1u, 1u}},
+    {4u, {false, true, 361u}, {false, true, 0u}, {false, true, 0u},
+     {19u, 1u, 12u, 361u, 361u, 1u, 1u, 0u, 361u, 0u, false, 1u, 5u, 1u}},
+    {2u, {true, true, 365u}, {true, true, 0u}, {true, true, 0u},
+     {21u, 1u, 12u, 365u, 365u, 1u, 1u, 1u, 361u, 1u, false, 2u, 1u, 1u}},
+};
+
+/* Where each vector begins and ends in the rows, and the record that it starts with. */
+struct vector {
+    uint32_t first;
+    uint32_t end;
+    bool has_record;
+    struct wah1_remembered record;
+};
+
+static const struct vector vectors[] = {
+    {0u, 14u, false, {0u}},
+    {14u, 31u, false, {0u}},
+    {31u, 51u, false, {0u}},
+    {51u, 71u, false, {0u}},
+    {71u, 85u, false, {0u}},
+    {85u, 106u, false, {0u}},
+    {106u, 109u, false, {0u}},
+    {109u, 120u, false, {0u}},
+};
+
+static bool same_out(const struct wah1_out *a, const struct wah1_out *b)
+{
+    return (a->burner_call == b->burner_call) &&
+           (a->fan == b->fan) &&
+           (a->fault == b->fault);
+}
+
+static bool same_state(const struct wah1 *a, const struct wah1 *b)
+{
+    return (a->exchanger_probe_good_for == b->exchanger_probe_good_for) &&
+           (a->exchanger_probe_state == b->exchanger_probe_state) &&
+           (a->exchanger_probe_state_for == b->exchanger_probe_state_for) &&
+           (a->exchanger_probe_last == b->exchanger_probe_last) &&
+           (a->exchanger_probe_before == b->exchanger_probe_before) &&
+           (a->fan_disc == b->fan_disc) &&
+           (a->exchanger_stat == b->exchanger_stat) &&
+           (a->burner_call == b->burner_call) &&
+           (a->burner_call_effect_from == b->burner_call_effect_from) &&
+           (a->burner_call_effect_for == b->burner_call_effect_for) &&
+           (a->burner_call_no_effect == b->burner_call_no_effect) &&
+           (a->run_on == b->run_on) &&
+           (a->run_on_for == b->run_on_for) &&
+           (a->fan == b->fan);
+}
+
+static void run(const struct vector *v, unsigned long number)
+{
+    struct wah1 m;
+    struct wah1_out out;
+    uint32_t i;
+    uint32_t n;
+
+    (void)memset(&m, 0xA5, sizeof m); /* nothing may rest on zeroed memory */
+    (void)memset(&out, 0, sizeof out);
+    wah1_start(&m, v->has_record ? &v->record : NULL);
+    for (i = v->first; i < v->end; i++) {
+        for (n = 0u; n < rows[i].steps; n++) {
+            wah1_step(&m, &rows[i].in, &out);
+            verdict(same_out(&out, ((n & 1u) == 0u) ? &rows[i].odd : &rows[i].even), "output", number, (unsigned long)(i - v->first), (unsigned long)n);
+        }
+        verdict(same_state(&m, &rows[i].after), "state", number, (unsigned long)(i - v->first), (unsigned long)n);
+    }
+}
+
+static const struct wah1 first = {0u, 0u, 0u, 0u, 0u, 1u, 0u, 0u, 0u, 0u, false, 1u, 0u, 1u};
+
+static void records(void)
+{
+    struct wah1 fresh;
+    struct wah1 m;
+    struct wah1_remembered r;
+
+    (void)memset(&m, 0x5A, sizeof m);
+    (void)memset(&fresh, 0xA5, sizeof fresh);
+    wah1_start(&fresh, NULL);
+    verdict(same_state(&fresh, &first), "start without a record", 0ul, 0ul, 0ul);
+
+    (void)memset(&r, 0x00, sizeof r);
+    wah1_start(&m, &r);
+    verdict(same_state(&m, &fresh), "start with a blank record", 0ul, 0ul, 0ul);
+    (void)memset(&r, 0xFF, sizeof r);
+    wah1_start(&m, &r);
+    verdict(same_state(&m, &fresh), "start with an erased record", 0ul, 0ul, 0ul);
+    (void)memset(&r, 0, sizeof r);
+    verdict(wah1_remember(&fresh, &r), "a new record to write", 0ul, 0ul, 0ul);
+    verdict(!wah1_remember(&fresh, &r), "no record to write", 0ul, 0ul, 0ul);
+}
+
+static void upset(void)
+{
+    struct wah1 m;
+    struct wah1_in in;
+    struct wah1_out out;
+
+    (void)memset(&in, 0, sizeof in);
+    wah1_start(&m, NULL);
+    m.exchanger_probe_state = 255u;
+    wah1_step(&m, &in, &out);
+    verdict(m.exchanger_probe_state == (uint8_t)WAH1_EXCHANGER_PROBE_STATE_FAULTY, "exchanger_probe_state after an upset", 0ul, 0ul, 0ul);
+    wah1_start(&m, NULL);
+    m.fan_disc = 255u;
+    wah1_step(&m, &in, &out);
+    verdict(m.fan_disc == (uint8_t)WAH1_FAN_DISC_MADE, "fan_disc after an upset", 0ul, 0ul, 0ul);
+    wah1_start(&m, NULL);
+    m.exchanger_stat = 255u;
+    wah1_step(&m, &in, &out);
+    verdict(m.exchanger_stat == (uint8_t)WAH1_EXCHANGER_STAT_OPEN, "exchanger_stat after an upset", 0ul, 0ul, 0ul);
+    wah1_start(&m, NULL);
+    m.burner_call = 255u;
+    wah1_step(&m, &in, &out);
+    verdict(m.burner_call == (uint8_t)WAH1_BURNER_CALL_OFF, "burner_call after an upset", 0ul, 0ul, 0ul);
+    wah1_start(&m, NULL);
+    m.run_on = 255u;
+    wah1_step(&m, &in, &out);
+    verdict(m.run_on == (uint8_t)WAH1_RUN_ON_RUNNING, "run_on after an upset", 0ul, 0ul, 0ul);
+    wah1_start(&m, NULL);
+    m.fan = 255u;
+    wah1_step(&m, &in, &out);
+    verdict(m.fan == (uint8_t)WAH1_FAN_ON, "fan after an upset", 0ul, 0ul, 0ul);
+    (void)m;
+    (void)in;
+    (void)out;
+}
+
+int main(void)
+{
+    unsigned long i;
+
+    for (i = 0ul; i < (unsigned long)(sizeof vectors / sizeof vectors[0]); i++) {
+        run(&vectors[i], i + 1ul);
+    }
+    records();
+    upset();
+    (void)printf("%lu passed, %lu failed\n", passed, failed);
+    return (failed == 0ul) ? 0 : 1;
+}

@@ -1,0 +1,67 @@
+/* wah1_port.h: what the board must provide
+ *
+ * Equipment: Warm-air heater, joinery workshop
+ * Site: Old Quay Joinery
+ * Printed by makebreak 0.1.0 from sheet.yaml
+ * Sheet SHA-256: b318e6b5696aaa536be0f12bde773165258387b28b91ac06c88802479138f8e6
+ *
+ * Replaces:
+ * - fan_disc: snap disc on the exchanger, starts the fan once it is warm
+ * - exchanger_stat: second disc, holds the exchanger down
+ *
+ * Stays hard-wired, and must:
+ * - exchanger_limit: rod limit across the exchanger, manual reset, in the burner's safety chain
+ *
+ * This helps to plan; it decides nothing. Local codes, the equipment's listing or approval, and a
+ * licensed person decide.
+ * Independent hardware limits stay in place, hard-wired, and are tested before anything else is
+ * touched.
+ * Isolate, lock off and prove dead before working on the equipment.
+ * The C is a skeleton to start from. It has not been certified for any purpose; no claim of
+ * compliance is made for it.
+ * Software cannot see what it has no input for. A finding of grade stop is ended only by changing
+ * the design.
+ */
+#ifndef WAH1_PORT_H
+#define WAH1_PORT_H
+
+#include "wah1.h"
+
+/* Time. Returns once the next step is due, with the number of steps that have become due since the
+ * last return: 1 when all is well, more when steps were missed.
+ */
+uint16_t wah1_port_wait(void);
+
+/* room thermostat, stays as it is */
+bool wah1_port_room_calls(void);
+
+/* differential pressure switch over the fan */
+bool wah1_port_air_proven(void);
+
+/* platinum film probe clamped beside the old disc, raw counts, as the converter gives them */
+uint16_t wah1_port_exchanger_probe(void);
+
+/* Drives the coil or gate of call to the approved automatic burner control: true puts current into
+ * it.
+ */
+void wah1_port_drive_burner_call(bool driven);
+
+/* Drives the coil or gate of 0.75 kW fan through its contactor: true puts current into it. */
+void wah1_port_drive_fan(bool driven);
+
+/* Shows the faults to somebody: a lamp, a display, a bus. Bits are named in wah1.h. */
+void wah1_port_show(uint16_t fault);
+
+/* The memory that survives a power cut. Reading returns false where there is none or it cannot be
+ * read. A write must not be torn: write a second copy, or let the check word find the torn one,
+ * which then comes up tripped.
+ */
+bool wah1_port_recall(struct wah1_remembered *r);
+void wah1_port_keep(const struct wah1_remembered *r);
+
+/* Tells the watchdog that a step has been done. Call it nowhere else: not from an interrupt, not
+ * from a waiting loop.
+ */
+void wah1_port_alive(void);
+
+#endif

@@ -1,0 +1,470 @@
+/* cal2_check.c: recorded inputs through the program; runs on any host
+ *
+ * Equipment: Calorifier 2, east plant room
+ * Site: Harbour Lane Laundry
+ * Printed by makebreak 0.1.0 from sheet.yaml
+ * Sheet SHA-256: 2ab43e817eac8807b18bdd14c38c5efd2bd324b5d3f4009e33bafa75cbb44596
+ *
+ * Replaces:
+ * - tank_stat: rod immersion stat in the top boss
+ *
+ * Stays hard-wired, and must:
+ * - high_limit: capillary limit in the same boss, manual reset
+ *
+ * This helps to plan; it decides nothing. Local codes, the equipment's listing or approval, and a
+ * licensed person decide.
+ * Independent hardware limits stay in place, hard-wired, and are tested before anything else is
+ * touched.
+ * Isolate, lock off and prove dead before working on the equipment.
+ * The C is a skeleton to start from. It has not been certified for any purpose; no claim of
+ * compliance is made for it.
+ * Software cannot see what it has no input for. A finding of grade stop is ended only by changing
+ * the design.
+ */
+#include "cal2.h"
+
+#include <stdio.h>
+#include <string.h>
+
+/* Inputs held for so many steps; the outputs after each odd and each even step of them; the state
+ * after the last.
+ */
+struct row {
+    uint32_t steps;
+    struct cal2_in in;
+    struct cal2_out odd;
+    struct cal2_out even;
+    struct cal2 after;
+};
+
+static unsigned long passed;
+static unsigned long failed;
+
+static void verdict(bool good, const char *what, unsigned long vector, unsigned long row, unsigned long step)
+{
+    if (good) {
+        passed++;
+        return;
+    }
+    failed++;
+    if (failed <= 20ul) {
+        (void)printf("vector %lu row %lu step %lu: %s differs\n", vector, row, step, what);
+    }
+}
+
+static const struct row rows[] = {
+    /* vector 1 */
+    {1u, {false, false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 1u, 0u, 0u, 0u, 0u, 1u, 0u, false, 0u, 0u, false}},
+    {1u, {false, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {1u, 0u, 2u, 1974u, 0u, 0u, 0u, 2u, 0u, false, 0u, 0u, false}},
+    {1u, {false, false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 3u, 1974u, 0u, 0u, 0u, 3u, 0u, false, 1974u, 0u, false}},
+    {1u, {false, false, 2082u, false}, {false, 0u}, {false, 0u},
+     {1u, 0u, 4u, 2082u, 1974u, 0u, 0u, 4u, 0u, false, 1974u, 0u, false}},
+    {2u, {false, false, 2082u, false}, {false, 0u}, {false, 0u},
+     {3u, 0u, 6u, 2082u, 2082u, 0u, 0u, 6u, 0u, false, 2082u, 0u, false}},
+    {1u, {false, false, 2082u, false}, {false, 0u}, {false, 0u},
+     {4u, 1u, 0u, 2082u, 2082u, 1u, 0u, 7u, 0u, false, 2082u, 0u, false}},
+    {1u, {false, false, 2082u, false}, {false, 0u}, {false, 0u},
+     {5u, 1u, 1u, 2082u, 2082u, 1u, 0u, 8u, 0u, false, 2082u, 0u, false}},
+    {1u, {false, false, 4086u, false}, {false, 0u}, {false, 0u},
+     {0u, 2u, 0u, 2082u, 2082u, 1u, 0u, 9u, 0u, false, 2082u, 0u, false}},
+    {1u, {false, false, 4086u, false}, {false, 0u}, {false, 0u},
+     {0u, 2u, 1u, 2082u, 2082u, 1u, 0u, 10u, 0u, false, 2082u, 0u, false}},
+    /* vector 2 */
+    {1u, {false, false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 1u, 0u, 0u, 0u, 0u, 1u, 0u, false, 0u, 0u, false}},
+    {10u, {false, false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 11u, 0u, 0u, 0u, 0u, 11u, 0u, false, 0u, 0u, false}},
+    {1u, {false, false, 0u, false}, {false, 1u}, {false, 1u},
+     {0u, 3u, 0u, 0u, 0u, 0u, 0u, 12u, 0u, false, 0u, 0u, false}},
+    {1u, {false, false, 0u, false}, {false, 1u}, {false, 1u},
+     {0u, 3u, 1u, 0u, 0u, 0u, 0u, 13u, 0u, false, 0u, 0u, false}},
+    {11u, {false, false, 0u, false}, {false, 1u}, {false, 1u},
+     {0u, 3u, 12u, 0u, 0u, 0u, 0u, 24u, 0u, false, 0u, 0u, false}},
+    {1u, {false, false, 0u, false}, {false, 1u}, {false, 1u},
+     {0u, 3u, 12u, 0u, 0u, 0u, 0u, 25u, 0u, false, 0u, 0u, false}},
+    {215u, {false, false, 0u, false}, {false, 1u}, {false, 1u},
+     {0u, 3u, 12u, 0u, 0u, 0u, 0u, 240u, 0u, false, 0u, 0u, false}},
+    {1u, {false, false, 0u, false}, {false, 1u}, {false, 1u},
+     {0u, 3u, 12u, 0u, 0u, 0u, 0u, 240u, 0u, false, 0u, 0u, false}},
+    /* vector 3 */
+    {1u, {false, false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 1u, 0u, 0u, 0u, 0u, 1u, 0u, false, 0u, 0u, false}},
+    {1u, {false, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {1u, 0u, 2u, 1974u, 0u, 0u, 0u, 2u, 0u, false, 0u, 0u, false}},
+    {4u, {false, false, 2082u, false}, {false, 0u}, {false, 0u},
+     {5u, 1u, 1u, 2082u, 2082u, 1u, 0u, 6u, 0u, false, 2082u, 0u, false}},
+    {2u, {false, false, 4086u, false}, {false, 0u}, {false, 0u},
+     {0u, 2u, 1u, 2082u, 2082u, 1u, 0u, 8u, 0u, false, 2082u, 0u, false}},
+    {1u, {true, false, 4086u, false}, {false, 0u}, {false, 0u},
+     {0u, 2u, 2u, 2082u, 2082u, 1u, 0u, 9u, 0u, false, 2082u, 0u, false}},
+    {1u, {true, false, 1976u, true}, {false, 0u}, {false, 0u},
+     {1u, 2u, 3u, 1976u, 2082u, 1u, 0u, 10u, 1u, false, 2082u, 0u, false}},
+    {1u, {true, false, 1976u, true}, {false, 0u}, {false, 0u},
+     {2u, 2u, 4u, 1976u, 1976u, 1u, 0u, 11u, 2u, false, 1976u, 0u, false}},
+    {1u, {true, false, 1976u, true}, {false, 0u}, {false, 0u},
+     {3u, 2u, 5u, 1976u, 1976u, 1u, 0u, 12u, 3u, false, 1976u, 0u, false}},
+    {1u, {true, false, 1976u, true}, {false, 2u}, {false, 2u},
+     {4u, 1u, 0u, 1976u, 1976u, 1u, 0u, 13u, 4u, true, 1976u, 0u, false}},
+    {1u, {true, false, 1976u, true}, {false, 2u}, {false, 2u},
+     {5u, 1u, 1u, 1976u, 1976u, 1u, 0u, 14u, 4u, true, 1976u, 0u, false}},
+    {35u, {true, false, 1976u, true}, {false, 2u}, {false, 2u},
+     {40u, 1u, 12u, 1976u, 1976u, 1u, 0u, 49u, 4u, true, 1976u, 0u, false}},
+    {1u, {true, false, 1976u, true}, {false, 2u}, {false, 2u},
+     {40u, 1u, 12u, 1976u, 1976u, 1u, 0u, 50u, 4u, true, 1976u, 0u, false}},
+    {190u, {true, false, 1976u, true}, {false, 2u}, {false, 2u},
+     {40u, 1u, 12u, 1976u, 1976u, 1u, 0u, 240u, 4u, true, 1976u, 0u, false}},
+    {8u, {false, false, 0u, false}, {false, 2u}, {false, 2u},
+     {0u, 2u, 7u, 1976u, 1976u, 1u, 0u, 240u, 0u, true, 1976u, 0u, false}},
+    {1u, {false, false, 0u, false}, {false, 3u}, {false, 3u},
+     {0u, 3u, 0u, 1976u, 1976u, 0u, 0u, 240u, 0u, true, 1976u, 0u, false}},
+    {16u, {false, false, 0u, false}, {false, 3u}, {false, 3u},
+     {0u, 3u, 12u, 1976u, 1976u, 0u, 0u, 240u, 0u, true, 1976u, 0u, false}},
+    {39u, {false, false, 1972u, false}, {false, 3u}, {false, 3u},
+     {39u, 3u, 12u, 1972u, 1972u, 0u, 0u, 240u, 0u, true, 1972u, 0u, false}},
+    {1u, {false, false, 1972u, false}, {false, 2u}, {false, 2u},
+     {40u, 1u, 0u, 1972u, 1972u, 0u, 0u, 240u, 0u, true, 1972u, 0u, false}},
+    /* vector 4 */
+    {1u, {false, false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 1u, 0u, 0u, 0u, 0u, 1u, 0u, false, 0u, 0u, false}},
+    {1u, {false, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {1u, 0u, 2u, 1974u, 0u, 0u, 0u, 2u, 0u, false, 0u, 0u, false}},
+    {6u, {false, false, 2082u, false}, {false, 0u}, {false, 0u},
+     {7u, 1u, 3u, 2082u, 2082u, 1u, 0u, 8u, 0u, false, 2082u, 0u, false}},
+    {1u, {true, false, 2082u, false}, {false, 0u}, {false, 0u},
+     {8u, 1u, 4u, 2082u, 2082u, 1u, 0u, 9u, 0u, false, 2082u, 0u, false}},
+    {2u, {false, false, 1975u, false}, {false, 0u}, {false, 0u},
+     {10u, 1u, 6u, 1975u, 1975u, 1u, 0u, 11u, 0u, false, 1975u, 0u, false}},
+    {229u, {false, false, 1975u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1975u, 1975u, 1u, 0u, 240u, 0u, false, 1975u, 0u, false}},
+    {1u, {false, false, 1973u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1973u, 1975u, 1u, 0u, 240u, 0u, false, 1975u, 0u, false}},
+    {1u, {false, false, 2080u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 2080u, 1973u, 1u, 0u, 240u, 0u, false, 1975u, 0u, false}},
+    {4u, {false, false, 2082u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 2082u, 2082u, 1u, 0u, 240u, 0u, false, 2082u, 0u, false}},
+    {2u, {false, false, 4086u, false}, {false, 0u}, {false, 0u},
+     {0u, 2u, 1u, 2082u, 2082u, 1u, 0u, 240u, 0u, false, 2082u, 0u, false}},
+    {1u, {true, false, 2081u, false}, {false, 0u}, {false, 0u},
+     {1u, 2u, 2u, 2081u, 2082u, 1u, 0u, 240u, 0u, false, 2082u, 0u, false}},
+    {1u, {true, false, 2081u, false}, {false, 0u}, {false, 0u},
+     {2u, 2u, 3u, 2081u, 2081u, 1u, 0u, 240u, 0u, false, 2081u, 0u, false}},
+    /* vector 5 */
+    {1u, {false, false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 1u, 0u, 0u, 0u, 0u, 1u, 0u, false, 0u, 0u, false}},
+    {3u, {false, false, 1973u, true}, {false, 0u}, {false, 0u},
+     {3u, 0u, 4u, 1973u, 1973u, 0u, 0u, 4u, 3u, false, 1973u, 0u, false}},
+    {1u, {false, false, 1973u, true}, {false, 2u}, {false, 2u},
+     {4u, 1u, 0u, 1973u, 1973u, 1u, 0u, 5u, 4u, true, 1973u, 0u, false}},
+    {1u, {false, false, 1974u, false}, {false, 2u}, {false, 2u},
+     {5u, 1u, 1u, 1974u, 1973u, 1u, 0u, 6u, 0u, true, 1973u, 0u, false}},
+    {1u, {false, false, 1867u, false}, {false, 2u}, {false, 2u},
+     {6u, 1u, 2u, 1867u, 1974u, 1u, 0u, 7u, 0u, true, 1973u, 0u, false}},
+    {1u, {false, false, 227u, true}, {false, 2u}, {false, 2u},
+     {7u, 1u, 3u, 227u, 1867u, 1u, 0u, 8u, 1u, true, 1867u, 0u, false}},
+    {1u, {false, false, 1749u, false}, {false, 2u}, {false, 2u},
+     {8u, 1u, 4u, 1749u, 227u, 0u, 0u, 9u, 0u, true, 1749u, 0u, false}},
+    /* vector 6 */
+    {1u, {false, false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 1u, 0u, 0u, 0u, 0u, 1u, 0u, false, 0u, 0u, false}},
+    {1u, {false, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {1u, 0u, 2u, 1974u, 0u, 0u, 0u, 2u, 0u, false, 0u, 0u, false}},
+    {3u, {true, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {4u, 1u, 0u, 1974u, 1974u, 1u, 0u, 5u, 0u, false, 1974u, 0u, false}},
+    {234u, {true, false, 1867u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 0u, 239u, 0u, false, 1867u, 0u, false}},
+    {1u, {true, false, 1867u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 0u, 0u, false, 1867u, 0u, false}},
+    {1u, {true, false, 1867u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 1u, 1u, false, 1867u, 1u, false}},
+    {1u, {true, false, 1867u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 2u, 2u, false, 1867u, 2u, false}},
+    {1u, {true, false, 1867u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 3u, 3u, false, 1867u, 3u, false}},
+    {1u, {true, false, 1867u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 4u, 4u, false, 1867u, 4u, false}},
+    {116u, {true, false, 1867u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 120u, 4u, false, 1867u, 120u, false}},
+    {1u, {true, true, 1867u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 121u, 4u, false, 1867u, 120u, false}},
+    {1u, {false, true, 1972u, false}, {false, 4u}, {false, 4u},
+     {40u, 1u, 12u, 1972u, 1867u, 1u, 0u, 0u, 4u, false, 1867u, 120u, false}},
+    {3u, {true, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 0u, 3u, 0u, false, 1974u, 0u, false}},
+    {236u, {true, false, 1867u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 0u, 239u, 0u, false, 1867u, 0u, false}},
+    {2u, {true, false, 1974u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 1u, 1u, 1u, false, 1974u, 1u, false}},
+    {2u, {true, false, 1974u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 1u, 3u, 3u, false, 1974u, 3u, false}},
+    {6101u, {true, false, 1974u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 1u, 240u, 4u, false, 1974u, 6104u, false}},
+    {1u, {true, false, 1974u, false}, {false, 12u}, {false, 12u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 0u, 0u, 4u, false, 1974u, 6105u, true}},
+    /* vector 7 */
+    {1u, {false, false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 1u, 0u, 0u, 0u, 0u, 1u, 0u, false, 0u, 0u, false}},
+    {1u, {false, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {1u, 0u, 2u, 1974u, 0u, 0u, 0u, 2u, 0u, false, 0u, 0u, false}},
+    {3u, {true, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {4u, 1u, 0u, 1974u, 1974u, 1u, 0u, 5u, 0u, false, 1974u, 0u, false}},
+    {234u, {true, false, 1867u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 0u, 239u, 0u, false, 1867u, 0u, false}},
+    {2u, {true, false, 1867u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 1u, 1u, false, 1867u, 1u, false}},
+    {1u, {false, false, 1867u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 0u, 0u, 2u, false, 1867u, 2u, false}},
+    {1u, {false, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1974u, 1867u, 1u, 0u, 1u, 0u, false, 1867u, 0u, false}},
+    {3u, {true, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 0u, 4u, 0u, false, 1974u, 0u, false}},
+    {235u, {true, false, 1867u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 0u, 239u, 0u, false, 1867u, 0u, false}},
+    {1u, {true, false, 1867u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 0u, 0u, false, 1867u, 0u, false}},
+    {2u, {true, false, 1974u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 1u, 2u, 2u, false, 1974u, 2u, false}},
+    {1u, {true, false, 1748u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1748u, 1974u, 1u, 1u, 3u, 3u, false, 1974u, 3u, false}},
+    {1u, {true, false, 1972u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 1972u, 1748u, 1u, 1u, 4u, 4u, false, 1974u, 4u, false}},
+    {1u, {false, false, 228u, false}, {false, 4u}, {false, 4u},
+     {40u, 1u, 12u, 228u, 1972u, 0u, 0u, 0u, 4u, false, 1748u, 0u, false}},
+    {236u, {true, false, 1867u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 0u, 0u, 236u, 0u, false, 1867u, 0u, false}},
+    {3u, {true, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 0u, 239u, 0u, false, 1974u, 0u, false}},
+    {4u, {true, false, 1974u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 1u, 3u, 3u, false, 1974u, 3u, false}},
+    {114u, {true, false, 1974u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 1u, 117u, 4u, false, 1974u, 117u, false}},
+    {2u, {true, false, 1975u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 1975u, 1975u, 1u, 1u, 119u, 4u, false, 1975u, 119u, false}},
+    {236u, {true, false, 1867u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 240u, 4u, false, 1867u, 234u, false}},
+    {118u, {true, false, 1974u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 1u, 240u, 4u, false, 1974u, 352u, false}},
+    {2u, {true, false, 1868u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 1868u, 1868u, 1u, 1u, 240u, 4u, false, 1974u, 354u, false}},
+    {1u, {false, false, 4085u, false}, {false, 4u}, {false, 4u},
+     {40u, 1u, 12u, 4085u, 1868u, 1u, 0u, 0u, 4u, false, 1974u, 355u, false}},
+    /* vector 8 */
+    {1u, {false, false, 0u, true}, {false, 0u}, {false, 0u},
+     {0u, 0u, 1u, 0u, 0u, 0u, 0u, 1u, 1u, false, 0u, 0u, false}},
+    {3u, {true, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {3u, 0u, 4u, 1974u, 1974u, 0u, 0u, 4u, 0u, false, 1974u, 0u, false}},
+    {235u, {true, false, 1867u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 0u, 239u, 0u, false, 1867u, 0u, false}},
+    {1u, {true, false, 1867u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 0u, 0u, false, 1867u, 0u, false}},
+    {3u, {true, false, 1974u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 1u, 3u, 3u, false, 1974u, 3u, false}},
+    {6101u, {true, false, 1974u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 1u, 240u, 4u, false, 1974u, 6104u, false}},
+    {1u, {true, false, 1974u, false}, {false, 12u}, {false, 12u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 0u, 0u, 4u, false, 1974u, 6105u, true}},
+    {240u, {true, false, 1974u, false}, {false, 8u}, {false, 8u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 0u, 240u, 0u, false, 1974u, 0u, true}},
+    /* vector 9 */
+    {1u, {false, false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 1u, 0u, 0u, 0u, 0u, 1u, 0u, false, 0u, 0u, false}},
+    {1u, {false, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {1u, 0u, 2u, 1974u, 0u, 0u, 0u, 2u, 0u, false, 0u, 0u, false}},
+    {3u, {true, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {4u, 1u, 0u, 1974u, 1974u, 1u, 0u, 5u, 0u, false, 1974u, 0u, false}},
+    {234u, {true, false, 1867u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 0u, 239u, 0u, false, 1867u, 0u, false}},
+    {4u, {true, false, 1867u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 3u, 3u, false, 1867u, 3u, false}},
+    {1u, {true, false, 1867u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 4u, 4u, false, 1867u, 4u, false}},
+    {1u, {true, false, 1866u, true}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1866u, 1867u, 1u, 1u, 5u, 0u, false, 1867u, 5u, false}},
+    {1u, {false, false, 226u, false}, {false, 0u}, {false, 0u},
+     {0u, 2u, 0u, 1866u, 1867u, 1u, 0u, 0u, 1u, false, 1867u, 6u, false}},
+    {2u, {false, false, 1750u, false}, {false, 0u}, {false, 0u},
+     {2u, 2u, 2u, 1750u, 1750u, 1u, 0u, 2u, 0u, false, 1750u, 0u, false}},
+    {237u, {true, false, 1867u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 0u, 239u, 0u, false, 1867u, 0u, false}},
+    {4u, {true, false, 1867u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 3u, 3u, false, 1867u, 3u, false}},
+    {114u, {true, false, 1867u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 117u, 4u, false, 1867u, 117u, false}},
+    {6106u, {true, false, 1759u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 1759u, 1759u, 1u, 1u, 240u, 4u, false, 1759u, 6104u, false}},
+    {1u, {true, false, 1759u, false}, {false, 12u}, {false, 12u},
+     {40u, 1u, 12u, 1759u, 1759u, 1u, 0u, 0u, 4u, false, 1759u, 6105u, true}},
+    /* vector 10 */
+    {1u, {false, false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 1u, 0u, 0u, 0u, 0u, 1u, 0u, false, 0u, 0u, false}},
+    {1u, {false, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {1u, 0u, 2u, 1974u, 0u, 0u, 0u, 2u, 0u, false, 0u, 0u, false}},
+    {3u, {true, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {4u, 1u, 0u, 1974u, 1974u, 1u, 0u, 5u, 0u, false, 1974u, 0u, false}},
+    {234u, {true, false, 1867u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 0u, 239u, 0u, false, 1867u, 0u, false}},
+    {2u, {true, false, 1867u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 1u, 1u, false, 1867u, 1u, false}},
+    {2u, {true, false, 1974u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 1u, 3u, 3u, false, 1974u, 3u, false}},
+    {2u, {true, false, 1748u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 1748u, 1748u, 0u, 1u, 5u, 4u, false, 1748u, 0u, false}},
+    {114u, {true, false, 227u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 227u, 227u, 0u, 1u, 119u, 4u, false, 227u, 112u, false}},
+    {1u, {true, false, 227u, false}, {false, 4u}, {false, 4u},
+     {40u, 1u, 12u, 227u, 227u, 0u, 0u, 0u, 4u, false, 227u, 113u, false}},
+    {236u, {true, false, 1867u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 0u, 0u, 236u, 0u, false, 1867u, 0u, false}},
+    {3u, {true, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 0u, 239u, 0u, false, 1974u, 0u, false}},
+    {4u, {true, false, 1974u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 1u, 3u, 3u, false, 1974u, 3u, false}},
+    {114u, {true, false, 1974u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 1u, 117u, 4u, false, 1974u, 117u, false}},
+    {2u, {true, false, 1867u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 119u, 4u, false, 1867u, 0u, false}},
+    {1u, {true, false, 227u, false}, {true, 4u}, {true, 4u},
+     {40u, 1u, 12u, 227u, 1867u, 1u, 1u, 120u, 4u, false, 1867u, 1u, false}},
+    {1u, {true, false, 227u, false}, {false, 4u}, {false, 4u},
+     {40u, 1u, 12u, 227u, 227u, 0u, 0u, 0u, 4u, false, 227u, 0u, false}},
+    {1u, {false, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1974u, 227u, 0u, 0u, 1u, 0u, false, 227u, 0u, false}},
+    {3u, {true, false, 1974u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1974u, 1974u, 1u, 0u, 4u, 0u, false, 1974u, 0u, false}},
+    {235u, {true, false, 1867u, false}, {false, 0u}, {false, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 0u, 239u, 0u, false, 1867u, 0u, false}},
+    {1u, {true, false, 1867u, false}, {true, 0u}, {true, 0u},
+     {40u, 1u, 12u, 1867u, 1867u, 1u, 1u, 0u, 0u, false, 1867u, 0u, false}},
+    {3u, {true, false, 4086u, false}, {true, 0u}, {true, 0u},
+     {0u, 2u, 2u, 1867u, 1867u, 1u, 1u, 3u, 3u, false, 1867u, 3u, false}},
+    {5u, {true, false, 4086u, false}, {true, 4u}, {true, 4u},
+     {0u, 2u, 7u, 1867u, 1867u, 1u, 1u, 8u, 4u, false, 1867u, 8u, false}},
+    {1u, {true, false, 4086u, false}, {false, 5u}, {false, 5u},
+     {0u, 3u, 0u, 1867u, 1867u, 0u, 0u, 0u, 4u, false, 1867u, 9u, false}},
+};
+
+/* Where each vector begins and ends in the rows, and the record that it starts with. */
+struct vector {
+    uint32_t first;
+    uint32_t end;
+    bool has_record;
+    struct cal2_remembered record;
+};
+
+static const struct vector vectors[] = {
+    {0u, 9u, false, {0u}},
+    {9u, 17u, false, {0u}},
+    {17u, 35u, false, {0u}},
+    {35u, 47u, false, {0u}},
+    {47u, 54u, false, {0u}},
+    {54u, 72u, false, {0u}},
+    {72u, 95u, false, {0u}},
+    {95u, 103u, false, {0u}},
+    {103u, 117u, false, {0u}},
+    {117u, 140u, false, {0u}},
+};
+
+static bool same_out(const struct cal2_out *a, const struct cal2_out *b)
+{
+    return (a->heater == b->heater) &&
+           (a->fault == b->fault);
+}
+
+static bool same_state(const struct cal2 *a, const struct cal2 *b)
+{
+    return (a->tank_probe_good_for == b->tank_probe_good_for) &&
+           (a->tank_probe_state == b->tank_probe_state) &&
+           (a->tank_probe_state_for == b->tank_probe_state_for) &&
+           (a->tank_probe_last == b->tank_probe_last) &&
+           (a->tank_probe_before == b->tank_probe_before) &&
+           (a->tank_stat == b->tank_stat) &&
+           (a->heater == b->heater) &&
+           (a->heater_for == b->heater_for) &&
+           (a->heater_apart_for == b->heater_apart_for) &&
+           (a->heater_welded == b->heater_welded) &&
+           (a->heater_effect_from == b->heater_effect_from) &&
+           (a->heater_effect_for == b->heater_effect_for) &&
+           (a->heater_no_effect == b->heater_no_effect);
+}
+
+static void run(const struct vector *v, unsigned long number)
+{
+    struct cal2 m;
+    struct cal2_out out;
+    uint32_t i;
+    uint32_t n;
+
+    (void)memset(&m, 0xA5, sizeof m); /* nothing may rest on zeroed memory */
+    (void)memset(&out, 0, sizeof out);
+    cal2_start(&m, v->has_record ? &v->record : NULL);
+    for (i = v->first; i < v->end; i++) {
+        for (n = 0u; n < rows[i].steps; n++) {
+            cal2_step(&m, &rows[i].in, &out);
+            verdict(same_out(&out, ((n & 1u) == 0u) ? &rows[i].odd : &rows[i].even), "output", number, (unsigned long)(i - v->first), (unsigned long)n);
+        }
+        verdict(same_state(&m, &rows[i].after), "state", number, (unsigned long)(i - v->first), (unsigned long)n);
+    }
+}
+
+static const struct cal2 first = {0u, 0u, 0u, 0u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false};
+
+static void records(void)
+{
+    struct cal2 fresh;
+    struct cal2 m;
+    struct cal2_remembered r;
+
+    (void)memset(&m, 0x5A, sizeof m);
+    (void)memset(&fresh, 0xA5, sizeof fresh);
+    cal2_start(&fresh, NULL);
+    verdict(same_state(&fresh, &first), "start without a record", 0ul, 0ul, 0ul);
+
+    (void)memset(&r, 0x00, sizeof r);
+    cal2_start(&m, &r);
+    verdict(same_state(&m, &fresh), "start with a blank record", 0ul, 0ul, 0ul);
+    (void)memset(&r, 0xFF, sizeof r);
+    cal2_start(&m, &r);
+    verdict(same_state(&m, &fresh), "start with an erased record", 0ul, 0ul, 0ul);
+    (void)memset(&r, 0, sizeof r);
+    verdict(cal2_remember(&fresh, &r), "a new record to write", 0ul, 0ul, 0ul);
+    verdict(!cal2_remember(&fresh, &r), "no record to write", 0ul, 0ul, 0ul);
+}
+
+static void upset(void)
+{
+    struct cal2 m;
+    struct cal2_in in;
+    struct cal2_out out;
+
+    (void)memset(&in, 0, sizeof in);
+    cal2_start(&m, NULL);
+    m.tank_probe_state = 255u;
+    cal2_step(&m, &in, &out);
+    verdict(m.tank_probe_state == (uint8_t)CAL2_TANK_PROBE_STATE_FAULTY, "tank_probe_state after an upset", 0ul, 0ul, 0ul);
+    cal2_start(&m, NULL);
+    m.tank_stat = 255u;
+    cal2_step(&m, &in, &out);
+    verdict(m.tank_stat == (uint8_t)CAL2_TANK_STAT_OPEN, "tank_stat after an upset", 0ul, 0ul, 0ul);
+    cal2_start(&m, NULL);
+    m.heater = 255u;
+    cal2_step(&m, &in, &out);
+    verdict(m.heater == (uint8_t)CAL2_HEATER_OFF, "heater after an upset", 0ul, 0ul, 0ul);
+    (void)m;
+    (void)in;
+    (void)out;
+}
+
+int main(void)
+{
+    unsigned long i;
+
+    for (i = 0ul; i < (unsigned long)(sizeof vectors / sizeof vectors[0]); i++) {
+        run(&vectors[i], i + 1ul);
+    }
+    records();
+    upset();
+    (void)printf("%lu passed, %lu failed\n", passed, failed);
+    return (failed == 0ul) ? 0 : 1;
+}

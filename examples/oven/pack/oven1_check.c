@@ -1,0 +1,361 @@
+/* oven1_check.c: recorded inputs through the program; runs on any host
+ *
+ * Equipment: Deck oven 1, bakehouse
+ * Site: Corner Street Bakery
+ * Printed by makebreak 0.1.0 from sheet.yaml
+ * Sheet SHA-256: c5309404c721b975be15425c058db2a2b60c8cf3ec5c5c6afa6a43656858588b
+ *
+ * Replaces:
+ * - chamber_stat: capillary stat with its bulb in the crown of the chamber
+ *
+ * Stays hard-wired, and must:
+ * - chamber_limit: second capillary in the flue corner, manual reset
+ *
+ * This helps to plan; it decides nothing. Local codes, the equipment's listing or approval, and a
+ * licensed person decide.
+ * Independent hardware limits stay in place, hard-wired, and are tested before anything else is
+ * touched.
+ * Isolate, lock off and prove dead before working on the equipment.
+ * The C is a skeleton to start from. It has not been certified for any purpose; no claim of
+ * compliance is made for it.
+ * Software cannot see what it has no input for. A finding of grade stop is ended only by changing
+ * the design.
+ */
+#include "oven1.h"
+
+#include <stdio.h>
+#include <string.h>
+
+/* Inputs held for so many steps; the outputs after each odd and each even step of them; the state
+ * after the last.
+ */
+struct row {
+    uint32_t steps;
+    struct oven1_in in;
+    struct oven1_out odd;
+    struct oven1_out even;
+    struct oven1 after;
+};
+
+static unsigned long passed;
+static unsigned long failed;
+
+static void verdict(bool good, const char *what, unsigned long vector, unsigned long row, unsigned long step)
+{
+    if (good) {
+        passed++;
+        return;
+    }
+    failed++;
+    if (failed <= 20ul) {
+        (void)printf("vector %lu row %lu step %lu: %s differs\n", vector, row, step, what);
+    }
+}
+
+static const struct row rows[] = {
+    /* vector 1 */
+    {1u, {false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 1u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false}},
+    {1u, {false, 937u, false}, {false, 0u}, {false, 0u},
+     {1u, 0u, 2u, 937u, 0u, 0u, 0u, 0u, false, 0u, 0u, false}},
+    {1u, {false, 937u, false}, {false, 0u}, {false, 0u},
+     {2u, 0u, 3u, 937u, 937u, 0u, 0u, 0u, false, 937u, 0u, false}},
+    {1u, {false, 937u, false}, {false, 0u}, {false, 0u},
+     {3u, 0u, 4u, 937u, 937u, 0u, 0u, 0u, false, 937u, 0u, false}},
+    {1u, {false, 917u, false}, {false, 0u}, {false, 0u},
+     {4u, 1u, 0u, 917u, 937u, 0u, 0u, 0u, false, 937u, 0u, false}},
+    /* vector 2 */
+    {1u, {false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 1u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false}},
+    {6u, {false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 7u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false}},
+    {2u, {false, 19u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 9u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false}},
+    {1u, {false, 19u, false}, {false, 1u}, {false, 1u},
+     {0u, 3u, 0u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false}},
+    {1u, {false, 19u, false}, {false, 1u}, {false, 1u},
+     {0u, 3u, 1u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false}},
+    /* vector 3 */
+    {1u, {false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 1u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false}},
+    {4u, {false, 896u, false}, {false, 0u}, {false, 0u},
+     {4u, 1u, 0u, 896u, 896u, 0u, 0u, 0u, false, 896u, 0u, false}},
+    {1u, {false, 896u, false}, {false, 0u}, {false, 0u},
+     {5u, 1u, 1u, 896u, 896u, 0u, 0u, 0u, false, 896u, 0u, false}},
+    {9u, {false, 896u, false}, {false, 0u}, {false, 0u},
+     {14u, 1u, 10u, 896u, 896u, 0u, 0u, 0u, false, 896u, 0u, false}},
+    {1u, {false, 896u, false}, {false, 0u}, {false, 0u},
+     {15u, 1u, 10u, 896u, 896u, 0u, 0u, 0u, false, 896u, 0u, false}},
+    {5u, {false, 896u, false}, {false, 0u}, {false, 0u},
+     {20u, 1u, 10u, 896u, 896u, 0u, 0u, 0u, false, 896u, 0u, false}},
+    {1u, {false, 896u, false}, {false, 0u}, {false, 0u},
+     {20u, 1u, 10u, 896u, 896u, 0u, 0u, 0u, false, 896u, 0u, false}},
+    {1u, {false, 896u, true}, {false, 0u}, {false, 0u},
+     {20u, 1u, 10u, 896u, 896u, 0u, 0u, 1u, false, 896u, 0u, false}},
+    {1u, {false, 896u, true}, {false, 2u}, {false, 2u},
+     {20u, 1u, 10u, 896u, 896u, 0u, 0u, 2u, true, 896u, 0u, false}},
+    {1u, {false, 896u, true}, {false, 2u}, {false, 2u},
+     {20u, 1u, 10u, 896u, 896u, 0u, 0u, 2u, true, 896u, 0u, false}},
+    {2u, {false, 875u, false}, {false, 2u}, {false, 2u},
+     {20u, 1u, 10u, 875u, 875u, 1u, 0u, 0u, true, 875u, 0u, false}},
+    /* vector 4 */
+    {1u, {false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 1u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false}},
+    {21u, {false, 896u, false}, {false, 0u}, {false, 0u},
+     {20u, 1u, 10u, 896u, 896u, 0u, 0u, 0u, false, 896u, 0u, false}},
+    {2u, {false, 875u, false}, {false, 0u}, {false, 0u},
+     {20u, 1u, 10u, 875u, 875u, 1u, 0u, 0u, false, 875u, 0u, false}},
+    {1u, {false, 877u, false}, {false, 0u}, {false, 0u},
+     {20u, 1u, 10u, 877u, 875u, 1u, 0u, 0u, false, 875u, 0u, false}},
+    {1u, {false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 2u, 0u, 877u, 875u, 1u, 0u, 0u, false, 877u, 0u, false}},
+    {1u, {false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 2u, 1u, 877u, 875u, 1u, 0u, 0u, false, 877u, 0u, false}},
+    {4u, {false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 2u, 5u, 877u, 875u, 1u, 0u, 0u, false, 877u, 0u, false}},
+    {1u, {false, 0u, false}, {false, 1u}, {false, 1u},
+     {0u, 3u, 0u, 877u, 875u, 0u, 0u, 0u, false, 877u, 0u, false}},
+    {2u, {false, 19u, false}, {false, 1u}, {false, 1u},
+     {0u, 3u, 2u, 877u, 875u, 0u, 0u, 0u, false, 877u, 0u, false}},
+    {1u, {false, 249u, false}, {false, 1u}, {false, 1u},
+     {1u, 3u, 3u, 249u, 877u, 0u, 0u, 0u, false, 875u, 0u, false}},
+    {18u, {false, 249u, false}, {false, 1u}, {false, 1u},
+     {19u, 3u, 10u, 249u, 249u, 0u, 0u, 0u, false, 249u, 0u, false}},
+    {1u, {false, 249u, false}, {false, 0u}, {false, 0u},
+     {20u, 1u, 0u, 249u, 249u, 1u, 0u, 0u, false, 249u, 0u, false}},
+    {1u, {false, 917u, false}, {false, 0u}, {false, 0u},
+     {20u, 1u, 1u, 917u, 249u, 1u, 0u, 0u, false, 249u, 0u, false}},
+    {1u, {false, 916u, true}, {false, 0u}, {false, 0u},
+     {20u, 1u, 2u, 916u, 917u, 1u, 0u, 1u, false, 916u, 0u, false}},
+    {1u, {false, 916u, true}, {false, 2u}, {false, 2u},
+     {20u, 1u, 3u, 916u, 916u, 1u, 0u, 2u, true, 916u, 0u, false}},
+    {1u, {false, 1730u, false}, {false, 2u}, {false, 2u},
+     {0u, 2u, 0u, 916u, 916u, 1u, 0u, 0u, true, 916u, 0u, false}},
+    {1u, {false, 917u, false}, {false, 2u}, {false, 2u},
+     {1u, 2u, 1u, 917u, 916u, 1u, 0u, 0u, true, 916u, 0u, false}},
+    {1u, {false, 916u, true}, {false, 2u}, {false, 2u},
+     {2u, 2u, 2u, 916u, 917u, 1u, 0u, 1u, true, 916u, 0u, false}},
+    {1u, {false, 917u, true}, {false, 2u}, {false, 2u},
+     {3u, 2u, 3u, 917u, 916u, 1u, 0u, 2u, true, 917u, 0u, false}},
+    /* vector 5 */
+    {1u, {false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 1u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false}},
+    {3u, {false, 937u, false}, {false, 0u}, {false, 0u},
+     {3u, 0u, 4u, 937u, 937u, 0u, 0u, 0u, false, 937u, 0u, false}},
+    {1u, {false, 917u, false}, {false, 0u}, {false, 0u},
+     {4u, 1u, 0u, 917u, 937u, 0u, 0u, 0u, false, 937u, 0u, false}},
+    {2u, {false, 895u, false}, {false, 0u}, {false, 0u},
+     {6u, 1u, 2u, 895u, 895u, 1u, 0u, 0u, false, 895u, 0u, false}},
+    {1u, {false, 248u, false}, {false, 0u}, {false, 0u},
+     {7u, 1u, 3u, 248u, 895u, 1u, 0u, 0u, false, 895u, 0u, false}},
+    {1u, {true, 893u, false}, {true, 0u}, {true, 0u},
+     {8u, 1u, 4u, 893u, 248u, 1u, 1u, 0u, false, 893u, 0u, false}},
+    {1u, {true, 893u, false}, {true, 0u}, {true, 0u},
+     {9u, 1u, 5u, 893u, 893u, 1u, 1u, 1u, false, 893u, 1u, false}},
+    {1u, {false, 875u, false}, {false, 4u}, {false, 4u},
+     {10u, 1u, 6u, 875u, 893u, 1u, 0u, 2u, false, 893u, 2u, false}},
+    {1u, {false, 875u, false}, {false, 0u}, {false, 0u},
+     {11u, 1u, 7u, 875u, 875u, 1u, 0u, 0u, false, 875u, 0u, false}},
+    {2u, {true, 893u, false}, {true, 0u}, {true, 0u},
+     {13u, 1u, 9u, 893u, 893u, 1u, 1u, 1u, false, 875u, 1u, false}},
+    {957u, {true, 893u, false}, {true, 4u}, {true, 4u},
+     {20u, 1u, 10u, 893u, 893u, 1u, 1u, 2u, false, 875u, 958u, false}},
+    {1u, {true, 893u, false}, {false, 12u}, {false, 12u},
+     {20u, 1u, 10u, 893u, 893u, 1u, 0u, 2u, false, 875u, 959u, true}},
+    {1u, {true, 893u, false}, {false, 8u}, {false, 8u},
+     {20u, 1u, 10u, 893u, 893u, 1u, 0u, 0u, false, 893u, 0u, true}},
+    /* vector 6 */
+    {7u, {false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 7u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false}},
+    {2u, {false, 19u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 9u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false}},
+    {19u, {false, 249u, false}, {false, 1u}, {false, 1u},
+     {19u, 3u, 10u, 249u, 249u, 0u, 0u, 0u, false, 249u, 0u, false}},
+    {2u, {false, 249u, false}, {false, 0u}, {false, 0u},
+     {20u, 1u, 1u, 249u, 249u, 1u, 0u, 0u, false, 249u, 0u, false}},
+    {4u, {false, 230u, false}, {false, 0u}, {false, 0u},
+     {0u, 2u, 3u, 249u, 249u, 1u, 0u, 0u, false, 249u, 0u, false}},
+    {1u, {true, 229u, false}, {false, 0u}, {false, 0u},
+     {0u, 2u, 4u, 249u, 249u, 1u, 0u, 0u, false, 249u, 0u, false}},
+    /* vector 7 */
+    {1u, {false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 1u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false}},
+    {3u, {false, 937u, false}, {false, 0u}, {false, 0u},
+     {3u, 0u, 4u, 937u, 937u, 0u, 0u, 0u, false, 937u, 0u, false}},
+    {1u, {false, 917u, false}, {false, 0u}, {false, 0u},
+     {4u, 1u, 0u, 917u, 937u, 0u, 0u, 0u, false, 937u, 0u, false}},
+    {4u, {false, 895u, false}, {false, 0u}, {false, 0u},
+     {8u, 1u, 4u, 895u, 895u, 1u, 0u, 0u, false, 895u, 0u, false}},
+    {2u, {true, 874u, false}, {true, 0u}, {true, 0u},
+     {10u, 1u, 6u, 874u, 874u, 1u, 1u, 1u, false, 874u, 1u, false}},
+    /* vector 8 */
+    {1u, {false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 1u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false}},
+    {2u, {false, 937u, false}, {false, 0u}, {false, 0u},
+     {2u, 0u, 3u, 937u, 937u, 0u, 0u, 0u, false, 937u, 0u, false}},
+    {2u, {true, 937u, false}, {false, 0u}, {false, 0u},
+     {4u, 1u, 0u, 937u, 937u, 0u, 0u, 0u, false, 937u, 0u, false}},
+    {1u, {false, 247u, false}, {false, 0u}, {false, 0u},
+     {0u, 2u, 0u, 937u, 937u, 0u, 0u, 0u, false, 937u, 0u, false}},
+    {3u, {true, 893u, false}, {false, 0u}, {false, 0u},
+     {3u, 2u, 3u, 893u, 893u, 0u, 0u, 0u, false, 893u, 0u, false}},
+    {1u, {true, 873u, true}, {true, 0u}, {true, 0u},
+     {4u, 1u, 0u, 873u, 893u, 1u, 1u, 1u, false, 893u, 0u, false}},
+    {1u, {true, 873u, true}, {true, 0u}, {true, 0u},
+     {5u, 1u, 1u, 873u, 873u, 1u, 1u, 0u, false, 873u, 1u, false}},
+    {1u, {true, 938u, false}, {true, 0u}, {true, 0u},
+     {6u, 1u, 2u, 938u, 873u, 1u, 1u, 1u, false, 873u, 2u, false}},
+    {1u, {true, 938u, false}, {false, 4u}, {false, 4u},
+     {7u, 1u, 3u, 938u, 938u, 0u, 0u, 2u, false, 938u, 0u, false}},
+    {2u, {true, 269u, true}, {false, 2u}, {false, 2u},
+     {9u, 1u, 5u, 269u, 269u, 1u, 0u, 2u, true, 269u, 0u, false}},
+    {2u, {true, 939u, false}, {false, 2u}, {false, 2u},
+     {11u, 1u, 7u, 939u, 939u, 0u, 0u, 0u, true, 939u, 0u, false}},
+    /* vector 9 */
+    {7u, {false, 0u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 7u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false}},
+    {2u, {false, 19u, false}, {false, 0u}, {false, 0u},
+     {0u, 0u, 9u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false}},
+    {19u, {false, 249u, false}, {false, 1u}, {false, 1u},
+     {19u, 3u, 10u, 249u, 249u, 0u, 0u, 0u, false, 249u, 0u, false}},
+    {6u, {false, 249u, false}, {false, 0u}, {false, 0u},
+     {20u, 1u, 5u, 249u, 249u, 1u, 0u, 0u, false, 249u, 0u, false}},
+    {2u, {true, 269u, false}, {true, 0u}, {true, 0u},
+     {20u, 1u, 7u, 269u, 269u, 1u, 1u, 1u, false, 269u, 0u, false}},
+    {2u, {true, 937u, true}, {true, 0u}, {true, 0u},
+     {20u, 1u, 9u, 937u, 937u, 1u, 1u, 0u, false, 937u, 0u, false}},
+    {1u, {true, 874u, false}, {true, 0u}, {true, 0u},
+     {20u, 1u, 10u, 874u, 937u, 1u, 1u, 1u, false, 937u, 1u, false}},
+    {1u, {true, 874u, false}, {true, 4u}, {true, 4u},
+     {20u, 1u, 10u, 874u, 874u, 1u, 1u, 2u, false, 874u, 2u, false}},
+    {2u, {true, 893u, false}, {true, 4u}, {true, 4u},
+     {20u, 1u, 10u, 893u, 893u, 1u, 1u, 2u, false, 874u, 4u, false}},
+    {3u, {true, 269u, false}, {true, 4u}, {true, 4u},
+     {20u, 1u, 10u, 269u, 269u, 1u, 1u, 2u, false, 269u, 7u, false}},
+    {2u, {true, 268u, false}, {true, 4u}, {true, 4u},
+     {20u, 1u, 10u, 268u, 268u, 1u, 1u, 2u, false, 268u, 9u, false}},
+    {1u, {true, 1729u, true}, {true, 0u}, {true, 0u},
+     {20u, 1u, 10u, 1729u, 268u, 1u, 1u, 0u, false, 268u, 10u, false}},
+};
+
+/* Where each vector begins and ends in the rows, and the record that it starts with. */
+struct vector {
+    uint32_t first;
+    uint32_t end;
+    bool has_record;
+    struct oven1_remembered record;
+};
+
+static const struct vector vectors[] = {
+    {0u, 5u, false, {0u}},
+    {5u, 10u, false, {0u}},
+    {10u, 21u, false, {0u}},
+    {21u, 40u, false, {0u}},
+    {40u, 53u, false, {0u}},
+    {53u, 59u, false, {0u}},
+    {59u, 64u, false, {0u}},
+    {64u, 75u, false, {0u}},
+    {75u, 87u, false, {0u}},
+};
+
+static bool same_out(const struct oven1_out *a, const struct oven1_out *b)
+{
+    return (a->elements == b->elements) &&
+           (a->fault == b->fault);
+}
+
+static bool same_state(const struct oven1 *a, const struct oven1 *b)
+{
+    return (a->chamber_probe_good_for == b->chamber_probe_good_for) &&
+           (a->chamber_probe_state == b->chamber_probe_state) &&
+           (a->chamber_probe_state_for == b->chamber_probe_state_for) &&
+           (a->chamber_probe_last == b->chamber_probe_last) &&
+           (a->chamber_probe_before == b->chamber_probe_before) &&
+           (a->chamber_stat == b->chamber_stat) &&
+           (a->elements == b->elements) &&
+           (a->elements_apart_for == b->elements_apart_for) &&
+           (a->elements_welded == b->elements_welded) &&
+           (a->elements_effect_from == b->elements_effect_from) &&
+           (a->elements_effect_for == b->elements_effect_for) &&
+           (a->elements_no_effect == b->elements_no_effect);
+}
+
+static void run(const struct vector *v, unsigned long number)
+{
+    struct oven1 m;
+    struct oven1_out out;
+    uint32_t i;
+    uint32_t n;
+
+    (void)memset(&m, 0xA5, sizeof m); /* nothing may rest on zeroed memory */
+    (void)memset(&out, 0, sizeof out);
+    oven1_start(&m, v->has_record ? &v->record : NULL);
+    for (i = v->first; i < v->end; i++) {
+        for (n = 0u; n < rows[i].steps; n++) {
+            oven1_step(&m, &rows[i].in, &out);
+            verdict(same_out(&out, ((n & 1u) == 0u) ? &rows[i].odd : &rows[i].even), "output", number, (unsigned long)(i - v->first), (unsigned long)n);
+        }
+        verdict(same_state(&m, &rows[i].after), "state", number, (unsigned long)(i - v->first), (unsigned long)n);
+    }
+}
+
+static const struct oven1 first = {0u, 0u, 0u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false};
+
+static void records(void)
+{
+    struct oven1 fresh;
+    struct oven1 m;
+    struct oven1_remembered r;
+
+    (void)memset(&m, 0x5A, sizeof m);
+    (void)memset(&fresh, 0xA5, sizeof fresh);
+    oven1_start(&fresh, NULL);
+    verdict(same_state(&fresh, &first), "start without a record", 0ul, 0ul, 0ul);
+
+    (void)memset(&r, 0x00, sizeof r);
+    oven1_start(&m, &r);
+    verdict(same_state(&m, &fresh), "start with a blank record", 0ul, 0ul, 0ul);
+    (void)memset(&r, 0xFF, sizeof r);
+    oven1_start(&m, &r);
+    verdict(same_state(&m, &fresh), "start with an erased record", 0ul, 0ul, 0ul);
+    (void)memset(&r, 0, sizeof r);
+    verdict(oven1_remember(&fresh, &r), "a new record to write", 0ul, 0ul, 0ul);
+    verdict(!oven1_remember(&fresh, &r), "no record to write", 0ul, 0ul, 0ul);
+}
+
+static void upset(void)
+{
+    struct oven1 m;
+    struct oven1_in in;
+    struct oven1_out out;
+
+    (void)memset(&in, 0, sizeof in);
+    oven1_start(&m, NULL);
+    m.chamber_probe_state = 255u;
+    oven1_step(&m, &in, &out);
+    verdict(m.chamber_probe_state == (uint8_t)OVEN1_CHAMBER_PROBE_STATE_FAULTY, "chamber_probe_state after an upset", 0ul, 0ul, 0ul);
+    oven1_start(&m, NULL);
+    m.chamber_stat = 255u;
+    oven1_step(&m, &in, &out);
+    verdict(m.chamber_stat == (uint8_t)OVEN1_CHAMBER_STAT_OPEN, "chamber_stat after an upset", 0ul, 0ul, 0ul);
+    oven1_start(&m, NULL);
+    m.elements = 255u;
+    oven1_step(&m, &in, &out);
+    verdict(m.elements == (uint8_t)OVEN1_ELEMENTS_OFF, "elements after an upset", 0ul, 0ul, 0ul);
+    (void)m;
+    (void)in;
+    (void)out;
+}
+
+int main(void)
+{
+    unsigned long i;
+
+    for (i = 0ul; i < (unsigned long)(sizeof vectors / sizeof vectors[0]); i++) {
+        run(&vectors[i], i + 1ul);
+    }
+    records();
+    upset();
+    (void)printf("%lu passed, %lu failed\n", passed, failed);
+    return (failed == 0ul) ? 0 : 1;
+}
