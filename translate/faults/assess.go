@@ -6,13 +6,15 @@ import (
 	"makebreak/survey"
 	"makebreak/survey/catalogue"
 	"makebreak/translate"
+	"makebreak/translate/logic"
 )
 
 // Assess works out every row of the function table. Without a program only
 // the hardware that stays is told of.
 func Assess(spec *translate.Specification) []Row {
-	a := &assessor{spec: spec}
+	a := &assessor{spec: spec, found: map[string]*bench{}}
 	if spec.Program != nil {
+		a.run = spec.Program.NewRun()
 		for _, l := range spec.Survey.Loads {
 			if s := spec.Plan.Loads[l.ID.V]; s != nil {
 				a.load(s)
@@ -32,9 +34,11 @@ func Assess(spec *translate.Specification) []Row {
 }
 
 type assessor struct {
-	spec *translate.Specification
-	rows []Row
-	open []Row // rows of the function at hand
+	spec  *translate.Specification
+	run   *logic.Run        // never stepped; forks of it are
+	found map[string]*bench // by load and state, nil where it was not found
+	rows  []Row
+	open  []Row // rows of the function at hand
 }
 
 // add notes a row. The hardware that stays has stood behind the old part too.
@@ -241,7 +245,7 @@ func (a *assessor) seconds(steps int) float64 {
 }
 
 func (a *assessor) restarts(l *translate.Switched) (int, bool) {
-	b, _, ok := brought(a.spec, l.Load.ID.V, true)
+	b, ok := a.brought(l.Load.ID.V, true)
 	if !ok {
 		return 0, false
 	}
@@ -261,7 +265,7 @@ func (a *assessor) signal(l *translate.Switched, g *survey.Signal) {
 	if !positive(l.Load.RunsWhen.V.Tree, g.ID.V, true) {
 		function = fmt.Sprintf("no %s with %s", id, g.ID.V)
 	}
-	b, _, ok := brought(a.spec, id, true)
+	b, ok := a.brought(id, true)
 	if !ok {
 		e := end{unsure, "unknown: the program could not be brought to switch it on"}
 		a.add(function, g.ID.V, "the signal goes away", end{works, id + " goes off at once: the contact was in series"}, e, e, "program run")

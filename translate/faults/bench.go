@@ -1,6 +1,7 @@
 package faults
 
 import (
+	"fmt"
 	"strings"
 
 	"makebreak/survey"
@@ -15,12 +16,19 @@ type bench struct {
 	in   []int64
 	at   map[string]int // place of each input
 	was  bool           // the load was out of its safe state when a fault was put in
+
+	followers []follower
 }
 
-func newBench(spec *translate.Specification) *bench {
-	b := &bench{spec: spec, run: spec.Program.NewRun(), in: make([]int64, len(spec.Program.Inputs)), at: map[string]int{}}
+func newBench(spec *translate.Specification, run *logic.Run) *bench {
+	b := &bench{spec: spec, run: run, in: make([]int64, len(spec.Program.Inputs)), at: map[string]int{}}
 	for i, v := range spec.Program.Inputs {
 		b.at[v.Name] = i
+	}
+	for _, l := range spec.Survey.Loads {
+		if s := spec.Plan.Loads[l.ID.V]; s != nil && s.Seen != nil {
+			b.followers = append(b.followers, follower{b.at[s.Seen.Name], s.Out})
+		}
 	}
 	b.run.Start(nil)
 	return b
@@ -51,11 +59,15 @@ func (b *bench) steps(n int) {
 
 func (b *bench) step() {
 	b.run.Step(b.in)
-	for _, s := range b.spec.Plan.Loads {
-		if s.Seen != nil {
-			b.set(s.Seen.Name, b.run.Get(s.Out))
-		}
+	for _, f := range b.followers {
+		b.in[f.at] = b.run.Get(f.out)
 	}
+}
+
+// follower is a read-back contact: an input that does what an output says.
+type follower struct {
+	at  int
+	out *logic.Var
 }
 
 func (b *bench) on(load string) bool { return b.run.Get(b.spec.Plan.Loads[load].Out) != 0 }
@@ -77,9 +89,7 @@ func (b *bench) until(load string, want bool, n int) (int, bool) {
 
 // fork is a second bench in the same state.
 func (b *bench) fork() *bench {
-	f := &bench{spec: b.spec, run: b.spec.Program.NewRun(), in: append([]int64(nil), b.in...), at: b.at}
-	f.run.Restore(b.run.Snapshot(nil))
-	return f
+	return &bench{spec: b.spec, run: b.run.Fork(), in: append([]int64(nil), b.in...), at: b.at, followers: b.followers}
 }
 
 // longest is how many steps a scenario may take.
@@ -99,10 +109,25 @@ func settling(spec *translate.Specification) int {
 	return n
 }
 
-// brought finds a state in which a load is on, or off, with everything in
+// brought gives a bench on which a load is on, or off. Each is looked for once.
+func (a *assessor) brought(load string, want bool) (*bench, bool) {
+	key := fmt.Sprint(load, want)
+	b, known := a.found[key]
+	if !known {
+		b, _ = a.bring(load, want)
+		a.found[key] = b
+	}
+	if b == nil {
+		return nil, false
+	}
+	return b.fork(), true
+}
+
+// bring finds a state in which a load is on, or off, with everything in
 // order: signals permit, limits are reset, and the probes stand where their
-// contacts say so. Temps are what the sensors were put at.
-func brought(spec *translate.Specification, load string, want bool) (*bench, map[string]float64, bool) {
+// contacts say so.
+func (a *assessor) bring(load string, want bool) (*bench, bool) {
+	spec := a.spec
 	l := spec.Plan.Loads[load]
 	var sensors []string
 	for _, p := range l.Probes {
@@ -116,7 +141,7 @@ func brought(spec *translate.Specification, load string, want bool) (*bench, map
 	var try func(i int) (*bench, bool)
 	try = func(i int) (*bench, bool) {
 		if i == len(sensors) {
-			return attempt(spec, load, want, temps)
+			return attempt(newBench(spec, a.run.Fork()), load, want, temps)
 		}
 		for _, t := range choices[i] {
 			temps[sensors[i]] = t
@@ -126,8 +151,7 @@ func brought(spec *translate.Specification, load string, want bool) (*bench, map
 		}
 		return nil, false
 	}
-	b, ok := try(0)
-	return b, temps, ok
+	return try(0)
 }
 
 // temperatures lists what is worth trying for a sensor: just beyond each edge
@@ -150,8 +174,8 @@ func temperatures(s *survey.Survey, sensor string) []float64 {
 	return ts
 }
 
-func attempt(spec *translate.Specification, load string, want bool, temps map[string]float64) (*bench, bool) {
-	b := newBench(spec)
+func attempt(b *bench, load string, want bool, temps map[string]float64) (*bench, bool) {
+	spec := b.spec
 	for _, s := range spec.Survey.Electronics.Sensors {
 		if _, given := temps[s.ID.V]; !given && spec.Plan.Sensors[s.ID.V] != nil {
 			b.warm(s.ID.V, temperatures(spec.Survey, s.ID.V)[0])

@@ -25,6 +25,7 @@ const driftOf = 5.0
 func sensorFaults(spec *translate.Specification, p *translate.Probe) []sensorFault {
 	open, openKnown := rail(spec, p.Sensor, true)
 	short, shortKnown := rail(spec, p.Sensor, false)
+	ambient, ambientErr := spec.Chains[p.Sensor.ID.V].Count(surroundings(spec.Survey))
 	fixed := func(n int64, known bool) func(*bench, *translate.Probe, int, int64) (int64, bool) {
 		return func(*bench, *translate.Probe, int, int64) (int64, bool) { return n, known }
 	}
@@ -38,9 +39,8 @@ func sensorFaults(spec *translate.Specification, p *translate.Probe) []sensorFau
 			return truth, true
 		}, old: (*assessor).oldElement},
 		{cause: "reading stands still (old: element sticks)", reads: func(_ *bench, _ *translate.Probe, _ int, truth int64) (int64, bool) { return truth, true }, old: oldStuck},
-		{cause: "out of its pocket: reads the surroundings (old: bulb out of its pocket)", reads: func(b *bench, p *translate.Probe, _ int, _ int64) (int64, bool) {
-			n, err := b.spec.Chains[p.Sensor.ID.V].Count(surroundings(b.spec.Survey))
-			return n, err == nil
+		{cause: "out of its pocket: reads the surroundings (old: bulb out of its pocket)", reads: func(*bench, *translate.Probe, int, int64) (int64, bool) {
+			return ambient, ambientErr == nil
 		}, old: oldOutOfPocket},
 	}
 	for _, k := range []float64{-driftOf, driftOf} {
@@ -118,7 +118,7 @@ func (a *assessor) inject(l *translate.Switched, k *translate.Contact, f sensorF
 	how := ""
 	tried := 0
 	for _, on := range []bool{true, false} {
-		b, _, ok := brought(a.spec, id, on)
+		b, ok := a.brought(id, on)
 		if !ok {
 			continue
 		}
@@ -143,7 +143,8 @@ func (a *assessor) withFault(l *translate.Switched, k *translate.Contact, f sens
 	safeOn := l.Load.SafeState.V.Energised()
 	truth := b.in[b.at[sensor]]
 	horizon := min(horizonOf(a.spec, l), longest)
-	wrongFor, reached := 0, 0
+	wrongFor, reached, settled := 0, 0, settling(a.spec)
+	load := a.spec.Plan.Loads[id].Out
 	for n := 1; n <= horizon; n++ {
 		count, known := f.reads(b, k.Probe, n, truth)
 		if !known {
@@ -151,11 +152,11 @@ func (a *assessor) withFault(l *translate.Switched, k *translate.Contact, f sens
 		}
 		b.set(sensor, count)
 		b.step()
-		if b.on(id) != safeOn {
+		if (b.run.Get(load) != 0) != safeOn {
 			wrongFor, reached = n, 0
 			continue
 		}
-		if reached++; reached > settling(a.spec) {
+		if reached++; reached > settled {
 			return a.ended(l, b.was, wrongFor), n
 		}
 	}

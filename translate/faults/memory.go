@@ -12,7 +12,7 @@ import (
 // with the button held in.
 func (a *assessor) memory(l *translate.Switched, k *translate.Contact, function string) {
 	id, load := k.Control.ID.V, l.Load.ID.V
-	b, _, ok := brought(a.spec, load, true)
+	b, ok := a.brought(load, true)
 	if !ok {
 		return
 	}
@@ -100,7 +100,7 @@ func (a *assessor) heldOff(l *translate.Switched, b *bench, should bool) end {
 func (a *assessor) flipped(l *translate.Switched) (end, string) {
 	id := l.Load.ID.V
 	safeOn := l.Load.SafeState.V.Energised()
-	b, _, ok := brought(a.spec, id, safeOn)
+	b, ok := a.brought(id, safeOn)
 	if !ok {
 		return end{unsure, "unknown: the program could not be brought to its safe state"}, "program run"
 	}

@@ -33,6 +33,14 @@ func (c *Checked) newRun(probes bool) *Run {
 	return r
 }
 
+// Fork is a second run of the same program in the same state. The two share
+// nothing that changes.
+func (r *Run) Fork() *Run {
+	f := *r
+	f.m = append([]int64(nil), r.m...)
+	return &f
+}
+
 // Decisions lists the decision points of a run made by NewProbed, in the
 // numbering that Probe uses.
 func (r *Run) Decisions() []*Decision { return r.code.decisions }

@@ -12,6 +12,10 @@ func (s *search) setGoals() {
 	for i, v := range s.verdicts {
 		verdict[v] = s.c.Never[i]
 	}
+	slots := map[*logic.Var]int{}
+	for i, v := range s.c.State {
+		slots[v] = i
+	}
 	for _, c := range s.choices {
 		switch p := verdict[c.part.writes]; {
 		case c.part.expr == nil:
@@ -19,13 +23,9 @@ func (s *search) setGoals() {
 			s.broken[c] = p
 			c.open = []*goal{{Goal: Goal{Kind: OutcomeGoal, Text: p.Name + " broken"}, soft: true, choice: c, atom: outcome, value: true}}
 		case c.block < s.own:
-			c.open = goalsOf(c, s.ready.Ranges)
+			c.open = goalsOf(c, s.ready.Ranges, slots)
 		}
 		s.goals = append(s.goals, c.open...)
-	}
-	slots := map[*logic.Var]int{}
-	for i, v := range s.c.State {
-		slots[v] = i
 	}
 	for i, b := range s.ready.Order[:s.own] {
 		s.watchBlock(b, slots)
@@ -104,7 +104,7 @@ func (s *search) watchSurvivors(slots map[*logic.Var]int) {
 		for _, n := range values {
 			g := s.see(Goal{Kind: StartGoal, Text: fmt.Sprintf("%s starts as remembered: %s", v.Name, named(v, n))},
 				func() bool { return s.probed.after[i] == n })
-			g.then = func() { s.rememberedRoot() }
+			g.then = func() { g.root = s.rememberedRoot() }
 		}
 	}
 }
@@ -144,7 +144,7 @@ func (s *search) changesOf(i int, b logic.Block) {
 		visit = func(e *logic.Expr, worked, divides bool) {
 			here := at
 			at++
-			if worked {
+			if _, number := isConst(e); worked && !(number && here == 0) {
 				s.changeNode(i, n, here, p, e, divides)
 			}
 			for k, a := range e.Args {

@@ -29,6 +29,7 @@ type draft struct {
 
 func (s *search) assemble() Tour {
 	a := &assembler{search: s}
+	s.thorough = true
 	goals := a.again()
 	a.begin(nil)
 	for _, g := range goals {
@@ -72,7 +73,6 @@ func (a *assembler) again() []*goal {
 		case g.seen != nil:
 			a.watch = append(a.watch, g)
 		case g.change != nil:
-			g.rest, g.checks = 0, 0
 			a.changes = append(a.changes, g)
 		default:
 			a.starts = append(a.starts, g)
@@ -102,7 +102,7 @@ func (a *assembler) lead(g *goal) {
 				n = len(way)
 			}
 			if legs, ok := a.attempt(from, way[len(way)-n:], g); ok {
-				a.extend(from, legs)
+				a.extend(from, a.shortened(from, legs, g))
 				return
 			}
 			if n == len(way) {
@@ -111,7 +111,31 @@ func (a *assembler) lead(g *goal) {
 		}
 	}
 	a.begin(root.record)
+	if !a.mustStart(g) {
+		way = a.shortened(root.snap, way, g)
+	}
 	a.extend(root.snap, way)
+}
+
+// longLeg is how many steps a leg may have before it is tried with fewer.
+const longLeg = 64
+
+// shortened takes steps away from long legs as far as the goal is still reached.
+func (a *assembler) shortened(from []int64, legs []leg, g *goal) []leg {
+	for i := range legs {
+		for steps := 1; steps < legs[i].steps && legs[i].steps > longLeg; steps *= 8 {
+			other := slices.Clone(legs)
+			other[i].steps = steps
+			if shorter, ok := a.attempt(from, other, g); ok {
+				legs = shorter
+				break
+			}
+		}
+		if i >= len(legs)-1 {
+			break
+		}
+	}
+	return legs
 }
 
 // mustStart reports whether a goal is about the first step.
@@ -174,7 +198,6 @@ func (a *assembler) attempt(from []int64, way []leg, g *goal) (legs []leg, ok bo
 // reached reports whether the step at hand reaches one goal.
 func (a *assembler) reached(g *goal) bool {
 	if g.choice == nil {
-		g.rest = 0
 		return a.happened(g)
 	}
 	for i := range a.hits {
@@ -199,6 +222,7 @@ func (a *assembler) extend(from []int64, way []leg) {
 			a.step()
 			n++
 			before := len(a.found)
+			a.last = 0
 			a.judge()
 			if len(a.found) > before {
 				d.legs = append(d.legs, leg{l.inputs, n - cut})
@@ -217,10 +241,7 @@ func (a *assembler) extend(from []int64, way []leg) {
 // returns adds a sequence for each remembered start, long enough for what was
 // remembered to show.
 func (a *assembler) returns() {
-	for _, root := range a.roots {
-		if slices.ContainsFunc(a.drafts, func(d *draft) bool { return d.record != nil && slices.Equal(d.record.Values, root.record.Values) }) {
-			continue
-		}
+	for _, root := range a.roots[1:] {
 		d := &draft{record: root.record}
 		a.at = root
 		a.inputs = root.inputs
@@ -228,7 +249,7 @@ func (a *assembler) returns() {
 			a.probed.set(root.snap)
 			a.held = 0
 			a.step()
-			if a.showsMemory() {
+			if root.shown = a.showsMemory(); root.shown {
 				break
 			}
 			a.inputs = a.pickInputs(root, nil)
@@ -263,7 +284,7 @@ func (s *search) refused() []Vector {
 		return nil
 	}
 	var good *logic.Record
-	for _, r := range s.roots {
+	for _, r := range s.roots[1:] {
 		for i, v := range vars {
 			if r.record.Values[i] != v.Start {
 				good = r.record
@@ -289,7 +310,7 @@ func (s *search) refused() []Vector {
 		values := slices.Clone(good.Values)
 		values[i] = v.Range.Hi + 1
 		switch values[i] {
-		case 256, 65536, 1 << 31:
+		case 128, 256, 32768, 65536, 1 << 31:
 			continue // the variable could not hold it
 		}
 		if v.Kind == logic.Bool {
@@ -338,7 +359,7 @@ func (s *search) told() (reached, missed []Goal) {
 			continue
 		}
 		switch {
-		case g.done:
+		case g.done && (g.root == nil || g.root.shown):
 			reached = append(reached, g.Goal)
 		case g.soft:
 		default:

@@ -47,14 +47,15 @@ type goal struct {
 	value  bool // of the atom or the outcome
 	near   near
 	seen   func() bool
-	slot   int   // of a start value
-	wrong  int64 // what a start value must not be taken for
+	slot   int   // in State: of a start value, or of the machine that a term asks
+	wrong  int64 // what a start value, or the state asked for, must not be taken for
 	change *logic.Program
 
 	changed *logic.Run // of change, once it is asked for
 	checks  int
-	then    func()
-	rest    int // steps to let pass before it is asked for again
+	then    func() // what else is done when it is reached
+	root    *node  // the start from what was remembered then
+	rest    int    // steps to let pass before it is asked for again
 }
 
 const outcome = -1
@@ -67,6 +68,7 @@ const (
 	equal
 	oneApart
 	unequal
+	neighbour // the machine asked is in the state next to the one asked for
 )
 
 // distance is how far a step was from a goal of a choice: 0 when its atom
@@ -84,14 +86,14 @@ func (g *goal) distance(atoms, same, next uint64) int {
 	switch g.near {
 	case equal:
 		if same&bit == 0 {
-			d++
+			d += 2
 			if next&bit == 0 {
 				d++
 			}
 		}
 	case oneApart:
 		if next&bit == 0 {
-			d++
+			d += 2
 			if same&bit == 0 {
 				d++
 			}
@@ -104,20 +106,27 @@ func (g *goal) distance(atoms, same, next uint64) int {
 	return d
 }
 
+// mostAtoms is how many terms of a condition a probe tells apart.
+const mostAtoms = 64
+
 // goalsOf lists what is wanted of a choice.
-func goalsOf(c *choice, ranges map[*logic.Expr]logic.Range) []*goal {
-	if len(c.atoms) == 0 || len(c.atoms) > 64 {
-		return outcomes(c)
-	}
+func goalsOf(c *choice, ranges map[*logic.Expr]logic.Range, slots map[*logic.Var]int) []*goal {
 	gs := outcomes(c)
+	if len(c.atoms) > mostAtoms {
+		return gs
+	}
 	for i, a := range c.atoms {
 		for _, value := range []bool{true, false} {
 			g := &goal{choice: c, atom: i, value: value}
 			g.Kind, g.Text = AtomGoal, fmt.Sprintf("%s: (%s) %s decides", c.part.where, a, holds(value))
 			gs = append(gs, g)
 		}
-		if a.Op.IsCompare() && a.Args[0].Kind == logic.Int {
+		switch {
+		case !a.Op.IsCompare():
+		case a.Args[0].Kind == logic.Int:
 			gs = append(gs, boundaries(c, i, a, ranges)...)
+		case a.Args[0].Kind == logic.Word:
+			gs = append(gs, mistaken(c, i, a, slots)...)
 		}
 	}
 	return gs
@@ -170,6 +179,22 @@ func boundaries(c *choice, i int, a *logic.Expr, ranges map[*logic.Expr]logic.Ra
 	return gs
 }
 
+// mistaken lists what is wanted of a term that asks a machine for its state:
+// that the states before and after that one are told from it.
+func mistaken(c *choice, i int, a *logic.Expr, slots map[*logic.Var]int) []*goal {
+	var gs []*goal
+	slot, ok := slots[a.Args[0].Var]
+	if !ok || a.Args[1].Op != logic.OpLit {
+		return nil
+	}
+	for _, n := range neighbours(a.Args[1]) {
+		g := &goal{choice: c, atom: i, value: a.Op == logic.OpNe, near: neighbour, slot: slot, wrong: n, soft: true}
+		g.Kind, g.Text = AtomGoal, fmt.Sprintf("%s: (%s) is told from %s", c.part.where, a, a.Args[0].Enum.Words[n].Name)
+		gs = append(gs, g)
+	}
+	return gs
+}
+
 // beyond reports whether a comparison can have the outcome of equal sides
 // without equal sides.
 func beyond(a *logic.Expr, ranges map[*logic.Expr]logic.Range) bool {
@@ -184,7 +209,7 @@ func beyond(a *logic.Expr, ranges map[*logic.Expr]logic.Range) bool {
 // the program does: no value of the variables that its terms read would do.
 // It says no where there is too much to try.
 func (g *goal) excluded() bool {
-	if g.choice == nil {
+	if g.choice == nil || len(g.choice.atoms) > mostAtoms {
 		return false
 	}
 	r := newReadings(g.choice.atoms)

@@ -59,7 +59,7 @@ func (c *counter) stop(v int64) { c.at = append(c.at, v) }
 func (l *leaper) note(e *logic.Expr, writes *logic.Var, at map[*logic.Var]*counter) {
 	if own, ok := at[writes]; ok && own.free {
 		if own.countsOn(e, writes) {
-			l.noteConditions(e, at)
+			l.noteOthers(e, writes, at)
 			return
 		}
 		own.free = false
@@ -91,32 +91,37 @@ func (l *leaper) note(e *logic.Expr, writes *logic.Var, at map[*logic.Var]*count
 	}
 }
 
-// noteConditions notes what the selections inside a counting expression read.
-func (l *leaper) noteConditions(e *logic.Expr, at map[*logic.Var]*counter) {
-	if e.Op == logic.OpSelect {
+// noteOthers notes what an expression that counts v on reads besides v.
+func (l *leaper) noteOthers(e *logic.Expr, v *logic.Var, at map[*logic.Var]*counter) {
+	switch {
+	case reads(e) && e.Var == v:
+	case !mentions(e, v):
+		l.note(e, nil, at)
+	case e.Op == logic.OpSelect:
 		l.note(e.Args[0], nil, at)
-	}
-	for i, a := range e.Args {
-		if e.Op == logic.OpSelect && i == 0 {
-			continue
-		}
-		if reads(a) || a.Kind == logic.Bool {
-			continue
-		}
-		l.noteConditions(a, at)
+		l.noteOthers(e.Args[1], v, at)
+		l.noteOthers(e.Args[2], v, at)
+	default:
+		l.noteOthers(e.Args[0], v, at)
 	}
 }
 
+func mentions(e *logic.Expr, v *logic.Var) bool {
+	found := false
+	e.Walk(func(n *logic.Expr) { found = found || n.Var == v })
+	return found
+}
+
 // countsOn reports whether an expression is v plus or minus numbers, held
-// between numbers, or a choice between such, and notes the numbers.
+// between numbers, or something that has nothing to do with v, or a choice
+// between such, and notes the numbers.
 func (c *counter) countsOn(e *logic.Expr, v *logic.Var) bool {
-	if k, ok := isConst(e); ok {
-		c.stop(k)
+	if !mentions(e, v) {
 		return true
 	}
 	switch e.Op {
 	case logic.OpUse, logic.OpPrev:
-		return e.Var == v
+		return true
 	case logic.OpAdd, logic.OpSub:
 		_, ok := isConst(e.Args[1])
 		return ok && c.countsOn(e.Args[0], v)
@@ -139,26 +144,23 @@ func (c *counter) countsOn(e *logic.Expr, v *logic.Var) bool {
 // next to it are met one by one.
 const margin = 2
 
-// leap gives how many more rounds of the given number of steps may be skipped
-// after a round that took the variables from before to after, and 0 where
-// something else than counters moved. still is true where nothing moved at all.
-func (l *leaper) leap(before, after []int64, period int64) (rounds int64, still bool) {
-	rounds, still = math.MaxInt32, true
+// rounds gives how many more rounds of the given number of steps may be skipped
+// after two rounds that took the variables from first over before to after, and
+// 0 where something else than counters moved. Two rounds, because a variable
+// that is put to a fixed value may look like a counter for one.
+func (l *leaper) rounds(first, before, after []int64, period int64) int64 {
+	rounds := int64(math.MaxInt32)
 	for i, v := range after {
 		d := v - before[i]
-		if d == 0 {
+		if d == 0 && before[i] == first[i] {
 			continue
 		}
-		still = false
-		if d != period || !l.stops[i].free {
-			return 0, false
+		if d != period || before[i]-first[i] != period || !l.stops[i].free {
+			return 0
 		}
-		rounds = min(rounds, (l.stops[i].next(before[i])-margin-v)/period)
+		rounds = min(rounds, (l.stops[i].next(first[i])-margin-v)/period)
 	}
-	if still {
-		return 0, true
-	}
-	return max(rounds, 0), false
+	return max(rounds, 0)
 }
 
 // next is the first number from v on at which something may change.

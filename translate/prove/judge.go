@@ -8,12 +8,16 @@ import (
 
 // judge looks at the step just run: which goals are reached, which are nearer.
 func (s *search) judge() {
-	for i := range s.hits {
-		s.judgeHit(&s.hits[i])
+	starting := s.isStart()
+	if s.pattern != s.last {
+		for i := range s.hits {
+			s.judgeHit(&s.hits[i])
+		}
+		s.last = s.pattern
 	}
 	s.judgeAll(&s.watch)
 	s.judgeAll(&s.changes)
-	if s.isStart() {
+	if starting {
 		s.judgeAll(&s.starts)
 	}
 	if len(s.c.Never) > 0 && len(s.verdicts) == 0 {
@@ -46,14 +50,45 @@ func (s *search) judgeHit(h *hit) {
 // away is how far a goal of a choice is from being reached in this step.
 // Deciding is not enough: the difference must show.
 func (s *search) away(g *goal, h *hit) int {
-	d := g.distance(h.atoms, h.same, h.next)
-	if d > 0 {
-		return d + 1
+	if g.atom == outcome && h.outcome == g.value {
+		return 0
 	}
-	if g.atom == outcome || s.showsFlip(h) {
+	d := g.distance(h.atoms, h.same, h.next)
+	if g.near == neighbour && s.asked(g) != g.wrong {
+		d += 2
+	}
+	switch {
+	case d > 0 || g.atom == outcome:
+		return d + 1
+	case s.due(g) && s.showsFlip(h):
 		return 0
 	}
 	return 1
+}
+
+// asked is the state of the machine that the term of a goal asks, as the term
+// sees it.
+func (s *search) asked(g *goal) int64 {
+	if g.choice.atoms[g.atom].Args[0].Op == logic.OpPrev {
+		return s.probed.before[g.slot]
+	}
+	return s.probed.after[g.slot]
+}
+
+// due reports whether a goal is to be looked at closely in this step: always at
+// first, less and less often while it makes no difference, and always again
+// when sequences are put together.
+func (s *search) due(g *goal) bool {
+	if s.thorough {
+		return true
+	}
+	if g.rest > 0 {
+		g.rest--
+		return false
+	}
+	g.checks++
+	g.rest = min(g.checks/16, 12)
+	return true
 }
 
 // showsFlip reports whether the step would have ended otherwise, had the
@@ -118,18 +153,14 @@ func (s *search) happened(g *goal) bool {
 	return s.differs(s.plain, wrong)
 }
 
-// showsChange runs a changed program beside the step at hand, less and less
-// often while it makes no difference.
+// showsChange runs a changed program beside the step at hand.
 func (s *search) showsChange(g *goal) bool {
-	if g.rest > 0 {
-		g.rest--
+	if !s.due(g) {
 		return false
 	}
 	if g.changed == nil {
 		g.changed = mutantRun(s.ready, g.change)
 	}
-	g.checks++
-	g.rest = min(g.checks/64, 16)
 	return s.differs(g.changed, s.probed.before)
 }
 
@@ -150,10 +181,10 @@ func (s *search) reach(g *goal) {
 }
 
 // mostBest is how many states are kept for a goal.
-const mostBest = 4
+const mostBest = 8
 
 // nearer keeps the present state for a goal if it is nearer to it than any
-// before, or as near and there is room.
+// before, or as near and there is room; now and then in place of another.
 func (s *search) nearer(g *goal, d int) {
 	switch {
 	case len(g.best) == 0 || d < g.dist:
@@ -161,6 +192,8 @@ func (s *search) nearer(g *goal, d int) {
 		g.best = append(g.best[:0], s.here())
 	case d == g.dist && len(g.best) < mostBest && g.best[len(g.best)-1] != s.at:
 		g.best = append(g.best, s.here())
+	case d == g.dist && s.random.below(8) == 0:
+		g.best[s.random.below(len(g.best))] = s.here()
 	}
 }
 

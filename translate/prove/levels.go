@@ -101,21 +101,41 @@ func (l *levels) carried(e *logic.Expr) uint64 {
 	return m
 }
 
-// compared traces the number of each comparison back to the inputs.
+// compared traces the number of each comparison back to the inputs, and so the
+// bounds that something is held within and the points of tables.
 func (l *levels) compared() {
+	back := func(e *logic.Expr, want ...int64) { l.trace(e, want, map[*logic.Var]bool{}) }
 	l.each(func(e *logic.Expr) {
-		if !e.Op.IsCompare() || e.Args[0].Kind != logic.Int {
-			return
-		}
-		a, b := e.Args[0], e.Args[1]
-		if c, ok := isConst(b); ok {
-			l.trace(a, []int64{c - 1, c, c + 1}, map[*logic.Var]bool{})
-		} else if c, ok := isConst(a); ok {
-			l.trace(b, []int64{c - 1, c, c + 1}, map[*logic.Var]bool{})
-		} else {
-			l.relative(l.carried(a)&l.carried(b), 0)
+		switch {
+		case e.Op == logic.OpLookup:
+			l.spreadOver(e)
+			back(e.Args[0], about(e.Table.X)...)
+		case e.Op == logic.OpClamp:
+			for _, bound := range e.Args[1:] {
+				if c, ok := isConst(bound); ok {
+					back(e.Args[0], c-1, c, c+1)
+				}
+			}
+		case e.Op.IsCompare() && e.Args[0].Kind == logic.Int:
+			a, b := e.Args[0], e.Args[1]
+			if c, ok := isConst(b); ok {
+				back(a, c-1, c, c+1)
+			} else if c, ok := isConst(a); ok {
+				back(b, c-1, c, c+1)
+			} else {
+				l.relative(l.carried(a)&l.carried(b), 0)
+			}
 		}
 	})
+}
+
+// about lists numbers and their neighbours.
+func about(vs []int64) []int64 {
+	var out []int64
+	for _, v := range vs {
+		out = append(out, v-1, v, v+1)
+	}
+	return out
 }
 
 // each calls f for every node of the step.
@@ -228,9 +248,9 @@ func (l *levels) spreadOver(e *logic.Expr) {
 	}
 }
 
-// inverse lists the numbers at which a table passes the values, and its points.
+// inverse lists the numbers at which a table passes the values.
 func inverse(t *logic.Table, want []int64) []int64 {
-	xs := slices.Clone(t.X)
+	var xs []int64
 	for i := 1; i < len(t.X); i++ {
 		lo, hi := min(t.Y[i-1], t.Y[i]), max(t.Y[i-1], t.Y[i])
 		for _, y := range want {

@@ -35,7 +35,8 @@ type search struct {
 	starts  []*goal // goals of the first step, not reached yet
 	changes []*goal // goals that run a changed program, not reached yet
 
-	roots []*node // starts from something remembered
+	roots []*node // starts; the first with nothing remembered
+	swept int     // roots from which every input has been tried
 	fresh []*node // states that are unlike all others
 	known map[uint64]bool
 
@@ -44,11 +45,13 @@ type search struct {
 	inputs  []int64
 	held    int // steps since that node
 	hits    []hit
-	pattern uint64
+	pattern uint64 // of all decisions in the step, and of the step before
+	last    uint64
 	out     []int64
 	read    bool // out is of this step
 	buf     []int64
 
+	thorough bool // look at every goal in every step
 	violated []*violation
 }
 
@@ -74,6 +77,7 @@ type node struct {
 	steps  int
 	snap   []int64
 	record *logic.Record // of a root
+	shown  bool          // of a root: what was remembered makes a difference in the recorded step
 	tried  int
 }
 
@@ -90,7 +94,7 @@ func newSearch(c *logic.Checked, budget int) *search {
 	run.Probe = s.note
 	s.out = make([]int64, len(c.Outputs))
 	s.setGoals()
-	s.root(nil)
+	s.root(nil, s.rest())
 	return s
 }
 
@@ -104,25 +108,48 @@ func lasting(c *logic.Checked) []*logic.Var {
 }
 
 // root adds a start from a record.
-func (s *search) root(rec *logic.Record) *node {
+func (s *search) root(rec *logic.Record, inputs []int64) *node {
 	s.plain.Start(rec)
-	n := &node{record: rec, inputs: make([]int64, len(s.c.Inputs)), snap: s.plain.Snapshot(nil)}
-	for i, v := range s.c.Inputs {
-		n.inputs[i] = max(v.Range.Lo, 0)
-	}
+	n := &node{record: rec, inputs: inputs, snap: s.plain.Snapshot(nil)}
 	s.fresh = append(s.fresh, n)
+	s.roots = append(s.roots, n)
 	return n
 }
 
-// note is called at every decision of a step.
-func (s *search) note(d int, outcome bool, atoms, same, close uint64) {
-	h := s.pattern*0x100000001B3 ^ uint64(d)<<1
-	if outcome {
-		h ^= 1
+// rest gives inputs to start from: numbers in the middle of what matters.
+func (s *search) rest() []int64 {
+	inputs := make([]int64, len(s.c.Inputs))
+	for i, v := range s.c.Inputs {
+		if v.Kind == logic.Int {
+			vs := s.levels.values[i]
+			inputs[i] = vs[len(vs)/2]
+		}
 	}
-	s.pattern = h ^ atoms<<20
+	return inputs
+}
+
+// settles is how many changes are waited for where every input is tried.
+const settles = 8
+
+// sweep tries every value of every input from a start, one input at a time,
+// for one step and for as long as it takes to settle.
+func (s *search) sweep(root *node) {
+	for i := range s.c.Inputs {
+		for _, v := range s.levels.values[i] {
+			inputs := slices.Clone(root.inputs)
+			inputs[i] = v
+			s.hold(root, inputs, 1)
+			s.hold(root, inputs, -settles)
+		}
+	}
+}
+
+// note is called at every decision of a step.
+func (s *search) note(d int, outcome bool, atoms, same, next uint64) {
+	h := (s.pattern ^ uint64(d) ^ atoms<<8 ^ same<<28 ^ next<<46) * 0x9E3779B97F4A7C15
+	s.pattern = h ^ h>>29
 	if len(s.choices[d].open) > 0 {
-		s.hits = append(s.hits, hit{n: int32(d), outcome: outcome, atoms: atoms, same: same, next: close})
+		s.hits = append(s.hits, hit{n: int32(d), outcome: outcome, atoms: atoms, same: same, next: next})
 	}
 }
 
@@ -130,13 +157,23 @@ func (s *search) note(d int, outcome bool, atoms, same, close uint64) {
 // nothing new has been found for too long.
 func (s *search) run() {
 	for s.spent < s.budget && s.spent-s.news < s.patience {
+		if s.swept < len(s.roots) {
+			s.sweep(s.roots[s.swept])
+			s.swept++
+			continue
+		}
 		g := s.pick()
 		if g == nil && s.left() == 0 {
 			return
 		}
 		from := s.pickNode(g)
 		from.tried++
-		s.hold(from, s.pickInputs(from, g), s.pickSteps())
+		steps := s.pickSteps()
+		s.hold(from, s.pickInputs(from, g), steps)
+		for n := 0; n < 4 && s.random.below(3) > 0; n++ {
+			from = s.here()
+			s.hold(from, s.pickInputs(from, g), 1)
+		}
 	}
 }
 
@@ -157,7 +194,7 @@ const hopeless = 6
 // pick chooses the goal that has been tried least since it last came nearer,
 // now and then none at all.
 func (s *search) pick() *goal {
-	if s.random.below(5) == 0 {
+	if s.random.below(4) == 0 {
 		return nil
 	}
 	var least *goal
@@ -246,7 +283,7 @@ func (s *search) pickInputs(from *node, g *goal) []int64 {
 // remembered value.
 func (s *search) pickValue(i int, from *node) int64 {
 	l := s.levels
-	if len(l.steps[i]) > 0 && len(l.carries[i]) > 0 && s.random.below(3) > 0 {
+	if len(l.steps[i]) > 0 && len(l.carries[i]) > 0 && s.random.below(4) == 0 {
 		v := from.snap[l.carries[i][s.random.below(len(l.carries[i]))]]
 		v += l.steps[i][s.random.below(len(l.steps[i]))] + int64(s.random.below(3)) - 1
 		r := s.c.Inputs[i].Range
@@ -279,13 +316,13 @@ const longestHold = 400
 // any more. Wherever something new comes up, the state is kept.
 func (s *search) hold(from *node, inputs []int64, steps int) {
 	s.probed.set(from.snap)
-	s.at, s.held, s.inputs = from, 0, inputs
+	s.at, s.held, s.inputs, s.last = from, 0, inputs, 0
 	changes, limit := 0, steps
 	if steps < 0 {
 		changes, limit = -steps, longestHold
 	}
-	last := uint64(0)
 	for n := range limit {
+		last := s.last
 		s.step()
 		s.judge()
 		if steps > 0 {
@@ -296,7 +333,6 @@ func (s *search) hold(from *node, inputs []int64, steps int) {
 				break
 			}
 		}
-		last = s.pattern
 		leapt, still := s.probed.leap(farthest, 1)
 		if still {
 			break
@@ -379,14 +415,14 @@ func (r *random) below(n int) int {
 	return int(uint64(x>>16) % uint64(n))
 }
 
-// rememberedRoot adds a start from what would be remembered now.
-func (s *search) rememberedRoot() {
+// rememberedRoot gives a start from what would be remembered now.
+func (s *search) rememberedRoot() *node {
 	s.plain.Restore(s.probed.after)
 	rec := s.plain.Remember()
-	for _, r := range s.roots {
+	for _, r := range s.roots[1:] {
 		if slices.Equal(r.record.Values, rec.Values) {
-			return
+			return r
 		}
 	}
-	s.roots = append(s.roots, s.root(&rec))
+	return s.root(&rec, s.inputs)
 }

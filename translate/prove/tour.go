@@ -12,7 +12,7 @@ type Budget struct {
 }
 
 // DefaultSteps is enough for a control with a few probes and machines.
-const DefaultSteps = 20000
+const DefaultSteps = 16000
 
 func (b Budget) steps() int {
 	if b.Steps > 0 {
@@ -91,7 +91,7 @@ func (t *Tour) Rows() int {
 // up or when it finds nothing new for a good while.
 func Visit(c *logic.Checked, budget Budget) Tour {
 	s := newSearch(c, budget.steps())
-	s.patience = s.budget / 4
+	s.patience = s.budget / 8
 	s.run()
 	t := s.assemble()
 	t.Steps = s.spent

@@ -11,6 +11,9 @@ import (
 
 	"github.com/expr-lang/expr"
 	"github.com/expr-lang/expr/ast"
+	"github.com/expr-lang/expr/checker"
+	"github.com/expr-lang/expr/compiler"
+	"github.com/expr-lang/expr/conf"
 	"github.com/expr-lang/expr/file"
 	"github.com/expr-lang/expr/vm"
 )
@@ -109,19 +112,45 @@ type fault struct {
 	message string
 }
 
-// options gives, for each kind of thing, what expressions are compiled with.
-var options = sync.OnceValue(func() map[string][]expr.Option {
-	all := map[string][]expr.Option{}
+// compilers gives, for each kind of thing, what expressions are checked and
+// compiled against. Reading the types of the view is most of the work, so it
+// is done once for each kind and not for each expression.
+var compilers = sync.OnceValue(func() map[string]*compilerOf {
+	all := map[string]*compilerOf{}
 	for each, thing := range things() {
 		env := maps.Clone(names(&View{}, newLookup(nil)))
 		env[each] = thing
-		all[each] = []expr.Option{
-			expr.Env(env), expr.DisableAllBuiltins(), expr.EnableBuiltin("len"),
-			expr.Optimize(false), expr.MaxNodes(mostNodes),
+		c := conf.New(env)
+		for _, option := range []expr.Option{
+			expr.DisableAllBuiltins(), expr.EnableBuiltin("len"), expr.Optimize(false), expr.MaxNodes(mostNodes),
+		} {
+			option(c)
 		}
+		for name := range c.Disabled {
+			delete(c.Builtins, name)
+		}
+		c.Check()
+		all[each] = &compilerOf{config: c}
 	}
 	return all
 })
+
+// compilerOf is one of them; the types in it are looked up through a cache,
+// which one compilation at a time may use.
+type compilerOf struct {
+	sync.Mutex
+	config *conf.Config
+}
+
+func (c *compilerOf) compile(text string) (*vm.Program, error) {
+	c.Lock()
+	defer c.Unlock()
+	tree, err := checker.ParseCheck(text, c.config)
+	if err != nil {
+		return nil, err
+	}
+	return compiler.Compile(tree, c.config)
+}
 
 // compile checks an expression against the names that a rule for each such
 // thing may use.
@@ -129,7 +158,11 @@ func compile(text, each string, want wants) (*expression, *fault) {
 	if len(text) > longestExpression {
 		return nil, &fault{0, fmt.Sprintf("longer than %d characters", longestExpression)}
 	}
-	program, err := expr.Compile(text, options()[each]...)
+	c, ok := compilers()[each]
+	if !ok {
+		return nil, &fault{0, "nothing to judge: " + each}
+	}
+	program, err := c.compile(text)
 	if err != nil {
 		return nil, faultOf(err)
 	}
