@@ -46,7 +46,7 @@ func C(j Job) []File {
 		{Name: id + ".c", Data: []byte(src.Body())},
 		{Name: id + "_port.h", Data: []byte(src.PortHeader())},
 		{Name: id + "_port.c", Data: []byte(src.PortBody()), Yours: true},
-		{Name: id + "_check.c", Data: []byte(src.Check(vectors(j.Tour)))},
+		{Name: id + "_check.c", Data: []byte(src.Check(vectors(j.Tour), missed(j.Tour)))},
 	}
 }
 
@@ -60,6 +60,17 @@ func vectors(t prove.Tour) []csource.Vector {
 		out = append(out, c)
 	}
 	return out
+}
+
+// missed lists the states and transitions that the search did not reach.
+func missed(t prove.Tour) []string {
+	var all []string
+	for _, g := range t.Missed {
+		if g.Kind == prove.TransitionGoal || g.Kind == prove.StateGoal {
+			all = append(all, "- "+g.Text)
+		}
+	}
+	return all
 }
 
 // Pack gives every file of a pack. Its manifest comes last.

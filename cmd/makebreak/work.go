@@ -146,10 +146,14 @@ func computed(spec *translate.Specification) risk.Computed {
 	return c
 }
 
+// tourSteps is how many steps the search for recorded inputs may run. Fewer
+// leave some thresholds of the examples without a row just beside them.
+const tourSteps = 80_000
+
 func (w *work) job() codegen.Job {
 	j := codegen.Job{Spec: w.spec, Risks: w.risks, Functions: w.functions}
 	if w.spec.Program != nil && !w.risks.Stopped() {
-		j.Tour = prove.Visit(w.spec.Program, prove.Budget{})
+		j.Tour = prove.Visit(w.spec.Program, prove.Budget{Steps: tourSteps})
 	}
 	return j
 }

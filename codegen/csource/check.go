@@ -25,9 +25,16 @@ type Vector struct {
 
 // Check prints <id>_check.c: the recorded inputs through the C, every output
 // compared at every step, the whole state at the end of every row.
-func (s Source) Check(vectors []Vector) string {
+// Missed are the transitions that the recorded inputs do not make; the file
+// names them.
+func (s Source) Check(vectors []Vector, missed []string) string {
 	w := s.printer()
 	w.banner(s.Facts, w.lo+"_check.c", "recorded inputs through the program; runs on any host")
+	if len(missed) > 0 {
+		w.comment("", append([]string{"Transitions that the recorded inputs do not make; no way to them was found:"}, missed...)...)
+	} else {
+		w.comment("", "The recorded inputs visit every state and make every transition.")
+	}
 	w.line("#include \"%s.h\"\n\n#include <stdio.h>\n#include <string.h>\n", w.lo)
 	w.checkTypes()
 	w.rows(vectors)

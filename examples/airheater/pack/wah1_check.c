@@ -22,6 +22,7 @@
  * Software cannot see what it has no input for. A finding of grade stop is ended only by changing
  * the design.
  */
+/* The recorded inputs visit every state and make every transition. */
 #include "wah1.h"
 
 #include <stdio.h>

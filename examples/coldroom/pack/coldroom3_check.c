@@ -22,6 +22,9 @@
  * Software cannot see what it has no input for. A finding of grade stop is ended only by changing
  * the design.
  */
+/* Transitions that the recorded inputs do not make; no way to them was found:
+ * - warm_alarm: off to on (its safe state is on)
+ */
 #include "coldroom3.h"
 
 #include <stdio.h>
