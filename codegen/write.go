@@ -102,12 +102,11 @@ func folder(dir string) (bool, error) {
 func tidy(dir string) error {
 	aside := filepath.Join(filepath.Dir(dir), "."+filepath.Base(dir)+oldMark)
 	if _, err := os.Stat(aside); err == nil {
+		mend := func() error { return os.RemoveAll(aside) }
 		if _, err := os.Stat(dir); errors.Is(err, fs.ErrNotExist) {
-			err = os.Rename(aside, dir)
-		} else {
-			err = os.RemoveAll(aside)
+			mend = func() error { return os.Rename(aside, dir) }
 		}
-		if err != nil {
+		if err := mend(); err != nil {
 			return err
 		}
 	}

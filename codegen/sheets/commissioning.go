@@ -166,9 +166,7 @@ func loads(spec *translate.Specification) []check {
 				cs = append(cs, check{l.ID.V, "pull the wire of " + g.ID.V + " off while it runs", broken(g, l)})
 			}
 		}
-		for _, t := range minimums(spec, l.ID.V) {
-			cs = append(cs, t)
-		}
+		cs = append(cs, minimums(spec, l.ID.V)...)
 		if s.Seen != nil {
 			cs = append(cs, check{l.ID.V, "bridge its contact while it is told to be off", "fault " + l.ID.V + "_welded within 1 s; no new start until the supply has been off"})
 		}

@@ -72,10 +72,6 @@ type follower struct {
 
 func (b *bench) on(load string) bool { return b.run.Get(b.spec.Plan.Loads[load].Out) != 0 }
 
-func (b *bench) seconds(steps int) float64 {
-	return float64(steps) * float64(b.spec.Program.StepMS) / 1000
-}
-
 // until runs until the load is as wanted, at most n steps, and says after how many.
 func (b *bench) until(load string, want bool, n int) (int, bool) {
 	for i := 1; i <= n; i++ {

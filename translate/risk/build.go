@@ -99,10 +99,6 @@ func (b *builder) outputView(l *Load) *Output {
 	return none
 }
 
-func (b *builder) controlView(id string) *Control {
-	return find(b.view.Controls, func(c *Control) bool { return c.ID == id })
-}
-
 func (b *builder) dangerView(id string) *Danger {
 	return find(b.view.Dangers, func(d *Danger) bool { return d.ID == id })
 }
