@@ -68,7 +68,8 @@ func (d *decoder) controlKeys(c *Control) {
 	only(c.Anticipator.Source, switching, "switching controls")
 	only(c.RatedCurrent.Source, c.Element.V == "heated_bimetal", "element: heated_bimetal")
 	only(c.TripsAfter.Source, c.Element.V == "heated_bimetal", "element: heated_bimetal")
-	only(c.TripFree.Source, c.Reset.V == ResetManual, "reset: manual")
+	// Harmless where it only says what is so of every part without a manual reset.
+	only(c.TripFree.Source, c.Reset.V == ResetManual || c.TripFree.V, "reset: manual")
 }
 
 // thresholds makes sure that both edges of a switching control are known, or

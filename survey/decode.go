@@ -122,8 +122,8 @@ func (d *decoder) field(v reflect.Value, k key, n, parent *yaml.Node, path strin
 
 // sections reads a list of sections.
 func (d *decoder) sections(v reflect.Value, n *yaml.Node, path string) {
-	if n == nil {
-		return
+	if n == nil || isNull(n) {
+		return // an empty list, perhaps with all of its entries commented out
 	}
 	if n.Kind != yaml.SequenceNode {
 		d.fail(n, path, "a list is wanted here", kindOf(n), "entries that begin with a dash")

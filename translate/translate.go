@@ -48,7 +48,7 @@ func (b *builder) chains() {
 // translated reports whether a control becomes part of the program.
 func translated(c *survey.Control) bool {
 	switching := c.Action.V == survey.BreaksOnRise || c.Action.V == survey.MakesOnRise
-	return switching && c.Plan.V == survey.Replace && c.BreaksAt.Set && c.MakesAt.Set && c.Want.V != "pid" && c.Want.V != "proportional" && !c.Dial.Set && !c.Anticipator.Rise.Set
+	return switching && c.Plan.V == survey.Replace && c.BreaksAt.Set && c.MakesAt.Set
 }
 
 // refuse names every part that is to be replaced or watched by the program and
@@ -63,15 +63,8 @@ func (b *builder) refuse() {
 }
 
 func whyNot(c *survey.Control) string {
-	switch {
-	case c.Plan.V == survey.Monitor:
+	if c.Plan.V == survey.Monitor {
 		return "watching a part that stays is not translated"
-	case c.Want.V == "pid" || c.Want.V == "proportional":
-		return "a continuous control (" + c.Want.V + ") is not translated"
-	case c.Dial.Set:
-		return "a dial that the user keeps is not translated"
-	case c.Anticipator.Rise.Set:
-		return "a control with an anticipator is not translated"
 	}
 	switch c.Action.V {
 	case survey.ClosesOnRise, survey.OpensOnRise:
