@@ -18,6 +18,7 @@ func (b *builder) figures() {
 		b.overshoot(c)
 	}
 	b.margins()
+	b.cycles()
 }
 
 // asked lists what the sheet asks for, whether the part is replaced or stays.

@@ -132,5 +132,11 @@ func (b *builder) slowest(k *Contact, pr survey.Process) (effect, bool) {
 	return e, true
 }
 
-// drives reports whether a load is one that moves the temperature of the process.
-func drives(s *survey.Survey, load string) bool { return s.Process.DrivenBy.Has(load) }
+// drives reports whether a load is one that moves the temperature of the
+// process: one that driven_by names, or the only load there is.
+func drives(s *survey.Survey, load string) bool {
+	if len(s.Process.DrivenBy) == 0 {
+		return len(s.Loads) == 1 && s.Loads[0].ID.V == load
+	}
+	return s.Process.DrivenBy.Has(load)
+}

@@ -1,0 +1,135 @@
+package translate
+
+import (
+	"errors"
+	"fmt"
+
+	"makebreak/survey"
+	"makebreak/translate/switching"
+	"makebreak/translate/thermal"
+)
+
+// cycles works out how each operating control on the process cycles, old and
+// new, and what that means for the contact that it drives.
+func (b *builder) cycles() {
+	for _, c := range b.survey.Controls {
+		if c.Duty.V == survey.Operating && c.Switching() && c.BreaksAt.Set && c.MakesAt.Set && c.Reset.V == survey.ResetAutomatic {
+			b.cycle(c)
+		}
+	}
+}
+
+// cycle works out one control's cycle, where its load drives the process and
+// the process is on the sheet.
+func (b *builder) cycle(c *survey.Control) {
+	l := b.driven(c)
+	if l == nil {
+		return
+	}
+	pr := b.survey.Process
+	if !pr.SettlesOn.Set || !pr.SettlesOff.Set || !pr.TimeConstant.Set {
+		b.openCycle(c, l, "not determined: settles_on, settles_off and time_constant of the process are not all on the sheet")
+		return
+	}
+	p := thermal.Process{On: pr.SettlesOn.V, Off: pr.SettlesOff.V, Tau: pr.TimeConstant.V, Dead: pr.DeadTime.V}
+	if lag, from, ok := b.elementLag(c); ok {
+		b.cycleFigures(c, "old_", p, thermal.Switch{OnAt: c.MakesAt.V, OffAt: c.BreaksAt.V, Lag: lag}, from)
+	}
+	t, ok := b.spec.Thresholds[c.ID.V]
+	if !ok {
+		return
+	}
+	s := b.sensor(c.Sensor.V)
+	cycle, err := b.cycleFigures(c, "", p, thermal.Switch{OnAt: t.Make.SwitchesAt, OffAt: t.Break.SwitchesAt, Lag: s.Lag.V}, s.Lag.Path)
+	if err != nil {
+		b.openContact(l, "not determined: "+err.Error())
+		return
+	}
+	b.contactLife(c, l, cycle)
+}
+
+// driven is the load of the process that a control runs.
+func (b *builder) driven(c *survey.Control) *survey.Load {
+	for _, l := range b.survey.Loads {
+		if !drives(b.survey, l.ID.V) {
+			continue
+		}
+		for _, n := range l.RunsWhen.V.Tree.Names() {
+			if n == c.ID.V {
+				return l
+			}
+		}
+	}
+	return nil
+}
+
+// cycleFigures notes on and off times, high, low and mean of the medium.
+func (b *builder) cycleFigures(c *survey.Control, prefix string, p thermal.Process, s thermal.Switch, lagFrom string) (thermal.Cycle, error) {
+	fs := &b.spec.Figures
+	working := fmt.Sprintf("steady cycle of a first-order process with dead time: settles at %s and %s, time constant %s, dead time %s; switches at %s and %s, lag %s (%s)",
+		Degrees(p.On), Degrees(p.Off), Span(p.Tau), Span(p.Dead), Degrees(s.OnAt), Degrees(s.OffAt), Span(s.Lag), describe(lagFrom, "none stated"))
+	cycle, err := thermal.Steady(p, s)
+	if err != nil {
+		why := err
+		var none thermal.ErrNoCycle
+		if errors.As(err, &none) {
+			why = none
+		}
+		for _, n := range []string{"on_s", "off_s", "high", "low", "mean"} {
+			fs.open(c.ID.V, prefix+n, "", "process", "not determined: "+why.Error())
+		}
+		return cycle, err
+	}
+	fs.add(c.ID.V, prefix+"on_s", cycle.On, "s", "process", working)
+	fs.add(c.ID.V, prefix+"off_s", cycle.Off, "s", "process", working)
+	fs.add(c.ID.V, prefix+"high", cycle.High, "degC", "process", working)
+	fs.add(c.ID.V, prefix+"low", cycle.Low, "degC", "process", working)
+	fs.add(c.ID.V, prefix+"mean", cycle.Mean, "degC", "process", working)
+	return cycle, nil
+}
+
+func (b *builder) openCycle(c *survey.Control, l *survey.Load, reason string) {
+	for _, n := range []string{"high", "low"} {
+		b.spec.Figures.open(c.ID.V, n, "degC", "process", reason)
+	}
+	b.openContact(l, reason)
+}
+
+func (b *builder) openContact(l *survey.Load, reason string) {
+	b.spec.Figures.open(l.ID.V, "operations_per_year", "1/year", "process", reason)
+	b.spec.Figures.open(l.ID.V, "years_to_endurance", "years", "process", reason)
+	b.spec.Figures.open(l.ID.V, "mttfd", "years", "process", reason)
+}
+
+// contactLife works out how long the new output's contact lives on a cycle.
+// Minimum times can only make the cycle longer, so the figure is not too good.
+func (b *builder) contactLife(c *survey.Control, l *survey.Load, cycle thermal.Cycle) {
+	fs := &b.spec.Figures
+	note := func(name string, r switching.Result, from string) {
+		if r.Determined {
+			fs.add(l.ID.V, name, r.Value, r.Unit, from, r.Working)
+			return
+		}
+		fs.open(l.ID.V, name, r.Unit, from, r.Working)
+	}
+	year := switching.OperationsPerYear(cycle.Period(), 1)
+	note("operations_per_year", year, "process")
+	o := output(b.survey, l.ID.V)
+	if o == nil || o.Kind.V != "relay" {
+		return // nothing wears in a semiconductor by switching
+	}
+	kind := l.SupplyIs.V
+	life := switching.Life(known(o.Endurance), known(o.RatedCurrent), known(l.Current), known(o.MechanicalLife), kind)
+	note("years_to_endurance", switching.Years(life, year), o.Endurance.Path)
+	mttfd, t10d := switching.MTTFd(known(o.B10d), year)
+	note("mttfd", mttfd, o.B10d.Path)
+	note("t10d", t10d, o.B10d.Path)
+}
+
+// known is a value, or zero where the sheet does not give it.
+func known(f survey.Field[float64]) float64 {
+	if !f.Set {
+		return 0
+	}
+	return f.V
+}
