@@ -47,13 +47,13 @@ func BenchmarkStages(b *testing.B) {
 		{"translate", func() error { translate.Translate(s); return nil }},
 		{"faults", func() error { faults.Assess(spec); return nil }},
 		{"risks", func() error {
-			v, err := risk.NewView(s, computed(spec))
+			v, err := risk.NewView(s, w.computed())
 			if err == nil {
 				_, err = rules.Assess(v)
 			}
 			return err
 		}},
-		{"tour", func() error { prove.Visit(spec.Program, prove.Budget{}); return nil }},
+		{"tour", func() error { prove.Visit(spec.Program, prove.Budget{Steps: tourSteps}); return nil }},
 		{"pack", func() error { _, err := codegen.Pack(job); return err }},
 		{"all-in-memory", func() error {
 			w, err := o.assess(sheet, io.Discard)

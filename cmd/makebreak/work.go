@@ -40,6 +40,7 @@ type work struct {
 	spec      *translate.Specification
 	risks     *risk.Assessment
 	functions []faults.Row
+	tour      prove.Tour // through the program, where there is one
 }
 
 // readSheet loads a sheet; everything that is wrong with it has been said.
@@ -108,7 +109,10 @@ func (o *options) assess(file string, errw io.Writer) (*work, error) {
 		return nil, err
 	}
 	w := &work{spec: spec, functions: faults.Assess(spec)}
-	view, err := risk.NewView(spec.Survey, computed(spec))
+	if spec.Program != nil {
+		w.tour = prove.Visit(spec.Program, prove.Budget{Steps: tourSteps})
+	}
+	view, err := risk.NewView(spec.Survey, w.computed())
 	if err == nil {
 		w.risks, err = rules.Assess(view)
 	}
@@ -134,14 +138,24 @@ func (o *options) loadRules(errw io.Writer) (*risk.Rules, error) {
 	return rules, say(diags, errw)
 }
 
-// computed hands the figures of a specification to the rules.
-func computed(spec *translate.Specification) risk.Computed {
+// computed hands the figures of a specification to the rules, and whether the
+// program was found to break a property that must hold.
+func (w *work) computed() risk.Computed {
+	spec := w.spec
 	c := risk.Computed{Figures: map[risk.Key]risk.Figure{}, NotTranslated: map[string]string{}}
 	for _, f := range spec.Figures {
 		c.Figures[risk.Key{About: f.About, Name: f.Name}] = risk.Figure{Value: f.Value, Reason: f.Working}
 	}
 	for _, r := range spec.Refused {
 		c.NotTranslated[r.About] = r.Why
+	}
+	if spec.Program != nil {
+		broken, why := 0.0, "not broken by any of the recorded inputs"
+		if w.tour.Broken != nil {
+			p := w.tour.Broken.Property
+			broken, why = 1, fmt.Sprintf("The program was brought to break %s: %s.", p.Name, p.Why)
+		}
+		c.Figures[risk.Key{About: spec.Survey.Equipment.ID.V, Name: "must_broken"}] = risk.Figure{Value: &broken, Reason: why}
 	}
 	return c
 }
@@ -151,11 +165,7 @@ func computed(spec *translate.Specification) risk.Computed {
 const tourSteps = 80_000
 
 func (w *work) job() codegen.Job {
-	j := codegen.Job{Spec: w.spec, Risks: w.risks, Functions: w.functions}
-	if w.spec.Program != nil && !w.risks.Stopped() {
-		j.Tour = prove.Visit(w.spec.Program, prove.Budget{Steps: tourSteps})
-	}
-	return j
+	return codegen.Job{Spec: w.spec, Risks: w.risks, Functions: w.functions, Tour: w.tour}
 }
 
 func (w *work) writePack(dir string) error {
