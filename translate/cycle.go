@@ -104,14 +104,7 @@ func (b *builder) openContact(l *survey.Load, reason string) {
 // contactLife works out how long the new output's contact lives on a cycle.
 // Minimum times can only make the cycle longer, so the figure is not too good.
 func (b *builder) contactLife(c *survey.Control, l *survey.Load, cycle thermal.Cycle) {
-	fs := &b.spec.Figures
-	note := func(name string, r switching.Result, from string) {
-		if r.Determined {
-			fs.add(l.ID.V, name, r.Value, r.Unit, from, r.Working)
-			return
-		}
-		fs.open(l.ID.V, name, r.Unit, from, r.Working)
-	}
+	note := func(name string, r switching.Result, from string) { b.result(l.ID.V, name, r, from) }
 	year := switching.OperationsPerYear(cycle.Period(), 1)
 	note("operations_per_year", year, "process")
 	o := output(b.survey, l.ID.V)
@@ -124,6 +117,37 @@ func (b *builder) contactLife(c *survey.Control, l *survey.Load, cycle thermal.C
 	mttfd, t10d := switching.MTTFd(known(o.B10d), year)
 	note("mttfd", mttfd, o.B10d.Path)
 	note("t10d", t10d, o.B10d.Path)
+}
+
+// result notes what package switching worked out.
+func (b *builder) result(about, name string, r switching.Result, from string) {
+	if r.Determined {
+		b.spec.Figures.add(about, name, r.Value, r.Unit, from, r.Working)
+		return
+	}
+	b.spec.Figures.open(about, name, r.Unit, from, r.Working)
+}
+
+// outputs works out what each output stage has to stand besides switching.
+func (b *builder) outputs() {
+	for _, l := range b.survey.Loads {
+		o := output(b.survey, l.ID.V)
+		if o == nil {
+			continue
+		}
+		multiple, source := 0.0, ""
+		if k, ok := b.spec.Catalogue.Load(string(l.Kind.V)); ok {
+			multiple, source = k.Inrush.Usual, k.Inrush.Source.String()
+		}
+		b.result(l.ID.V, "inrush", switching.Inrush(known(l.Inrush), known(l.Current), multiple, source), l.Inrush.Path)
+		if o.Kind.V == "ssr" || o.Kind.V == "triac" {
+			heat := switching.Heat(known(o.OnDrop), known(l.Current))
+			b.result(l.ID.V, "heat", heat, o.OnDrop.Path)
+			if box := b.survey.Equipment.Enclosure.Temperature; box.Set {
+				b.result(l.ID.V, "hottest", switching.Hottest(heat, known(o.ThermalRes), box.V[1]), o.ThermalRes.Path)
+			}
+		}
+	}
 }
 
 // known is a value, or zero where the sheet does not give it.

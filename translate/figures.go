@@ -2,6 +2,7 @@ package translate
 
 import (
 	"fmt"
+	"math"
 	"strings"
 
 	"makebreak/survey"
@@ -19,6 +20,7 @@ func (b *builder) figures() {
 	}
 	b.margins()
 	b.cycles()
+	b.outputs()
 }
 
 // asked lists what the sheet asks for, whether the part is replaced or stays.
@@ -47,6 +49,20 @@ func (b *builder) switching(c *survey.Control, chain *sensing.Chain) {
 	b.spec.Thresholds[c.ID.V] = t
 	b.edgeFigures(c, "make", c.MakesAt, t.Make, t.Why)
 	b.edgeFigures(c, "break", c.BreaksAt, t.Break, t.Why)
+	b.advise(c, chain)
+}
+
+// advise says which divider and which converter would suit the break best, for
+// comparison with what is there.
+func (b *builder) advise(c *survey.Control, chain *sensing.Chain) {
+	fs, at := &b.spec.Figures, c.BreaksAt
+	differential := math.Abs(c.BreaksAt.V - c.MakesAt.V)
+	if ohm, ok := chain.BestPull(at.V); ok {
+		fs.add(c.ID.V, "divider_advised", ohm, "ohm", at.Path, fmt.Sprintf("nearest of the E96 series to the sensor's own resistance at %s, which gives the finest count there; one count is %.3g K as it stands", Degrees(at.V), chain.CountWidth(at.V)))
+	}
+	if bits, ok := chain.FewestBits(at.V, differential); ok {
+		fs.add(c.ID.V, "bits_needed", float64(bits), "bits", at.Path, fmt.Sprintf("fewest that keep one count within a tenth of %s with this front end (common practice); the converter has %d", Kelvins(differential), b.survey.Electronics.ADC.Bits.V))
+	}
 }
 
 func (b *builder) edgeFigures(c *survey.Control, name string, asked survey.Field[float64], h sensing.Threshold, why string) {
