@@ -19,7 +19,8 @@ const (
 // be held in: trip-free by construction. Only the edge of the button counts,
 // and only once the temperature is beyond the reset threshold with a good
 // probe. The trip survives a power cut; without a good record it comes up
-// tripped, and so it does where the temperature has not come back beyond the
+// tripped (a probe that has not proved itself yet has no median to trip by,
+// but keeps the contact open all the same), and so it does where the temperature has not come back beyond the
 // reset threshold when the supply returns.
 func (b *builder) latch(c *survey.Control, p *Probe) *Contact {
 	k := &Contact{Control: c, Probe: p, Acts: acts(b.survey, c.ID.V), Latches: true}
@@ -50,7 +51,7 @@ func (b *builder) latch(c *survey.Control, p *Probe) *Contact {
 		At: []*logic.State{
 			{Is: latchTripped, Goes: back},
 			{Is: latchClosed, Goes: []*logic.Transition{
-				{To: latchTripped, When: trip.reached(p), Why: "temperature has reached the trip"},
+				{To: latchTripped, When: logic.And(logic.Not(logic.Is(p.State, probeProving)), trip.reached(p)), Why: "temperature has reached the trip"},
 				{To: latchTripped, When: logic.Is(p.State, probeFaulty), Why: "the probe is not to be believed"},
 				{To: latchTripped, When: logic.And(p.good(), logic.Not(logic.Prev(proven)), logic.Not(rearm.reached(p))),
 					Why: "the supply returned with the temperature not back beyond the reset threshold"},

@@ -136,7 +136,7 @@ func (b *builder) median(id, what string, p *Probe) *logic.Var {
 	good := logic.Not(logic.Use(p.Bad))
 	b.add(
 		&logic.Set{Var: before, When: good, To: logic.Prev(last)},
-		&logic.Set{Var: last, When: good, To: logic.Use(now)},
+		&logic.Set{Var: last, To: logic.Use(now)}, // for a bad sample it is the last one already
 	)
 	return value
 }

@@ -120,6 +120,7 @@ func (b *builder) program() {
 	if b.diags.HasErrors() || len(b.plan.Loads) == 0 {
 		return
 	}
+	b.prune()
 	checked, err := logic.Check(b.prog)
 	if err != nil {
 		b.fail(b.survey.Equipment.Source, "no sound program comes out of this sheet", err.Error(), "see the figures named")
@@ -127,6 +128,40 @@ func (b *builder) program() {
 	}
 	b.spec.Program, b.spec.Plan = checked, b.plan
 	b.comesUp()
+}
+
+// prune takes out what was worked out for a step and is read by nothing, such
+// as the contact of a control that stands in no line.
+func (b *builder) prune() {
+	for {
+		read := map[*logic.Var]bool{}
+		note := func(e *logic.Expr) {
+			e.Walk(func(n *logic.Expr) {
+				if n.Var != nil {
+					read[n.Var] = true
+				}
+			})
+		}
+		for _, block := range b.prog.Order {
+			logic.Expressions(block, note)
+		}
+		for _, p := range b.prog.Never {
+			note(p.Bad)
+		}
+		for _, out := range b.prog.Outputs {
+			read[out] = true
+		}
+		var kept []logic.Block
+		for _, block := range b.prog.Order {
+			if d, ok := block.(*logic.Define); !ok || read[d.Var] {
+				kept = append(kept, block)
+			}
+		}
+		if len(kept) == len(b.prog.Order) {
+			return
+		}
+		b.prog.Order = kept
+	}
 }
 
 // probes builds the sensors that the program needs.

@@ -236,6 +236,7 @@ func (a *assembler) extend(from []int64, way []leg) {
 			d.legs = append(d.legs, leg{l.inputs, l.steps - cut})
 		}
 	}
+	a.here() // what follows is no start any more
 }
 
 // returns adds a sequence for each remembered start, long enough for what was

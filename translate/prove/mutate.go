@@ -43,8 +43,11 @@ func (m *mutator) add(p *logic.Program, format string, args ...any) {
 
 // constants makes each named number one more and one less, wherever it is used.
 func (m *mutator) constants() {
-	divisors := divisors(m.p)
+	divisors, used := divisors(m.p), used(m.p)
 	for i, c := range m.p.Consts {
+		if !used[c] {
+			continue // it says where another number came from
+		}
 		for _, d := range []int64{-1, 1} {
 			if c.Value+d == 0 && divisors[c] {
 				continue
@@ -58,6 +61,27 @@ func (m *mutator) constants() {
 			m.add(&q, "%s %d instead of %d", c.Name, other.Value, c.Value)
 		}
 	}
+}
+
+// used lists the constants that a step reads.
+func used(p *logic.Program) map[*logic.Const]bool {
+	found := map[*logic.Const]bool{}
+	for _, b := range p.Order {
+		switch b := b.(type) {
+		case *logic.Timer:
+			found[b.Limit] = true
+		case *logic.Machine:
+			found[b.Limit] = true
+		}
+		logic.Expressions(b, func(e *logic.Expr) {
+			e.Walk(func(n *logic.Expr) {
+				if n.Op == logic.OpConst {
+					found[n.Const] = true
+				}
+			})
+		})
+	}
+	return found
 }
 
 // divisors lists the constants that something is divided by.

@@ -152,13 +152,18 @@ func (r *ruleReader) rule(node *yaml.Node, path string) *Rule {
 	return rule
 }
 
-// keys finds the values of a rule by key and reports the keys that no rule has.
+// keys finds the values of a rule by key and reports the keys that no rule has
+// and those that stand there twice.
 func (r *ruleReader) keys(node *yaml.Node, path string) map[string]*yaml.Node {
 	keys := map[string]*yaml.Node{}
 	for i := 0; i+1 < len(node.Content); i += 2 {
 		key, value := node.Content[i], node.Content[i+1]
 		if _, ok := ruleKeys[key.Value]; !ok {
 			r.at(key, path, "no key of a rule", key.Value, strings.Join(sortedKeys(ruleKeys), ", "))
+			continue
+		}
+		if keys[key.Value] != nil {
+			r.at(key, path+"."+key.Value, "the key stands there twice", key.Value, "once")
 			continue
 		}
 		if key.Value != "waits_for" && value.Kind != yaml.ScalarNode {

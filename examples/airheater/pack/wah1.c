@@ -378,9 +378,7 @@ void wah1_step(struct wah1 *m, const struct wah1_in *in, struct wah1_out *out)
     if (!exchanger_probe_bad) {
         m->exchanger_probe_before = m->exchanger_probe_last;
     }
-    if (!exchanger_probe_bad) {
-        m->exchanger_probe_last = exchanger_probe_now;
-    }
+    m->exchanger_probe_last = exchanger_probe_now;
     wah1_fan_disc(m, exchanger_probe_counts);
     fan_disc_contact = m->fan_disc == WAH1_FAN_DISC_MADE;
     wah1_exchanger_stat(m, exchanger_probe_counts);

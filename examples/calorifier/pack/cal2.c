@@ -287,9 +287,7 @@ void cal2_step(struct cal2 *m, const struct cal2_in *in, struct cal2_out *out)
     if (!tank_probe_bad) {
         m->tank_probe_before = m->tank_probe_last;
     }
-    if (!tank_probe_bad) {
-        m->tank_probe_last = tank_probe_now;
-    }
+    m->tank_probe_last = tank_probe_now;
     cal2_tank_stat(m, tank_probe_counts);
     tank_stat_contact = m->tank_stat == CAL2_TANK_STAT_MADE;
     heater_wanted = tank_stat_contact && in->flow_proven;

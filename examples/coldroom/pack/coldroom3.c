@@ -506,9 +506,7 @@ void coldroom3_step(struct coldroom3 *m, const struct coldroom3_in *in, struct c
     if (!room_probe_bad) {
         m->room_probe_before = m->room_probe_last;
     }
-    if (!room_probe_bad) {
-        m->room_probe_last = room_probe_now;
-    }
+    m->room_probe_last = room_probe_now;
     coil_probe_bad = (in->coil_probe < COLDROOM3_COIL_PROBE_LOWEST) ||
         (in->coil_probe > COLDROOM3_COIL_PROBE_HIGHEST);
     if (coil_probe_bad) {
@@ -529,9 +527,7 @@ void coldroom3_step(struct coldroom3 *m, const struct coldroom3_in *in, struct c
     if (!coil_probe_bad) {
         m->coil_probe_before = m->coil_probe_last;
     }
-    if (!coil_probe_bad) {
-        m->coil_probe_last = coil_probe_now;
-    }
+    m->coil_probe_last = coil_probe_now;
     coldroom3_room_stat(m, room_probe_counts);
     room_stat_contact = m->room_stat == COLDROOM3_ROOM_STAT_MADE;
     coldroom3_warm_stat(m, room_probe_counts);

@@ -271,9 +271,7 @@ void frost7_step(struct frost7 *m, const struct frost7_in *in, struct frost7_out
     if (!line_probe_bad) {
         m->line_probe_before = m->line_probe_last;
     }
-    if (!line_probe_bad) {
-        m->line_probe_last = line_probe_now;
-    }
+    m->line_probe_last = line_probe_now;
     frost7_line_stat(m, line_probe_counts);
     line_stat_contact = m->line_stat == FROST7_LINE_STAT_MADE;
     tape_wanted = line_stat_contact;

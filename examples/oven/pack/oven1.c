@@ -271,9 +271,7 @@ void oven1_step(struct oven1 *m, const struct oven1_in *in, struct oven1_out *ou
     if (!chamber_probe_bad) {
         m->chamber_probe_before = m->chamber_probe_last;
     }
-    if (!chamber_probe_bad) {
-        m->chamber_probe_last = chamber_probe_now;
-    }
+    m->chamber_probe_last = chamber_probe_now;
     oven1_chamber_stat(m, chamber_probe_counts);
     chamber_stat_contact = m->chamber_stat == OVEN1_CHAMBER_STAT_MADE;
     elements_wanted = chamber_stat_contact && in->door_shut;
