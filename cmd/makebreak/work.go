@@ -108,10 +108,14 @@ func (o *options) assess(file string, errw io.Writer) (*work, error) {
 	if err != nil {
 		return nil, err
 	}
-	w := &work{spec: spec, functions: faults.Assess(spec)}
+	w := &work{spec: spec}
+	// The two long walks through the program only read it; they go side by side.
+	functions := make(chan []faults.Row)
+	go func() { functions <- faults.Assess(spec) }()
 	if spec.Program != nil {
 		w.tour = prove.Visit(spec.Program, prove.Budget{Steps: tourSteps})
 	}
+	w.functions = <-functions
 	view, err := risk.NewView(spec.Survey, w.computed())
 	if err == nil {
 		w.risks, err = rules.Assess(view)

@@ -67,6 +67,7 @@ type compiler struct {
 	consts map[int64]int32
 	next   int32
 	probes bool
+	placed map[*Expr]int32 // within a decision: where each node's value already is
 }
 
 func (c *Checked) compile(probes, properties bool) *compiled {
@@ -157,6 +158,14 @@ var exprCode = map[Op]code{
 
 // expr emits what works an expression out and says where its value will be.
 func (k *compiler) expr(e *Expr) int32 {
+	at := k.emitExpr(e)
+	if k.placed != nil {
+		k.placed[e] = at
+	}
+	return at
+}
+
+func (k *compiler) emitExpr(e *Expr) int32 {
 	switch e.Op {
 	case OpLit:
 		return k.consts[e.Value]
@@ -193,23 +202,24 @@ func (k *compiler) expr(e *Expr) int32 {
 
 // decide is expr for a truth value that is a decision of the program.
 func (k *compiler) decide(block int, e *Expr) int32 {
-	d := k.expr(e)
 	if !k.probes {
-		return d
+		return k.expr(e)
 	}
-	dec := &Decision{Block: block, Of: e, slot: d}
+	k.placed = map[*Expr]int32{}
+	dec := &Decision{Block: block, Of: e, slot: k.expr(e)}
 	atoms(e, func(a *Expr) {
 		dec.Atoms = append(dec.Atoms, a)
-		dec.atoms = append(dec.atoms, k.expr(a))
+		dec.atoms = append(dec.atoms, k.placed[a])
 		sides := [2]int32{-1, -1}
 		if a.Op.IsCompare() && a.Args[0].Kind == Int {
-			sides = [2]int32{k.expr(a.Args[0]), k.expr(a.Args[1])}
+			sides = [2]int32{k.placed[a.Args[0]], k.placed[a.Args[1]]}
 		}
 		dec.sides = append(dec.sides, sides)
 	})
+	k.placed = nil
 	k.emit(instruction{op: cProbe, c: int32(len(k.out.decisions))})
 	k.out.decisions = append(k.out.decisions, dec)
-	return d
+	return dec.slot
 }
 
 // atoms calls f for each term that a condition is made of.
