@@ -24,6 +24,8 @@ type File struct {
 	Data []byte
 	// Yours: written once to start from, then the user's; never overwritten.
 	Yours bool
+	// Withheld: must not be in the folder, because a stop is open.
+	Withheld bool
 }
 
 // Job is everything that a pack is made of.
@@ -39,7 +41,7 @@ func C(j Job) []File {
 	if j.Spec.Program == nil || j.Risks.Stopped() {
 		return nil
 	}
-	src := csource.Source{Program: j.Spec.Program, Facts: Facts(j.Spec, sheets.Cautions)}
+	src := csource.Source{Program: j.Spec.Program, Facts: Facts(j.Spec, sheets.CautionsFor(j.Risks))}
 	id := j.Spec.Program.ID
 	return []File{
 		{Name: id + ".h", Data: []byte(src.Header())},
@@ -73,6 +75,27 @@ func missed(t prove.Tour) []string {
 	return all
 }
 
+// OnlyC gives the files of C with a list of them, so that a later run knows
+// which of them are still as they were written; none where C gives none.
+func OnlyC(j Job) ([]File, error) {
+	files := C(j)
+	if len(files) == 0 {
+		return nil, nil
+	}
+	m, err := manifest(j.Spec.Survey.Hash, files)
+	return append(files, File{Name: ManifestName, Data: m}), err
+}
+
+// withheld names the files of C that must not be left over from an earlier
+// run. The user's own is not among them.
+func withheld(id string) []File {
+	var files []File
+	for _, end := range []string{".h", ".c", "_port.h", "_check.c"} {
+		files = append(files, File{Name: id + end, Withheld: true})
+	}
+	return files
+}
+
 // Pack gives every file of a pack. Its manifest comes last.
 func Pack(j Job) ([]File, error) {
 	spec, err := sheets.Specification(j.Spec, j.Risks, j.Functions)
@@ -80,11 +103,14 @@ func Pack(j Job) ([]File, error) {
 		return nil, err
 	}
 	files := C(j)
+	if len(files) == 0 {
+		files = withheld(j.Spec.Survey.Equipment.ID.V)
+	}
 	files = append(files,
 		File{Name: "risks.csv", Data: []byte(sheets.CSV(sheets.RiskColumns, sheets.RiskRows(j.Risks.Findings)))},
-		File{Name: "risks.md", Data: []byte(sheets.Risks(j.Spec.Survey.Equipment.Title.V, j.Risks))},
+		File{Name: riskTable, Data: []byte(sheets.Risks(j.Spec.Survey.Equipment.Title.V, j.Risks))},
 		File{Name: "functions.csv", Data: []byte(sheets.CSV(sheets.FunctionColumns, sheets.FunctionRows(j.Functions)))},
-		File{Name: "commissioning.md", Data: []byte(sheets.Commissioning(j.Spec))},
+		File{Name: "commissioning.md", Data: []byte(sheets.Commissioning(j.Spec, j.Risks))},
 		File{Name: "specification.json", Data: spec},
 	)
 	m, err := manifest(j.Spec.Survey.Hash, files)
@@ -97,6 +123,8 @@ func Pack(j Job) ([]File, error) {
 // ManifestName is the file that lists a pack.
 const ManifestName = "pack.json"
 
+const programName = "makebreak"
+
 // Manifest is pack.json: what a pack was made from and what it holds.
 type Manifest struct {
 	Format  int               `json:"format"`
@@ -108,8 +136,11 @@ type Manifest struct {
 }
 
 func manifest(sheet string, files []File) ([]byte, error) {
-	m := Manifest{Format: 1, Program: "makebreak", Version: Version, Sheet: sheet, Files: map[string]string{}, Yours: []string{}}
+	m := Manifest{Format: 1, Program: programName, Version: Version, Sheet: sheet, Files: map[string]string{}, Yours: []string{}}
 	for _, f := range files {
+		if f.Withheld {
+			continue
+		}
 		if f.Yours {
 			m.Yours = append(m.Yours, f.Name)
 			continue

@@ -1,13 +1,13 @@
 package codegen
 
 import (
-	"encoding/json"
 	"errors"
 	"fmt"
 	"io/fs"
 	"os"
 	"path/filepath"
 	"strings"
+	"syscall"
 )
 
 // Write puts a pack into a folder. Everything is written to a new folder
@@ -16,71 +16,84 @@ import (
 //
 // What the user has in the old folder is carried over: the files of his own,
 // the ones of the pack that are his from the start, and a generated file that
-// he has changed since, under its name with ".yours" behind it. Generated
-// files of the old pack that the new one no longer has are gone: a risk table
-// with a stop must not lie beside yesterday's C.
+// he has changed since, under its name with ".yours" behind it (".yours2" and
+// so on where that is taken). Generated files of the old pack that the new one
+// no longer has are gone: a risk table with a stop must not lie beside
+// yesterday's C.
+//
+// Where the system cannot exchange two folders in one step, the old one is
+// moved aside for a moment; an interruption in that moment leaves it under the
+// name .<folder>.makebreak-old, and the next run brings it back.
+//
+// A link to a folder is followed. An error says what is in the way: the target
+// is a file, a link to nothing, a mounted folder, or not to be written.
 func Write(dir string, files []File) error { return write(disk{}, dir, files) }
-
-// disk is what writing needs of a file system; tests let it fail.
-type disk struct{ fail func(op, path string) error }
-
-func (d disk) check(op, path string) error {
-	if d.fail == nil {
-		return nil
-	}
-	return d.fail(op, path)
-}
 
 const (
 	freshMark = ".makebreak-new-"
 	oldMark   = ".makebreak-old"
 )
 
-func write(d disk, dir string, files []File) (err error) {
-	dir, err = filepath.Abs(dir)
+func write(d disk, dir string, files []File) error {
+	dir, err := target(dir)
 	if err != nil {
 		return err
 	}
-	if real, err := filepath.EvalSymlinks(dir); err == nil {
-		dir = real
-	}
 	parent := filepath.Dir(dir)
-	if err := os.MkdirAll(parent, 0o777); err != nil {
+	if err := d.mkdirAll(parent); err != nil {
 		return err
 	}
-	if err := tidy(dir); err != nil {
+	unlock, err := lock(parent)
+	if err != nil {
+		return err
+	}
+	defer unlock()
+	if err := tidy(d, dir); err != nil {
 		return err
 	}
 	exists, err := folder(dir)
 	if err != nil {
 		return err
 	}
-	if err := d.check("mkdir", parent); err != nil {
+	fresh := beside(dir, fmt.Sprintf("%s%d", freshMark, os.Getpid()))
+	err = fill(d, dir, fresh, files, exists)
+	if err == nil {
+		err = swap(d, fresh, dir, exists)
+	}
+	if err != nil {
+		return errors.Join(err, os.RemoveAll(fresh))
+	}
+	if err := d.syncFolder(parent); err != nil {
 		return err
 	}
-	fresh := filepath.Join(parent, fmt.Sprintf(".%s%s%d", filepath.Base(dir), freshMark, os.Getpid()))
-	if err := os.Mkdir(fresh, 0o777); err != nil {
-		return err
+	// Whatever is beside the folder now is the old pack.
+	if err := errors.Join(d.removeAll(fresh), d.removeAll(beside(dir, oldMark))); err != nil {
+		return fmt.Errorf("the new pack is in its place, but the old one beside it could not be removed: %w", err)
 	}
-	defer func() {
-		if err != nil {
-			os.RemoveAll(fresh)
-		}
-	}()
-	if exists {
-		if files, err = carryOver(d, dir, fresh, files); err != nil {
-			return err
-		}
+	return nil
+}
+
+func beside(dir, mark string) string {
+	return filepath.Join(filepath.Dir(dir), "."+filepath.Base(dir)+mark)
+}
+
+// target gives the folder that a path means, links followed.
+func target(dir string) (string, error) {
+	dir, err := filepath.Abs(dir)
+	if err != nil {
+		return "", err
 	}
-	for _, f := range files {
-		if err := writeFile(d, filepath.Join(fresh, f.Name), f.Data); err != nil {
-			return err
-		}
+	if filepath.Dir(dir) == dir {
+		return "", fmt.Errorf("%s is the root of the file system; a folder below it is needed for the pack", dir)
 	}
-	if err := syncFolder(d, fresh); err != nil {
-		return err
+	real, err := filepath.EvalSymlinks(dir)
+	if err == nil {
+		return real, nil
 	}
-	return swap(d, fresh, dir, exists)
+	if info, missing := os.Lstat(dir); missing == nil && info.Mode()&fs.ModeSymlink != 0 {
+		return "", fmt.Errorf("%s is a link that leads nowhere (%w): remove it, or make the folder that it names", dir, err)
+	}
+	return dir, nil
 }
 
 // folder reports whether the target is there, and refuses what is no folder.
@@ -99,188 +112,93 @@ func folder(dir string) (bool, error) {
 // tidy ends what a run that was killed left behind: an old pack that was moved
 // aside goes back where the new one had not taken its place, and half a new
 // one goes away.
-func tidy(dir string) error {
-	aside := filepath.Join(filepath.Dir(dir), "."+filepath.Base(dir)+oldMark)
-	if _, err := os.Stat(aside); err == nil {
-		mend := func() error { return os.RemoveAll(aside) }
-		if _, err := os.Stat(dir); errors.Is(err, fs.ErrNotExist) {
-			mend = func() error { return os.Rename(aside, dir) }
-		}
-		if err := mend(); err != nil {
+func tidy(d disk, dir string) error {
+	aside := beside(dir, oldMark)
+	if _, err := os.Lstat(aside); err == nil {
+		if _, err := os.Lstat(dir); errors.Is(err, fs.ErrNotExist) {
+			err = d.rename(aside, dir)
+			if err != nil {
+				return err
+			}
+		} else if err := d.removeAll(aside); err != nil {
 			return err
 		}
 	}
-	left, err := filepath.Glob(filepath.Join(filepath.Dir(dir), "."+globSafe(filepath.Base(dir))+freshMark+"*"))
+	entries, err := os.ReadDir(filepath.Dir(dir))
 	if err != nil {
 		return err
 	}
-	for _, l := range left {
-		if err := os.RemoveAll(l); err != nil {
-			return err
+	for _, e := range entries {
+		if strings.HasPrefix(e.Name(), filepath.Base(beside(dir, freshMark))) {
+			if err := d.removeAll(filepath.Join(filepath.Dir(dir), e.Name())); err != nil {
+				return err
+			}
 		}
 	}
 	return nil
 }
 
-func globSafe(name string) string {
-	return strings.NewReplacer(`\`, `\\`, "*", `\*`, "?", `\?`, "[", `\[`).Replace(name)
-}
-
-// carryOver links or copies the user's files into the new folder, and gives
-// the files of the pack that are still to be written.
-func carryOver(d disk, old, fresh string, files []File) ([]File, error) {
-	was := readManifest(old)
-	generated := map[string]bool{}
-	for _, f := range files {
-		generated[f.Name] = true
-	}
-	entries, err := os.ReadDir(old)
-	if err != nil {
-		return nil, err
-	}
-	kept := map[string]bool{}
-	for _, e := range entries {
-		name := e.Name()
-		if name == ManifestName && was != nil {
-			continue
-		}
-		from, to := filepath.Join(old, name), name
-		if was != nil && was.Files[name] != "" {
-			data, err := os.ReadFile(from)
-			if err != nil {
-				return nil, err
-			}
-			if digest(data) == was.Files[name] {
-				continue // generated and untouched: the new pack's business
-			}
-			to = name + ".yours"
-		} else if generated[name] && !yours(files, name) {
-			to = name + ".yours" // not of a pack of ours, but in its place
-		}
-		if err := d.check("carry", from); err != nil {
-			return nil, err
-		}
-		if err := copyTree(from, filepath.Join(fresh, to)); err != nil {
-			return nil, err
-		}
-		kept[to] = true
-	}
-	var rest []File
-	for _, f := range files {
-		if !f.Yours || !kept[f.Name] {
-			rest = append(rest, f)
-		}
-	}
-	return rest, nil
-}
-
-func yours(files []File, name string) bool {
-	for _, f := range files {
-		if f.Name == name {
-			return f.Yours
-		}
-	}
-	return false
-}
-
-func readManifest(dir string) *Manifest {
-	data, err := os.ReadFile(filepath.Join(dir, ManifestName))
-	if err != nil {
-		return nil
-	}
-	var m Manifest
-	if json.Unmarshal(data, &m) != nil || m.Program != "makebreak" {
-		return nil
-	}
-	return &m
-}
-
-// copyTree copies a file, a link or a folder with what is in it.
-func copyTree(from, to string) error {
-	info, err := os.Lstat(from)
-	if err != nil {
+// fill makes the new folder with all that it has to hold, on the disk.
+func fill(d disk, dir, fresh string, files []File, exists bool) error {
+	if err := d.mkdir(fresh, 0o777); err != nil {
 		return err
 	}
-	switch {
-	case info.Mode()&fs.ModeSymlink != 0:
-		target, err := os.Readlink(from)
+	rest := written(files)
+	if exists {
+		var err error
+		if rest, err = carryOver(d, dir, fresh, files); err != nil {
+			return err
+		}
+	}
+	for _, f := range rest {
+		if err := d.write(filepath.Join(fresh, f.Name), f.Data, 0o666); err != nil {
+			return err
+		}
+	}
+	if exists { // as the old folder was
+		info, err := os.Stat(dir)
 		if err != nil {
 			return err
 		}
-		return os.Symlink(target, to)
-	case info.IsDir():
-		if err := os.Mkdir(to, info.Mode().Perm()); err != nil {
+		if err := d.chmod(fresh, info.Mode().Perm()); err != nil {
 			return err
 		}
-		entries, err := os.ReadDir(from)
-		if err != nil {
-			return err
-		}
-		for _, e := range entries {
-			if err := copyTree(filepath.Join(from, e.Name()), filepath.Join(to, e.Name())); err != nil {
-				return err
-			}
-		}
-		return nil
 	}
-	data, err := os.ReadFile(from)
-	if err != nil {
-		return err
-	}
-	if err := writeFile(disk{}, to, data); err != nil {
-		return err
-	}
-	if err := os.Chmod(to, info.Mode().Perm()); err != nil {
-		return err
-	}
-	return os.Chtimes(to, info.ModTime(), info.ModTime())
+	return d.syncFolder(fresh)
 }
 
-func writeFile(d disk, path string, data []byte) error {
-	if err := d.check("write", path); err != nil {
-		return err
+func written(files []File) []File {
+	var all []File
+	for _, f := range files {
+		if !f.Withheld {
+			all = append(all, f)
+		}
 	}
-	f, err := os.OpenFile(path, os.O_WRONLY|os.O_CREATE|os.O_EXCL, 0o666)
-	if err != nil {
-		return err
-	}
-	_, err = f.Write(data)
-	if err == nil {
-		err = f.Sync()
-	}
-	return errors.Join(err, f.Close())
-}
-
-func syncFolder(d disk, dir string) error {
-	if err := d.check("sync", dir); err != nil {
-		return err
-	}
-	f, err := os.Open(dir)
-	if err != nil {
-		return err
-	}
-	return errors.Join(f.Sync(), f.Close())
+	return all
 }
 
 // swap puts the new folder in the place of the old one.
 func swap(d disk, fresh, dir string, exists bool) error {
-	if err := d.check("swap", dir); err != nil {
-		return err
-	}
 	if !exists {
-		return os.Rename(fresh, dir)
+		return d.rename(fresh, dir)
 	}
-	if err := exchange(fresh, dir); err == nil {
-		return os.RemoveAll(fresh) // now the old one
+	if d.exchange(fresh, dir) == nil {
+		return nil
 	}
-	// Where the system cannot exchange two folders in one step, the old one is
-	// moved aside for a moment; tidy brings it back after an interruption.
-	aside := filepath.Join(filepath.Dir(dir), "."+filepath.Base(dir)+oldMark)
-	if err := os.Rename(dir, aside); err != nil {
-		return err
+	aside := beside(dir, oldMark)
+	if err := d.rename(dir, aside); err != nil {
+		return inTheWay(dir, err)
 	}
-	if err := os.Rename(fresh, dir); err != nil {
-		return errors.Join(err, os.Rename(aside, dir))
+	if err := d.rename(fresh, dir); err != nil {
+		return errors.Join(inTheWay(dir, err), os.Rename(aside, dir))
 	}
-	return os.RemoveAll(aside)
+	return nil
+}
+
+// inTheWay adds what helps where a folder is where another disk is mounted.
+func inTheWay(dir string, err error) error {
+	if errors.Is(err, syscall.EBUSY) || errors.Is(err, syscall.EXDEV) {
+		return fmt.Errorf("%w: a mounted folder cannot change places; give a folder inside %s", err, dir)
+	}
+	return err
 }

@@ -2,7 +2,6 @@ package main
 
 import (
 	"bytes"
-	"encoding/json"
 	"fmt"
 	"io"
 	"os"
@@ -12,6 +11,7 @@ import (
 
 	"github.com/clipperhouse/displaywidth"
 	"github.com/olekukonko/tablewriter"
+	"github.com/olekukonko/tablewriter/pkg/twwidth"
 	"github.com/olekukonko/tablewriter/renderer"
 	"github.com/olekukonko/tablewriter/tw"
 	"golang.org/x/term"
@@ -56,10 +56,11 @@ func printJSON(out io.Writer, columns []string, rows [][]string) error {
 		}
 		list = append(list, m)
 	}
-	e := json.NewEncoder(out)
-	e.SetEscapeHTML(false)
-	e.SetIndent("", "  ")
-	return e.Encode(list)
+	data, err := sheets.JSON(list)
+	if err == nil {
+		_, err = out.Write(data)
+	}
+	return err
 }
 
 func printMarkdown(out io.Writer, columns []string, rows [][]string) error {
@@ -133,16 +134,17 @@ func wrapCells(cells []string, widths []int) []string {
 }
 
 // columnWidths shares the room: columns that need little get what they need,
-// the others share the rest equally, and none is narrower than its longest
-// word where that is bearable.
+// the widest give way to the others. Words stay whole where that fits; on a
+// narrow screen long ones are broken, first behind their strokes, then anywhere.
 func columnWidths(columns []string, rows [][]string, room int) []int {
-	const bearable = 32 // the longest id of a finding fits
-	need := make([]int, len(columns))
-	least := make([]int, len(columns))
+	widths, words, pieces := make([]int, len(columns)), make([]int, len(columns)), make([]int, len(columns))
 	look := func(i int, s string) {
-		need[i] = max(need[i], displaywidth.String(s))
+		widths[i] = max(widths[i], twwidth.Width(s))
 		for _, w := range strings.Fields(s) {
-			least[i] = max(least[i], min(displaywidth.String(w), bearable))
+			words[i] = max(words[i], twwidth.Width(w))
+			for _, p := range brokenWord(w) {
+				pieces[i] = max(pieces[i], twwidth.Width(p))
+			}
 		}
 	}
 	for i, c := range columns {
@@ -151,7 +153,14 @@ func columnWidths(columns []string, rows [][]string, room int) []int {
 			look(i, r[i])
 		}
 	}
-	widths := slices.Clone(need)
+	for _, least := range [][]int{words, pieces, slices.Repeat([]int{2}, len(columns))} {
+		narrow(widths, least, room)
+	}
+	return widths
+}
+
+// narrow takes from the widest column until all fit, or none may give more.
+func narrow(widths, least []int, room int) {
 	for total(widths) > room {
 		widest := -1
 		for i := range widths {
@@ -160,11 +169,23 @@ func columnWidths(columns []string, rows [][]string, room int) []int {
 			}
 		}
 		if widest < 0 {
-			break
+			return
 		}
 		widths[widest]--
 	}
-	return widths
+}
+
+// brokenWord gives the pieces into which a long word may be broken: each ends
+// with a stroke.
+func brokenWord(word string) []string {
+	var pieces []string
+	for {
+		i := strings.IndexAny(word, "_/-")
+		if i < 0 || i == len(word)-1 {
+			return append(pieces, word)
+		}
+		pieces, word = append(pieces, word[:i+1]), word[i+1:]
+	}
 }
 
 func total(ns []int) int {
@@ -175,13 +196,13 @@ func total(ns []int) int {
 	return sum
 }
 
-// wrapText breaks a text at blanks; a word that is too long is broken inside.
+// wrapText breaks a text at blanks; a word that is too long is broken.
 func wrapText(s string, width int) []string {
 	width = max(width, 1)
 	var lines []string
 	line := ""
 	for _, word := range strings.Fields(s) {
-		for displaywidth.String(word) > width {
+		for twwidth.Width(word) > width {
 			if line != "" {
 				lines, line = append(lines, line), ""
 			}
@@ -191,7 +212,7 @@ func wrapText(s string, width int) []string {
 		switch {
 		case line == "":
 			line = word
-		case displaywidth.String(line)+1+displaywidth.String(word) <= width:
+		case twwidth.Width(line)+1+twwidth.Width(word) <= width:
 			line += " " + word
 		default:
 			lines, line = append(lines, line), word
@@ -200,12 +221,25 @@ func wrapText(s string, width int) []string {
 	return append(lines, line)
 }
 
-// fitting is how many bytes of a word fit into a width, at least one character.
+// fitting is how many bytes of a word fit into a width, at least one
+// character: up to the last stroke where there is one, to the last character
+// otherwise.
 func fitting(word string, width int) int {
+	whole := 0
+	for _, p := range brokenWord(word) {
+		if twwidth.Width(word[:whole+len(p)]) > width {
+			break
+		}
+		whole += len(p)
+	}
+	if whole > 0 {
+		return whole
+	}
 	end := 0
-	for i, r := range word {
-		next := i + len(string(r))
-		if end > 0 && displaywidth.String(word[:next]) > width {
+	g := displaywidth.StringGraphemes(word)
+	for g.Next() {
+		next := end + len(g.Value())
+		if end > 0 && twwidth.Width(word[:next]) > width {
 			break
 		}
 		end = next

@@ -184,7 +184,10 @@ func (w *work) writePack(dir string) error {
 }
 
 func (w *work) writeC(dir string) error {
-	files := codegen.C(w.job())
+	files, err := codegen.OnlyC(w.job())
+	if err != nil {
+		return exit{exitOutside, err}
+	}
 	if len(files) == 0 {
 		return exit{exitWrong, errors.New("nothing in this sheet becomes a program")}
 	}
@@ -215,8 +218,8 @@ func (w *work) verdict(dir string) string {
 	if dir != "" {
 		fmt.Fprintf(&b, "The pack is in %s.\n", visible(dir))
 	}
-	for _, c := range sheets.Cautions {
-		fmt.Fprintf(&b, "- %s\n", c)
+	for _, c := range sheets.CautionsFor(w.risks) {
+		fmt.Fprintf(&b, "- %s\n", visible(c))
 	}
 	return strings.TrimRight(b.String(), "\n")
 }

@@ -2,11 +2,15 @@ package sheets
 
 import (
 	"fmt"
+	"math"
+	"slices"
 	"strings"
 
 	"makebreak/survey"
 	"makebreak/translate"
 	"makebreak/translate/logic"
+	"makebreak/translate/risk"
+	"makebreak/translate/sensing"
 )
 
 // A check is one row of the commissioning sheet.
@@ -15,29 +19,40 @@ type check struct {
 }
 
 // Commissioning prints commissioning.md: what to test on site, with expected
-// figures and a place for the reading. The limit that stays comes first.
-func Commissioning(spec *translate.Specification) string {
+// figures and a place for the reading. The limit that stays comes first, then
+// isolation, then hardware that is new, then the program. Where a stop is open
+// there is no program to test.
+func Commissioning(spec *translate.Specification, a *risk.Assessment) string {
 	s := spec.Survey
 	var b strings.Builder
 	fmt.Fprintf(&b, "# Commissioning: %s\n\n", Markdown(s.Equipment.Title.V))
 	if s.Equipment.Change.V != "" {
 		fmt.Fprintf(&b, "Change: %s\n\n", Markdown(s.Equipment.Change.V))
 	}
-	cautions(&b)
+	cautions(&b, a)
 	b.WriteString("Readings are written down by the person who took them, with name and date. A row that does not come out stops the work.\n\n")
 	b.WriteString("| no | part | do | expect | reading | by, date |\n|---|---|---|---|---|---|\n")
-	for i, c := range checks(spec) {
+	for i, c := range checks(spec, a) {
 		fmt.Fprintf(&b, "| %d | %s | %s | %s | | |\n", i+1, Markdown(c.part), Markdown(c.do), Markdown(c.expect))
 	}
-	b.WriteString("\nAccepted by (role, name, date): ____________________\n")
+	for _, line := range []string{
+		"Reference thermometer (number, calibrated until)",
+		"Tested by (role, name, date)",
+		"Accepted by (role, name, date)",
+	} {
+		fmt.Fprintf(&b, "\n%s: ____________________\n", line)
+	}
 	return b.String()
 }
 
-func checks(spec *translate.Specification) []check {
-	var cs []check
-	cs = append(cs, hardware(spec.Survey)...)
+func checks(spec *translate.Specification, a *risk.Assessment) []check {
+	cs := stays(spec.Survey)
 	cs = append(cs, check{"isolation", "isolate, lock off, prove dead; then change the parts", "no voltage at the terminals; the lock is on"})
-	if spec.Plan == nil {
+	cs = append(cs, fitted(spec.Survey)...)
+	switch {
+	case a.Stopped():
+		return append(cs, check{"program", "nothing is tested: a stop is open, and the C is withheld", "another design; see risks.md"})
+	case spec.Plan == nil:
 		return append(cs, check{"program", "nothing can be tested: no program came out of the sheet", "see risks.md"})
 	}
 	cs = append(cs, sensors(spec)...)
@@ -46,51 +61,8 @@ func checks(spec *translate.Specification) []check {
 	return append(cs, clocks(spec)...)
 }
 
-// hardware comes before anything is touched: the limits that stay.
-func hardware(s *survey.Survey) []check {
-	var cs []check
-	for _, c := range s.Controls {
-		if c.Plan.V != survey.Keep && c.Plan.V != survey.Add && c.Plan.V != survey.Renew && c.Plan.V != survey.Monitor {
-			continue
-		}
-		when := "before anything is touched: "
-		if c.Plan.V == survey.Add || c.Plan.V == survey.Renew {
-			when = "once fitted, before the program runs: "
-		}
-		edge, word := c.BreaksAt, "warm its element slowly"
-		if c.Action.V == survey.MakesOnRise {
-			word = "cool its element slowly"
-		}
-		expect := fmt.Sprintf("it cuts %s by itself", names(c.Cuts))
-		if edge.Set {
-			expect += fmt.Sprintf(" at %s", degrees(edge.V))
-			if c.Tolerance.Set {
-				expect += fmt.Sprintf(" ± %s", kelvins(c.Tolerance.V))
-			}
-		} else {
-			expect += "; at what temperature is not on the sheet: write it down"
-		}
-		if c.Reset.V == survey.ResetManual {
-			expect += ", and stays so until its button is pressed"
-		}
-		cs = append(cs, check{c.ID.V, when + word + " and watch the load", expect})
-	}
-	if len(cs) == 0 {
-		cs = append(cs, check{"hardware limits", "before anything is touched: look for hardware that limits this plant", "the sheet names none; if there is any, it stays and is proved first"})
-	}
-	return cs
-}
-
-func names(ns survey.Names) string {
-	var parts []string
-	for _, n := range ns {
-		parts = append(parts, n.V)
-	}
-	if len(parts) == 0 {
-		return "its load (the sheet does not say which)"
-	}
-	return strings.Join(parts, " and ")
-}
+// atHand goes before a test that runs a load without its control.
+const atHand = "with the isolator at hand, "
 
 func sensors(spec *translate.Specification) []check {
 	var cs []check
@@ -102,15 +74,32 @@ func sensors(spec *translate.Specification) []check {
 		chain := spec.Chains[x.ID.V]
 		for _, t := range []float64{0, 25, 100} {
 			if count, err := chain.Count(t); err == nil && count > p.Low && count < p.High {
-				cs = append(cs, check{x.ID.V, fmt.Sprintf("put it, or a substitute for it, at %s", degrees(t)), fmt.Sprintf("%d counts", count)})
+				cs = append(cs, check{x.ID.V, fmt.Sprintf("put it, or a substitute for it, at %s", degrees(t)), fmt.Sprintf("%d%s counts", count, spread(chain, t))})
 			}
 		}
-		after, clear := span(x.FaultAfter.V), span(x.ClearAfter.V)
+		clear := span(x.ClearAfter.V)
 		cs = append(cs,
-			check{x.ID.V, "pull one wire off", fmt.Sprintf("fault %s within %s; its loads go to their safe state; they come back no sooner than %s after the wire is on again", x.ID.V, after, clear)},
+			check{x.ID.V, "pull one wire off", fmt.Sprintf("fault %s within %s (%s and two steps); its loads go to their safe state; they come back no sooner than %s after the wire is on again",
+				x.ID.V, span(x.FaultAfter.V+steps(spec, 2)), span(x.FaultAfter.V), clear)},
 			check{x.ID.V, "short it", "the same, unless a short reads inside the range of this sensor: then write down what it reads"})
 	}
 	return cs
+}
+
+// spread is by how many counts a sound chain may differ at a temperature: its
+// worst error over the width of a count, rounded up.
+func spread(chain *sensing.Chain, t float64) string {
+	b, err := chain.Budget(t)
+	width := math.Abs(chain.CountWidth(t))
+	if err != nil || width == 0 || math.IsInf(b.WorstCase/width, 0) || math.IsNaN(b.WorstCase/width) {
+		return ""
+	}
+	return fmt.Sprintf(" ± %.0f", math.Ceil(b.WorstCase/width))
+}
+
+// steps is the time of some steps of the program, in seconds.
+func steps(spec *translate.Specification, n int64) float64 {
+	return float64(n*spec.Program.StepMS) / 1000
 }
 
 func contacts(spec *translate.Specification) []check {
@@ -125,17 +114,27 @@ func contacts(spec *translate.Specification) []check {
 		if c.Action.V == survey.BreaksOnRise {
 			on, off = off, on
 		}
-		expect := func(h string, at float64, counts int64) string {
-			return fmt.Sprintf("%s at %s (%d counts)", h, degrees(at), counts)
+		expect := func(edge, does string, at float64, counts int64) string {
+			return fmt.Sprintf("%s at %s%s (%d counts)", does, degrees(at), budgeted(spec, c.ID.V, edge), counts)
 		}
 		cs = append(cs,
-			check{c.ID.V, off + " the probe slowly, in a bath, beside a reference thermometer", expect("breaks", t.Break.SwitchesAt, t.Break.Counts)},
-			check{c.ID.V, on + " it slowly", expect("makes", t.Make.SwitchesAt, t.Make.Counts)})
+			check{c.ID.V, off + " the probe slowly, in a bath, beside a reference thermometer", expect("break", "breaks", t.Break.SwitchesAt, t.Break.Counts)},
+			check{c.ID.V, on + " it slowly", expect("make", "makes", t.Make.SwitchesAt, t.Make.Counts)})
 		if k.Latches {
 			cs = append(cs, latches(spec, c, k)...)
 		}
 	}
 	return cs
+}
+
+// budgeted is the worst error of the new chain at an edge of a control.
+func budgeted(spec *translate.Specification, control, edge string) string {
+	for _, b := range spec.Budgets {
+		if b.Control == control && b.Edge == edge {
+			return " ± " + kelvins(b.WorstCase)
+		}
+	}
+	return ""
 }
 
 func latches(spec *translate.Specification, c *survey.Control, k *translate.Contact) []check {
@@ -160,19 +159,20 @@ func loads(spec *translate.Specification) []check {
 		}
 		cs = append(cs,
 			check{l.ID.V, "take the supply of the electronics away while it runs", fmt.Sprintf("goes %s, as its wiring rests", l.Rest.V)},
-			check{l.ID.V, "stop the program (hold the processor in reset)", stopped(spec, s)})
+			check{l.ID.V, "give the supply back", fmt.Sprintf("comes up %s; leaves that by itself once its probes are believed and it is called for: nobody may be hurt by that", l.SafeState.V)},
+			check{l.ID.V, atHand + "stop the program (hold the processor in reset)", stopped(spec, s)})
 		for _, g := range spec.Survey.Signals {
-			if uses(l.RunsWhen.V.Tree, g.ID.V) {
+			if slices.Contains(l.RunsWhen.V.Tree.Names(), g.ID.V) {
 				cs = append(cs, check{l.ID.V, "pull the wire of " + g.ID.V + " off while it runs", broken(g, l)})
 			}
 		}
 		cs = append(cs, minimums(spec, l.ID.V)...)
 		if s.Seen != nil {
-			cs = append(cs, check{l.ID.V, "bridge its contact while it is told to be off", "fault " + l.ID.V + "_welded within 1 s; no new start until the supply has been off"})
+			cs = append(cs, check{l.ID.V, atHand + "bridge its contact while it is told to be off", fmt.Sprintf("fault %s_welded%s; no new start until the supply has been off", l.ID.V, settled(spec, l.ID.V))})
 		}
 		if s.NoEffect != nil {
 			if c := constant(spec, l.ID.V+"_effect_within"); c != nil {
-				cs = append(cs, check{l.ID.V, "take the probe out of its pocket while the load runs", fmt.Sprintf("fault %s_no_effect no later than %s after the reading has stopped moving", l.ID.V, span(float64(c.Value*spec.Program.StepMS)/1000))})
+				cs = append(cs, check{l.ID.V, atHand + "take the probe out of its pocket while the load runs", fmt.Sprintf("fault %s_no_effect no later than %s after the reading has stopped moving", l.ID.V, span(steps(spec, c.Value)))})
 			}
 		}
 	}
@@ -189,23 +189,103 @@ func stopped(spec *translate.Specification, s *translate.Switched) string {
 	return "nothing on the sheet ends it: write down what the load does"
 }
 
-func broken(g *survey.Signal, l *survey.Load) string {
-	switch g.BrokenWire.V {
-	case "false":
-		return "reads false: " + l.ID.V + " goes off at once"
-	case "true":
-		return "reads true: " + l.ID.V + " does not notice (see risks.md)"
+// settled is the time after which a contact that does not follow is a fault.
+func settled(spec *translate.Specification, load string) string {
+	c := constant(spec, load+"_contact_settles")
+	if c == nil {
+		return ""
 	}
-	return "not on the sheet: write down what it reads"
+	return " within " + span(steps(spec, c.Value+2))
 }
 
-func uses(c *survey.Cond, name string) bool {
-	for _, n := range c.Names() {
-		if n == name {
-			return true
+// broken is what a load does when the wire of a signal comes off, as far as
+// its own line tells.
+func broken(g *survey.Signal, l *survey.Load) string {
+	if g.BrokenWire.V != "true" && g.BrokenWire.V != "false" {
+		return "not on the sheet: write down what it reads"
+	}
+	reads := g.BrokenWire.V == "true"
+	text := "reads " + g.BrokenWire.V + ": "
+	on, off := "on", "off"
+	if l.Kind.V.Opens() {
+		on, off = "open", "closed"
+	}
+	tree := l.RunsWhen.V.Tree
+	switch {
+	case closes(tree, g.ID.V, reads) == no && l.SafeState.V.Energised():
+		return text + fmt.Sprintf("%s goes %s once any minimum time has passed", l.ID.V, off)
+	case closes(tree, g.ID.V, reads) == no:
+		return text + fmt.Sprintf("%s goes %s at once", l.ID.V, off)
+	case closes(tree, g.ID.V, reads) == yes:
+		return text + fmt.Sprintf("%s is called %s, whatever else is the case (see risks.md)", l.ID.V, on)
+	case closes(tree, g.ID.V, !reads) == no:
+		return text + l.ID.V + " does not notice (see risks.md)"
+	}
+	return text + "the rest of its line decides; write down what " + l.ID.V + " does"
+}
+
+// An answer is what can be told about a line when one signal is known.
+type answer int
+
+const (
+	perhaps answer = iota
+	yes
+	no
+)
+
+// closes says whether a line is closed when one signal has a value and nothing
+// is known of the rest (Kleene's three-valued logic, 1952).
+func closes(c *survey.Cond, signal string, value bool) answer {
+	if c == nil {
+		return no
+	}
+	switch c.Op {
+	case survey.CondName:
+		if c.Name == signal {
+			return told(value)
+		}
+	case survey.CondLiteral:
+		return told(c.Value)
+	case survey.CondNot:
+		return opposite(closes(c.Args[0], signal, value))
+	case survey.CondAnd:
+		return all(c.Args, signal, value, no)
+	case survey.CondOr:
+		return all(c.Args, signal, value, yes)
+	}
+	return perhaps
+}
+
+// all joins the parts of a line: one that decides is enough; otherwise every
+// part has to be known.
+func all(parts []*survey.Cond, signal string, value bool, decides answer) answer {
+	known := opposite(decides)
+	for _, p := range parts {
+		switch closes(p, signal, value) {
+		case decides:
+			return decides
+		case perhaps:
+			known = perhaps
 		}
 	}
-	return false
+	return known
+}
+
+func told(value bool) answer {
+	if value {
+		return yes
+	}
+	return no
+}
+
+func opposite(a answer) answer {
+	switch a {
+	case yes:
+		return no
+	case no:
+		return yes
+	}
+	return perhaps
 }
 
 func minimums(spec *translate.Specification, load string) []check {
@@ -215,7 +295,7 @@ func minimums(spec *translate.Specification, load string) []check {
 		{"_min_on", "let its control open right after it came on", "stays on for at least "},
 	} {
 		if c := constant(spec, load+m.name); c != nil {
-			cs = append(cs, check{load, m.do, m.expect + span(float64(c.Value*spec.Program.StepMS)/1000)})
+			cs = append(cs, check{load, m.do, m.expect + span(steps(spec, c.Value))})
 		}
 	}
 	return cs

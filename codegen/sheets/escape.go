@@ -5,19 +5,17 @@ package sheets
 
 import (
 	"fmt"
+	"strconv"
 	"strings"
+	"unicode"
 	"unicode/utf8"
 )
 
 // hidden reports characters that a reader cannot see or that turn the
-// direction of writing, and bytes that are no character.
+// direction of writing (Unicode's Cc, Cf, Zl and Zp), and bytes that are no
+// character.
 func hidden(r rune) bool {
-	switch {
-	case r < 0x20, r >= 0x7f && r < 0xa0, r == 0xad, r == 0x61c, r >= 0x200b && r <= 0x200f,
-		r >= 0x2028 && r <= 0x202e, r >= 0x2060 && r <= 0x206f, r == 0xfeff, r == utf8.RuneError:
-		return true
-	}
-	return false
+	return r == utf8.RuneError || unicode.In(r, unicode.Cc, unicode.Cf, unicode.Zl, unicode.Zp)
 }
 
 // Visible shows hidden characters as escapes, so that text cannot move a
@@ -39,12 +37,12 @@ func Visible(s string) string {
 	return b.String()
 }
 
-// Markdown makes text stand for itself in Markdown, also in a table cell. An
-// underscore inside a word is left alone: there it means nothing (CommonMark
-// 0.31, 6.2).
+// Markdown makes text stand for itself in Markdown, also in a table cell. A
+// single underscore inside a word is left alone: there it means nothing
+// (CommonMark 0.31, 6.2).
 func Markdown(s string) string {
 	var b strings.Builder
-	runes := []rune(s)
+	runes := []rune(strings.ReplaceAll(s, "\r\n", "\n"))
 	for i, r := range runes {
 		switch {
 		case r == '_' && i > 0 && i+1 < len(runes) && wordRune(runes[i-1]) && wordRune(runes[i+1]):
@@ -61,7 +59,7 @@ func Markdown(s string) string {
 			b.WriteString("&gt;")
 		case r == '&':
 			b.WriteString("&amp;")
-		case strings.ContainsRune("\\`*_[]|~#!", r):
+		case strings.ContainsRune("\\`*_[]|~#!$", r):
 			b.WriteByte('\\')
 			b.WriteRune(r)
 		default:
@@ -72,7 +70,7 @@ func Markdown(s string) string {
 }
 
 func wordRune(r rune) bool {
-	return r == '_' || r >= '0' && r <= '9' || r >= 'a' && r <= 'z' || r >= 'A' && r <= 'Z'
+	return r >= '0' && r <= '9' || r >= 'a' && r <= 'z' || r >= 'A' && r <= 'Z'
 }
 
 // CSV prints rows by RFC 4180. A text that a spreadsheet would take for a
@@ -96,7 +94,7 @@ func CSV(header []string, rows [][]string) string {
 }
 
 func cell(s string) string {
-	if s != "" && strings.ContainsRune("=+-@\t\r", rune(s[0])) && !numeric(s) {
+	if formula(s) {
 		s = "'" + s
 	}
 	s = strings.Map(func(r rune) rune {
@@ -111,19 +109,24 @@ func cell(s string) string {
 	return s
 }
 
-// numeric reports a plain number, which may begin with a sign.
-func numeric(s string) bool {
-	digits, points := 0, 0
-	for i := 0; i < len(s); i++ {
-		switch c := s[i]; {
-		case c >= '0' && c <= '9':
-			digits++
-		case c == '.':
-			points++
-		case (c == '-' || c == '+') && i == 0:
-		default:
-			return false
-		}
+// formula reports text that a spreadsheet may work out instead of showing it:
+// it begins with one of = + - @, in common or full width, or with a tab or a
+// carriage return (OWASP, CSV Injection). Blanks and hidden characters in
+// front do not count, for some programs drop them. A number is no formula.
+func formula(s string) bool {
+	if s != "" && (s[0] == '\t' || s[0] == '\r') {
+		return true
 	}
-	return digits > 0 && points <= 1
+	s = strings.TrimLeftFunc(s, func(r rune) bool { return unicode.IsSpace(r) || hidden(r) })
+	first, _ := utf8.DecodeRuneInString(s)
+	return s != "" && strings.ContainsRune("=+-@＝＋－＠", first) && !numeric(s)
+}
+
+// numeric reports a plain decimal number, with sign and exponent or without.
+func numeric(s string) bool {
+	if strings.Trim(s, "0123456789.eE+-") != "" {
+		return false
+	}
+	_, err := strconv.ParseFloat(s, 64)
+	return err == nil
 }

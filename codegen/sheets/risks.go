@@ -30,6 +30,8 @@ func AnswerText(f risk.Finding) string {
 		return f.Answer + " (a stop is not lifted by an answer)"
 	case f.AnswerStale:
 		return f.Answer + " (stale: written about another figure than " + f.Figure + ")"
+	case f.AnswerUnbound:
+		return f.Answer + " (does not say which figure it was written about; now " + f.Figure + ")"
 	}
 	return f.Answer
 }
@@ -51,7 +53,7 @@ func Summary(findings []risk.Finding) string {
 func Risks(title string, a *risk.Assessment) string {
 	var b strings.Builder
 	fmt.Fprintf(&b, "# Risks: %s\n\n", Markdown(title))
-	cautions(&b)
+	cautions(&b, a)
 	fmt.Fprintf(&b, "%s.\n", Summary(a.Findings))
 	sections := []struct {
 		grade      risk.Grade
@@ -78,9 +80,9 @@ func Risks(title string, a *risk.Assessment) string {
 	return b.String()
 }
 
-func cautions(b *strings.Builder) {
-	for _, c := range Cautions {
-		fmt.Fprintf(b, "> - %s\n", c)
+func cautions(b *strings.Builder, a *risk.Assessment) {
+	for _, c := range CautionsFor(a) {
+		fmt.Fprintf(b, "> - %s\n", Markdown(c))
 	}
 	b.WriteString("\n")
 }

@@ -1,9 +1,8 @@
 package sheets
 
 import (
-	"bytes"
-	"encoding/json"
 	"fmt"
+	"math"
 
 	"makebreak/translate"
 	"makebreak/translate/faults"
@@ -14,10 +13,10 @@ import (
 // Specification prints specification.json: everything that was worked out, for
 // other programs to read.
 func Specification(spec *translate.Specification, a *risk.Assessment, functions []faults.Row) ([]byte, error) {
-	return indented(specification{
+	return JSON(specification{
 		Format:    1,
 		Equipment: map[string]string{"id": spec.Survey.Equipment.ID.V, "title": spec.Survey.Equipment.Title.V, "site": spec.Survey.Equipment.Site.V},
-		Figures:   spec.Figures,
+		Figures:   figures(spec.Figures),
 		Findings:  keyed(RiskColumns, RiskRows(a.Findings)),
 		Functions: keyed(FunctionColumns, FunctionRows(functions)),
 		Program:   program(spec),
@@ -33,6 +32,20 @@ type specification struct {
 	Functions []map[string]string `json:"functions"`
 	Program   *programJSON        `json:"program"` // null where none could be made
 	Budgets   []budgetJSON        `json:"error_budgets"`
+}
+
+// figures leaves out no figure: what is no number becomes null, with the
+// reason in its working.
+func figures(fs translate.Figures) translate.Figures {
+	out := translate.Figures{}
+	for _, f := range fs {
+		if f.Value != nil && (math.IsInf(*f.Value, 0) || math.IsNaN(*f.Value)) {
+			f.Working = fmt.Sprintf("not determined: the working gives %v: %s", *f.Value, f.Working)
+			f.Value = nil
+		}
+		out = append(out, f)
+	}
+	return out
 }
 
 type programJSON struct {
@@ -109,7 +122,8 @@ func program(spec *translate.Specification) *programJSON {
 	if p == nil {
 		return nil
 	}
-	out := &programJSON{ID: p.ID, StepMS: p.StepMS, Inputs: vars(p.Inputs), State: vars(p.State), Outputs: vars(p.Outputs)}
+	out := &programJSON{ID: p.ID, StepMS: p.StepMS, Inputs: vars(p.Inputs), State: vars(p.State), Outputs: vars(p.Outputs),
+		Constants: []constJSON{}, Steps: []string{}, Machines: []machineJSON{}, Properties: []propertyJSON{}}
 	for _, c := range p.Consts {
 		out.Constants = append(out.Constants, constJSON{c.Name, c.Value, c.Unit, c.Means, c.Origin, c.Working})
 	}
@@ -126,7 +140,7 @@ func program(spec *translate.Specification) *programJSON {
 }
 
 func vars(vs []*logic.Var) []varJSON {
-	var out []varJSON
+	out := []varJSON{}
 	for _, v := range vs {
 		out = append(out, varJSON{v.Name, v.What, v.Range.Lo, v.Range.Hi, v.Start, v.Survives})
 	}
@@ -135,7 +149,7 @@ func vars(vs []*logic.Var) []varJSON {
 
 func machine(m *logic.Machine) machineJSON {
 	words := m.Var.Enum.Words
-	out := machineJSON{Name: m.Var.Name, What: m.What, Safe: words[m.Safe].Name}
+	out := machineJSON{Name: m.Var.Name, What: m.What, Safe: words[m.Safe].Name, States: []string{}, Transitions: []transitionJSON{}}
 	for i, s := range m.At {
 		out.States = append(out.States, words[i].Name)
 		for _, t := range s.Goes {
@@ -170,9 +184,9 @@ func block(b logic.Block) string {
 }
 
 func budgets(spec *translate.Specification) []budgetJSON {
-	var out []budgetJSON
+	out := []budgetJSON{}
 	for _, b := range spec.Budgets {
-		j := budgetJSON{Control: b.Control, Sensor: b.Sensor, Edge: b.Edge, At: b.At, Worst: b.WorstCase, RSS: b.RSS, Missing: b.Missing}
+		j := budgetJSON{Control: b.Control, Sensor: b.Sensor, Edge: b.Edge, At: b.At, Worst: b.WorstCase, RSS: b.RSS, Missing: append([]string{}, b.Missing...), Lines: []contributionJSON{}}
 		for _, l := range b.Lines {
 			j.Lines = append(j.Lines, contributionJSON{l.Name, l.Kelvin, l.Share, l.Working})
 		}
@@ -191,16 +205,4 @@ func keyed(columns []string, rows [][]string) []map[string]string {
 		out = append(out, m)
 	}
 	return out
-}
-
-// indented prints JSON with its signs as they are.
-func indented(v any) ([]byte, error) {
-	var b bytes.Buffer
-	e := json.NewEncoder(&b)
-	e.SetEscapeHTML(false)
-	e.SetIndent("", "  ")
-	if err := e.Encode(v); err != nil {
-		return nil, err
-	}
-	return b.Bytes(), nil
 }

@@ -20,6 +20,10 @@
  * compliance is made for it.
  * Software cannot see what it has no input for. A finding of grade stop is ended only by changing
  * the design.
+ * Open findings: 2 proving_switch_not_checked_open (act, flow_proven); 3 earth_fault_bypasses_limit
+ * (act, cal2); 4 insulation_of_new_probe (act, tank_probe); 5 contact_life (act, heater); 6
+ * scald_and_storage (act, tank_stat); 7 model_beyond_evidence (act, cal2); 8
+ * mercury_asbestos_refrigerant (act, tank_stat); 9 approval_lapses (act, cal2).
  */
 #ifndef CAL2_H
 #define CAL2_H
