@@ -3,20 +3,34 @@ package csource
 import (
 	"fmt"
 	"strings"
+	"unicode"
 	"unicode/utf8"
 )
 
 // Comment makes a text harmless inside a C comment: no comment mark, no line
 // break, no backslash before a line break, no trigraph, no control character
-// and nothing that turns the direction of writing.
+// and nothing that is invisible or turns the direction of writing. A backslash
+// becomes a slash, and the two characters of a mark are put apart.
 func Comment(s string) string {
-	s = harmless(s)
-	s = strings.ReplaceAll(s, "*/", "* /")
-	s = strings.ReplaceAll(s, "/*", "/ *")
-	s = strings.ReplaceAll(s, "//", "/ /")
-	s = strings.ReplaceAll(s, "??", "? ?")
-	s = strings.ReplaceAll(s, "??", "? ?")
-	return strings.ReplaceAll(s, `\`, "/")
+	var b strings.Builder
+	before := rune(0)
+	for _, r := range harmless(s) {
+		if r == '\\' {
+			r = '/'
+		}
+		if apart(before, r) {
+			b.WriteByte(' ')
+		}
+		b.WriteRune(r)
+		before = r
+	}
+	return b.String()
+}
+
+// apart reports whether two characters beside each other mean something in C
+// inside a comment: an end, another beginning, half a trigraph.
+func apart(a, b rune) bool {
+	return a == '*' && b == '/' || a == '/' && (b == '*' || b == '/') || a == '?' && b == '?'
 }
 
 // harmless replaces control characters, line breaks, invalid bytes and
@@ -24,10 +38,9 @@ func Comment(s string) string {
 func harmless(s string) string {
 	return strings.Map(func(r rune) rune {
 		switch {
-		case r == '\n' || r == '\r' || r == '\t' || r == 0x2028 || r == 0x2029 || r == 0x85:
+		case r == '\n' || r == '\r' || r == '\t' || r == '\v' || r == '\f' || r == 0x85 || unicode.Is(unicode.Z, r):
 			return ' '
-		case r < 0x20, r >= 0x7f && r < 0xa0, r == 0xad, r == 0x61c, r >= 0x200b && r <= 0x200f,
-			r >= 0x202a && r <= 0x202e, r >= 0x2060 && r <= 0x206f, r == 0xfeff, r == utf8.RuneError:
+		case r == utf8.RuneError || !unicode.IsPrint(r) || unicode.Is(unicode.Variation_Selector, r):
 			return '?'
 		}
 		return r
