@@ -218,8 +218,8 @@ func TestMutantsFailTheCheck(t *testing.T) {
 var equivalent = map[string]string{
 	"if (x < low) {: < -> <=":                "at equality both branches give low",
 	"return (x > high) ? high : x;: > -> >=": "at equality both branches give high",
-	"tank_probe_less = (uint16_t)((m->tank_probe_last < m->tank_probe_before): < -> <=":            "at equality both branches give the same number",
-	"tank_probe_more = (uint16_t)((m->tank_probe_last < m->tank_probe_before): < -> <=":            "at equality both branches give the same number",
-	"(tank_probe_counts > m->heater_effect_from)) {: > -> >=":                                      "at equality the variable takes the value that it has",
-	"} else if (!in->limit_open && (m->heater_effect_for < CAL2_HEATER_EFFECT_WITHIN)) {: < -> <=": "in the step that reaches the limit the heater goes off, which restarts the count before it could go further",
+	"const uint16_t tank_probe_less = (uint16_t)((m->tank_probe_last < m->tank_probe_before): < -> <=": "at equality both branches give the same number",
+	"const uint16_t tank_probe_more = (uint16_t)((m->tank_probe_last < m->tank_probe_before): < -> <=": "at equality both branches give the same number",
+	"(tank_probe_counts > m->heater_effect_from)) {: > -> >=":                                          "at equality the variable takes the value that it has",
+	"} else if (!in->limit_open && (m->heater_effect_for < CAL2_HEATER_EFFECT_WITHIN)) {: < -> <=":     "in the step that reaches the limit the heater goes off, which restarts the count before it could go further",
 }

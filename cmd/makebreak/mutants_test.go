@@ -12,7 +12,7 @@ type mutant struct{ what, text string }
 
 var (
 	comment    = regexp.MustCompile(`(?s)/\*.*?\*/`)
-	definition = regexp.MustCompile(`(?m)^#define \w+ (\d+)u`)
+	definition = regexp.MustCompile(`(?m)^#define \w+ (\d+)u?`)
 	comparison = regexp.MustCompile(` (<=|>=|==|!=|<|>) `)
 	junction   = regexp.MustCompile(`&&|\|\|`)
 )

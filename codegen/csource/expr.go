@@ -1,10 +1,6 @@
 package csource
 
-import (
-	"strings"
-
-	"makebreak/translate/logic"
-)
+import "makebreak/translate/logic"
 
 // How numbers are worked out in C. A bare unsigned value is compared as it
 // stands. Arithmetic is done in int where all of it fits 16 bits, else every
@@ -17,117 +13,139 @@ const (
 	wide                    // int32_t
 )
 
-// boolean prints a truth value; nested tells that it stands inside another one.
-func (w *printer) boolean(e *logic.Expr, nested bool) string {
+func (k width) typ() string {
+	if k == wide {
+		return "int32_t"
+	}
+	return "int16_t"
+}
+
+// boolean is a truth value.
+func (w *printer) boolean(e *logic.Expr) piece {
 	switch e.Op {
 	case logic.OpLit:
-		if e.Value != 0 {
-			return "true"
-		}
-		return "false"
+		return atom(numeral(e.Value, "bool"))
 	case logic.OpUse, logic.OpPrev:
-		return w.read(e.Var)
+		return atom(w.read(e.Var))
 	case logic.OpNot:
-		if leaf(e.Args[0]) {
-			return "!" + w.boolean(e.Args[0], true)
-		}
-		return "!(" + w.boolean(e.Args[0], false) + ")"
+		return w.boolean(e.Args[0]).prefixed("!")
 	case logic.OpSelect:
-		return "(" + w.boolean(e.Args[0], true) + " ? " + w.boolean(e.Args[1], true) + " : " + w.boolean(e.Args[2], true) + ")"
+		return choice(w.term(e.Args[0]), w.term(e.Args[1]), w.term(e.Args[2]))
 	case logic.OpAnd, logic.OpOr:
-		parts := make([]string, len(e.Args))
+		parts := make([]piece, len(e.Args))
 		for i, a := range e.Args {
-			parts[i] = w.boolean(a, true)
+			parts[i] = w.term(a)
 		}
-		return bracket(strings.Join(parts, junction(e.Op)), nested)
+		return chain(junctions[e.Op], parts...)
 	}
-	return bracket(w.comparison(e), nested)
+	return w.comparison(e)
 }
 
-func junction(op logic.Op) string {
-	if op == logic.OpAnd {
-		return " && "
+// term is a truth value inside another one.
+func (w *printer) term(e *logic.Expr) piece { return w.boolean(e).bracketed() }
+
+// side is a truth value beside == or !=, where a bare ! would look as if it
+// went for the whole comparison.
+func (w *printer) side(e *logic.Expr) piece {
+	p := w.term(e)
+	if e.Op == logic.OpNot {
+		return chain("", p).bracketed()
 	}
-	return " || "
+	return p
 }
 
-func bracket(s string, yes bool) string {
-	if yes {
-		return "(" + s + ")"
-	}
-	return s
-}
-
-func leaf(e *logic.Expr) bool {
-	return e.Op == logic.OpUse || e.Op == logic.OpPrev || e.Op == logic.OpConst || e.Op == logic.OpLit
-}
+var junctions = map[logic.Op]string{logic.OpAnd: "&&", logic.OpOr: "||"}
 
 var comparisons = map[logic.Op]string{
 	logic.OpEq: "==", logic.OpNe: "!=", logic.OpLt: "<", logic.OpLe: "<=", logic.OpGt: ">", logic.OpGe: ">=",
 }
 
-func (w *printer) comparison(e *logic.Expr) string {
+func (w *printer) comparison(e *logic.Expr) piece {
 	a, b := e.Args[0], e.Args[1]
-	sign := " " + comparisons[e.Op] + " "
+	sign := comparisons[e.Op]
 	switch {
 	case a.Kind == logic.Bool:
-		return w.boolean(a, true) + sign + w.boolean(b, true)
+		return chain(sign, w.side(a), w.side(b))
 	case a.Kind == logic.Word:
-		return w.state(a, b) + sign + w.state(b, a)
-	case w.bare(a) && w.bare(b):
-		return w.plain(a) + sign + w.plain(b)
+		return chain(sign, w.state(a).bracketed(), w.state(b).bracketed())
+	case w.bare(a) != "" && w.bare(b) != "":
+		return chain(sign, w.plain(a), w.plain(b))
 	}
 	k := w.widthOf(a, b)
-	return w.number(a, k) + sign + w.number(b, k)
+	return chain(sign, w.number(a, k).bracketed(), w.number(b, k).bracketed())
 }
 
-// state prints a machine's state, or the name of one; other tells whose.
-func (w *printer) state(e, other *logic.Expr) string {
-	if e.Op == logic.OpLit {
-		return w.word(other.Var, e.Value)
-	}
-	return w.read(e.Var)
-}
-
-// bare reports whether an operand is an unsigned value just as it stands.
-func (w *printer) bare(e *logic.Expr) bool {
+// state is the state of a machine, or the name of one.
+func (w *printer) state(e *logic.Expr) piece {
 	switch e.Op {
 	case logic.OpLit:
-		return e.Value >= 0
-	case logic.OpConst:
-		return e.Const.Value >= 0
-	case logic.OpUse, logic.OpPrev:
-		return strings.HasPrefix(w.typeNow(e.Var), "uint")
+		return atom(w.word(e.Enum, e.Value))
+	case logic.OpSelect:
+		return choice(w.term(e.Args[0]), w.storedState(e.Args[1]), w.storedState(e.Args[2]))
 	}
-	return false
+	return atom(w.read(e.Var))
 }
 
-func (w *printer) plain(e *logic.Expr) string {
+// storedState is a state as it is kept in a variable.
+func (w *printer) storedState(e *logic.Expr) piece {
+	if e.Op == logic.OpUse || e.Op == logic.OpPrev {
+		return w.state(e)
+	}
+	return w.state(e).prefixed("(uint8_t)")
+}
+
+// bare gives the type of what is an unsigned value just as it stands, and
+// nothing for what is not.
+func (w *printer) bare(e *logic.Expr) string {
+	typ := ""
 	switch e.Op {
-	case logic.OpLit:
-		if e.Value > 65535 {
-			return strings.Replace(literal(e.Value, true), "INT32_C", "UINT32_C", 1)
+	case logic.OpLit, logic.OpConst:
+		if r := w.p.Ranges[e]; r.Lo >= 0 {
+			typ = storage(r)
 		}
-		return literal(e.Value, false)[:len(literal(e.Value, false))] + unsignedSuffix(e.Value)
-	case logic.OpConst:
-		return w.macro(e.Const.Name)
+	case logic.OpUse, logic.OpPrev:
+		typ = w.typeOf(e.Var)
+	default:
+		typ = w.helperType(e)
 	}
-	return w.read(e.Var)
-}
-
-func unsignedSuffix(v int64) string {
-	if v > 32767 { // literal has widened it already
+	if !unsigned(typ) {
 		return ""
 	}
-	return "u"
+	return typ
 }
 
-// typeNow is the type under which a variable is read.
-func (w *printer) typeNow(v *logic.Var) string {
-	if w.isInput(v) {
-		return inputType(v)
+// plain prints what is bare.
+func (w *printer) plain(e *logic.Expr) piece {
+	switch e.Op {
+	case logic.OpLit:
+		return atom(natural(e.Value))
+	case logic.OpConst:
+		return atom(w.asUnsigned(e.Const))
+	case logic.OpUse, logic.OpPrev:
+		return atom(w.read(e.Var))
 	}
-	return typeOf(v)
+	return w.helperCall(e)
+}
+
+// asUnsigned and asSigned print a constant, and note how it is used: one that
+// is used in signed arithmetic alone is defined as a signed number.
+func (w *printer) asUnsigned(c *logic.Const) string {
+	w.unsignedUse[c] = true
+	return w.consts[c]
+}
+
+func (w *printer) asSigned(c *logic.Const, k width) piece {
+	w.signedUse[c] = true
+	name := atom(w.consts[c])
+	if w.signed(c) && (k == narrow || !logic.Int16.Holds(c.Value)) {
+		return name
+	}
+	return name.prefixed("(" + k.typ() + ")")
+}
+
+// signed reports whether a constant is defined as a signed number.
+func (w *printer) signed(c *logic.Const) bool {
+	return c.Value < 0 || (w.used.signedUse[c] && !w.used.unsignedUse[c])
 }
 
 // widthOf finds the width in which all of some expressions can be worked out.
@@ -157,125 +175,139 @@ func (w *printer) numbers(e *logic.Expr, f func(*logic.Expr)) {
 	}
 }
 
-var arithmetic = map[logic.Op]string{logic.OpAdd: " + ", logic.OpSub: " - ", logic.OpMul: " * ", logic.OpDiv: " / "}
+var arithmetic = map[logic.Op]string{logic.OpAdd: "+", logic.OpSub: "-", logic.OpMul: "*", logic.OpDiv: "/"}
 
-// number prints a numeric expression in the given width; the result is signed.
-func (w *printer) number(e *logic.Expr, k width) string {
-	cast := "(int16_t)"
-	if k == wide {
-		cast = "(int32_t)"
-	}
+// number is a numeric expression in the given width; the result is signed.
+func (w *printer) number(e *logic.Expr, k width) piece {
 	switch e.Op {
 	case logic.OpLit:
-		return literal(e.Value, k == wide)
+		return atom(literal(e.Value, k))
 	case logic.OpConst:
-		return cast + w.macro(e.Const.Name)
+		return w.asSigned(e.Const, k)
 	case logic.OpUse, logic.OpPrev:
-		if t := w.typeNow(e.Var); t == "int32_t" || (k == narrow && t == "int16_t") {
-			return w.read(e.Var)
-		}
-		return cast + w.read(e.Var)
+		return widened(atom(w.read(e.Var)), w.typeOf(e.Var), k)
 	case logic.OpSelect:
-		return "(" + w.boolean(e.Args[0], true) + " ? " + w.number(e.Args[1], k) + " : " + w.number(e.Args[2], k) + ")"
-	case logic.OpClamp, logic.OpToward, logic.OpLookup:
-		return cast + w.call(e)
+		return choice(w.term(e.Args[0]), w.number(e.Args[1], k).bracketed(), w.number(e.Args[2], k).bracketed())
 	}
-	return "(" + w.number(e.Args[0], k) + arithmetic[e.Op] + w.number(e.Args[1], k) + ")"
+	if t := w.helperType(e); t != "" {
+		return widened(w.helperCall(e), t, k)
+	}
+	return chain(arithmetic[e.Op], w.number(e.Args[0], k).bracketed(), w.number(e.Args[1], k).bracketed())
 }
 
-// call prints one of the small helpers. Clamp has a cheap form for counts.
-func (w *printer) call(e *logic.Expr) string {
+// widened casts a value of a type to a width, where it does not become an int
+// of that width by itself.
+func widened(p piece, typ string, k width) piece {
+	if typ == k.typ() || (k == narrow && holds(typ).Within(logic.Int16)) {
+		return p
+	}
+	return p.prefixed("(" + k.typ() + ")")
+}
+
+// helperType is the type that a helper gives, or nothing where an expression is
+// not worked out by one.
+func (w *printer) helperType(e *logic.Expr) string {
+	switch e.Op {
+	case logic.OpClamp:
+		return w.clampType(e)
+	case logic.OpToward:
+		return w.towardType(e)
+	case logic.OpLookup:
+		return storage(span(e.Table.Y))
+	}
+	return ""
+}
+
+// clampType and towardType choose the helper that is used: its numbers are of
+// that type.
+func (w *printer) clampType(e *logic.Expr) string {
+	counts := true
+	for _, a := range e.Args {
+		counts = counts && w.bare(a) != "" && holds(w.bare(a)).Within(logic.Count)
+	}
+	if counts {
+		return "uint16_t"
+	}
+	return w.widthOf(e.Args...).typ()
+}
+
+func (w *printer) towardType(e *logic.Expr) string {
+	y, x := w.p.Ranges[e.Args[0]], w.p.Ranges[e.Args[1]]
+	way := logic.Range{Lo: x.Lo - y.Hi, Hi: x.Hi - y.Lo}
+	if w.widthOf(e.Args...) == narrow && way.Within(logic.Int16) {
+		return "int16_t"
+	}
+	return "int32_t"
+}
+
+// helperCall is a call of one of the small functions.
+func (w *printer) helperCall(e *logic.Expr) piece {
 	switch e.Op {
 	case logic.OpLookup:
-		return w.lo + "_" + e.Table.Name + "(" + w.number(e.Args[0], wide) + ")"
+		w.tablesUsed[e.Table] = true
+		return call(w.tables[e.Table], w.argument(e.Args[0], w.tableArgument(e.Table)))
 	case logic.OpClamp:
-		if w.unsigned16(e.Args...) {
-			return "clamp_u16(" + w.short(e.Args[0]) + ", " + w.short(e.Args[1]) + ", " + w.short(e.Args[2]) + ")"
-		}
-		return "clamp_i32(" + w.arguments(e.Args) + ")"
+		return w.helper("clamp", w.clampType(e), e.Args)
 	}
-	return "toward_i32(" + w.arguments(e.Args) + ")"
+	return w.helper("toward", w.towardType(e), e.Args)
 }
 
-func (w *printer) arguments(args []*logic.Expr) string {
-	parts := make([]string, len(args))
-	for i, a := range args {
-		parts[i] = w.number(a, wide)
-	}
-	return strings.Join(parts, ", ")
-}
-
-// unsigned16 reports whether all operands are counts: bare values of 16 bits.
-func (w *printer) unsigned16(args ...*logic.Expr) bool {
+func (w *printer) helper(what, typ string, args []*logic.Expr) piece {
+	name := what + map[string]string{"uint16_t": "_u16", "int16_t": "_i16", "int32_t": "_i32"}[typ]
+	w.helpersUsed[name] = true
+	var parts []piece
 	for _, a := range args {
-		if !w.bare(a) || !w.p.Ranges[a].Within(logic.Count) {
-			return false
-		}
+		parts = append(parts, w.argument(a, typ))
 	}
-	return true
+	return call(w.function(name), parts...)
 }
 
-// short prints a bare unsigned value of 16 bits.
-func (w *printer) short(e *logic.Expr) string { return w.plain(e) }
+// argument is a number as a parameter of a helper.
+func (w *printer) argument(e *logic.Expr, typ string) piece {
+	switch {
+	case unsigned(typ):
+		return w.plain(e)
+	case e.Op == logic.OpLit:
+		return atom(numeral(e.Value, typ))
+	case typ == "int32_t":
+		return w.number(e, wide)
+	}
+	p := w.number(e, narrow)
+	if !p.closed() { // arithmetic gives an int
+		p = p.prefixed("(int16_t)")
+	}
+	return p
+}
 
-// value prints what is assigned to a variable of the given type.
-func (w *printer) value(e *logic.Expr, v *logic.Var, typ string) string {
+// value is what is assigned to a variable of the given type.
+func (w *printer) value(e *logic.Expr, typ string) piece {
 	switch {
 	case e.Kind == logic.Bool:
-		return w.boolean(e, false)
-	case e.Kind == logic.Word && e.Op == logic.OpLit:
-		return "(uint8_t)" + w.word(v, e.Value)
-	case w.bare(e) && leaf(e) && (e.Op == logic.OpLit || w.fitsType(e, typ)):
+		return w.boolean(e)
+	case e.Kind == logic.Word:
+		return w.storedState(e)
+	case unsigned(typ) && w.fits(e, typ):
 		return w.plain(e)
-	case e.Op == logic.OpSelect && w.bare(e.Args[1]) && w.bare(e.Args[2]) && strings.HasPrefix(typ, "uint"):
-		return "(" + typ + ")(" + w.boolean(e.Args[0], true) + " ? " + w.plain(e.Args[1]) + " : " + w.plain(e.Args[2]) + ")"
-	case e.Op == logic.OpClamp && typ == "uint16_t" && w.unsigned16(e.Args...):
-		return w.call(e)
+	case unsigned(typ) && e.Op == logic.OpSelect && w.fits(e.Args[1], typ) && w.fits(e.Args[2], typ):
+		return choice(w.term(e.Args[0]), w.plain(e.Args[1]), w.plain(e.Args[2])).prefixed("(" + typ + ")")
 	}
-	return "(" + typ + ")" + bracket(w.number(e, w.widthOf(e)), !strings.HasPrefix(w.number(e, w.widthOf(e)), "("))
-}
-
-// fitsType reports whether a bare value needs no cast to go into a type.
-func (w *printer) fitsType(e *logic.Expr, typ string) bool {
-	if e.Op == logic.OpConst {
-		return strings.HasPrefix(typ, "uint")
-	}
-	t := w.typeNow(e.Var)
-	return t == typ || (strings.HasPrefix(typ, "uint") && size(t) <= size(typ))
-}
-
-func size(t string) int {
-	switch {
-	case strings.Contains(t, "32"):
-		return 4
-	case strings.Contains(t, "16"):
-		return 2
-	}
-	return 1
-}
-
-// read prints where a variable stands.
-func (w *printer) read(v *logic.Var) string {
-	switch {
-	case w.isInput(v):
-		return "in->" + v.Name
-	case w.isLocal(v):
-		return v.Name
-	case w.isOutput(v):
-		return "out->" + v.Name
-	}
-	return "m->" + v.Name
-}
-
-func (w *printer) isInput(v *logic.Var) bool  { return among(w.p.Inputs, v) }
-func (w *printer) isOutput(v *logic.Var) bool { return among(w.p.Outputs, v) }
-func (w *printer) isLocal(v *logic.Var) bool  { return !w.isOutput(v) && among(w.p.Locals, v) }
-
-func among(vs []*logic.Var, v *logic.Var) bool {
-	for _, x := range vs {
-		if x == v {
-			return true
+	if t := w.helperType(e); t != "" {
+		p := w.helperCall(e)
+		if t != typ {
+			p = p.prefixed("(" + typ + ")")
 		}
+		return p
 	}
-	return false
+	k := w.widthOf(e)
+	p := w.number(e, k)
+	if k.typ() == typ && (k == wide || p.text != "") {
+		return p
+	}
+	return p.prefixed("(" + typ + ")")
+}
+
+// fits reports whether a value is bare and goes into an unsigned type as it is.
+func (w *printer) fits(e *logic.Expr, typ string) bool {
+	t := w.bare(e)
+	return t != "" && holds(t).Within(holds(typ))
 }

@@ -1,7 +1,7 @@
 package csource
 
 import (
-	"fmt"
+	"slices"
 	"sort"
 	"strings"
 
@@ -15,86 +15,125 @@ import (
 //
 // Inputs change rarely in some stretches and often in others, and numbers are
 // mostly taken from around what the program compares with, so that a run gets
-// everywhere.
+// everywhere. Every so often the power is cut; the record is good, or gone.
 func (s Source) Harness(steps int) string {
 	w := s.printer()
 	w.line("#include \"%s.h\"\n\n#include <stddef.h>\n#include <stdio.h>\n#include <string.h>\n", w.lo)
-	w.line("static uint32_t seed = UINT32_C(%d);", harnessSeed)
 	w.line("static uint32_t sum = UINT32_C(2166136261);\n")
-	w.line("static uint32_t draw(void)\n{\n    seed ^= (seed << 13) & UINT32_C(0xFFFFFFFF);\n    seed ^= seed >> 17;\n    seed ^= (seed << 5) & UINT32_C(0xFFFFFFFF);\n    return seed;\n}\n")
+	if len(w.p.Inputs) > 0 {
+		w.line("static uint32_t seed = UINT32_C(%d);", uint32(harnessSeed))
+		w.line("static uint32_t draw(void)\n{\n    seed ^= (seed << 13) & UINT32_C(0xFFFFFFFF);\n    seed ^= seed >> 17;\n    seed ^= (seed << 5) & UINT32_C(0xFFFFFFFF);\n    return seed;\n}\n")
+	}
 	w.line("static void add(int32_t v)\n{\n    sum = ((sum ^ (uint32_t)v) * UINT32_C(16777619)) & UINT32_C(0xFFFFFFFF);\n}\n")
 	values := interesting(s.Program)
-	w.line("static const int32_t value[] = {%s};\n", strings.Trim(strings.ReplaceAll(fmt.Sprint(values), " ", ", "), "[]"))
+	w.line("static const int32_t value[] = {%s};\n", strings.Join(numerals(values), ", "))
 	w.line("static const uint32_t mask[3] = {3u, 63u, 1023u};\n")
-	w.line("int main(void)\n{\n    struct %s m;\n    struct %s_in in;\n    struct %s_out out;\n    uint32_t i;\n    uint32_t r;\n", w.lo, w.lo, w.lo)
-	w.line("    (void)memset(&in, 0, sizeof in);\n    %s_start(&m, NULL);\n    (void)mask;\n    (void)value;\n    for (i = 0u; i < %du; i++) {", w.lo, steps)
+	w.line("int main(void)\n{\n    struct %s m;\n    struct %s_in in;\n    struct %s_out out;\n    struct %s_remembered kept;\n    uint32_t i;\n    uint32_t r = 0u;\n", w.lo, w.lo, w.lo, w.lo)
+	w.line("    (void)memset(&m, 0xA5, sizeof m);\n    (void)memset(&in, 0, sizeof in);\n    (void)memset(&kept, 0, sizeof kept);\n    %s_start(&m, NULL);\n    (void)mask;\n    (void)value;\n    for (i = 0u; i < %s; i++) {", w.lo, natural(int64(steps)))
 	for _, v := range w.p.Inputs {
 		w.line("        r = draw();\n        if ((r & mask[(i >> 11) %% 3u]) == 0u) {")
+		name := w.vars[v]
 		switch {
 		case v.Kind == logic.Bool:
-			w.line("            in.%s = ((r >> 12) & 1u) != 0u;", v.Name)
+			w.line("            in.%s = ((r >> 12) & 1u) != 0u;", name)
 		case v.Signed:
-			w.line("            in.%s = (int16_t)((((r >> 12) & 7u) == 0u) ? ((int32_t)(r >> 16) - 32768) : value[(r >> 15) %% %du]);", v.Name, len(values))
+			w.line("            in.%s = (int16_t)((((r >> 12) & 7u) == 0u) ? ((int32_t)(r >> 16) - 32768) : value[(r >> 15) %% %du]);", name, len(values))
 		default:
-			w.line("            in.%s = (uint16_t)((((r >> 12) & 7u) == 0u) ? (int32_t)(r >> 16) : value[(r >> 15) %% %du]);", v.Name, len(values))
+			w.line("            in.%s = (uint16_t)((((r >> 12) & 7u) == 0u) ? (int32_t)(r >> 16) : value[(r >> 15) %% %du]);", name, len(values))
 		}
 		w.line("        }")
 	}
 	w.line("        (void)r;\n        %s_step(&m, &in, &out);", w.lo)
 	for _, v := range w.p.Outputs {
-		w.line("        add((int32_t)out.%s);", v.Name)
+		w.line("        add((int32_t)out.%s);", w.vars[v])
 	}
 	for _, v := range w.p.State {
-		w.line("        add((int32_t)m.%s);", v.Name)
+		w.line("        add((int32_t)m.%s);", w.vars[v])
 	}
+	w.line("        if ((i %% %du) == %du) {\n            add(%s_remember(&m, &kept) ? 1 : 0);\n            add((int32_t)kept.check);\n            (void)memset(&m, 0x5A, sizeof m);", powerCut, powerCut-1, w.lo)
+	w.line("            %s_start(&m, ((i & 1u) == 0u) ? &kept : NULL);\n        }", w.lo)
 	w.line("    }\n    (void)printf(\"%%08lx\\n\", (unsigned long)sum);\n    return 0;\n}")
 	return w.String()
 }
 
-const harnessSeed = 2463534242
+func numerals(vs []int64) []string {
+	var all []string
+	for _, v := range vs {
+		all = append(all, literal(v, wide))
+	}
+	return all
+}
+
+const (
+	harnessSeed = 2463534242
+	powerCut    = 3001 // steps from one cut to the next
+)
+
+// drawing is the harness's source of inputs (Marsaglia, Xorshift RNGs, Journal
+// of Statistical Software 8(14), 2003: shifts 13, 17, 5).
+type drawing struct {
+	seed   uint32
+	values []int64
+}
+
+func (d *drawing) draw() uint32 {
+	d.seed ^= d.seed << 13
+	d.seed ^= d.seed >> 17
+	d.seed ^= d.seed << 5
+	return d.seed
+}
+
+// change draws once for an input and gives its next value.
+func (d *drawing) change(i uint32, v *logic.Var, now int64) int64 {
+	r := d.draw()
+	if r&[3]uint32{3, 63, 1023}[(i>>11)%3] != 0 {
+		return now
+	}
+	anywhere := r>>12&7 == 0
+	near := d.values[(r>>15)%uint32(len(d.values))]
+	switch {
+	case v.Kind == logic.Bool:
+		return int64(r >> 12 & 1)
+	case v.Signed && anywhere:
+		return int64(r>>16) - 32768
+	case v.Signed:
+		return int64(int16(near))
+	case anywhere:
+		return int64(r >> 16)
+	}
+	return int64(uint16(near))
+}
 
 // Checksum is what the harness prints, from the interpreter.
 func Checksum(c *logic.Checked, steps int) uint32 {
-	seed, sum := uint32(harnessSeed), uint32(2166136261)
-	draw := func() uint32 {
-		seed ^= seed << 13
-		seed ^= seed >> 17
-		seed ^= seed << 5
-		return seed
-	}
-	mask := [3]uint32{3, 63, 1023}
-	values := interesting(c)
+	d := &drawing{harnessSeed, interesting(c)}
+	sum := uint32(2166136261)
+	add := func(v int64) { sum = (sum ^ uint32(v)) * 16777619 }
 	run := c.NewRun()
 	run.Start(nil)
+	written := logic.Record{Values: make([]int64, len(c.Survivors()))}
 	in := make([]int64, len(c.Inputs))
 	for i := uint32(0); i < uint32(steps); i++ {
 		for n, v := range c.Inputs {
-			r := draw()
-			if r&mask[(i>>11)%3] != 0 {
-				continue
-			}
-			switch {
-			case v.Kind == logic.Bool:
-				in[n] = int64(r >> 12 & 1)
-			case r>>12&7 != 0:
-				in[n] = values[(r>>15)%uint32(len(values))]
-				if v.Signed {
-					in[n] = int64(int16(in[n]))
-				} else {
-					in[n] = int64(uint16(in[n]))
-				}
-			case v.Signed:
-				in[n] = int64(r>>16) - 32768
-			default:
-				in[n] = int64(r >> 16)
-			}
+			in[n] = d.change(i, v, in[n])
 		}
 		run.Step(in)
-		for _, v := range c.Outputs {
-			sum = (sum ^ uint32(run.Get(v))) * 16777619
+		for _, vs := range [][]*logic.Var{c.Outputs, c.State} {
+			for _, v := range vs {
+				add(run.Get(v))
+			}
 		}
-		for _, v := range c.State {
-			sum = (sum ^ uint32(run.Get(v))) * 16777619
+		if i%powerCut != powerCut-1 {
+			continue
+		}
+		now := run.Remember()
+		add(bit(now.Check != written.Check || !slices.Equal(now.Values, written.Values)))
+		add(int64(now.Check))
+		written = now
+		if i&1 == 0 {
+			run.Start(&now)
+		} else {
+			run.Start(nil)
 		}
 	}
 	return sum

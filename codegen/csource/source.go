@@ -12,6 +12,7 @@ package csource
 import (
 	"fmt"
 	"strings"
+	"unicode/utf8"
 
 	"makebreak/translate/logic"
 )
@@ -57,13 +58,34 @@ type Source struct {
 // printer gathers lines of C.
 type printer struct {
 	strings.Builder
-	p  *logic.Checked
-	up string // upper-case prefix of macros
-	lo string // lower-case prefix of everything else
+	*names
+	p     *logic.Checked
+	order []logic.Block // what is printed of a step
+	lo    string        // lower-case prefix of everything but macros
+
+	uses
+	used uses // of the whole program, known from a first printing
 }
 
+// uses is what the printed C makes use of.
+type uses struct {
+	signedUse, unsignedUse map[*logic.Const]bool
+	helpersUsed            map[string]bool
+	tablesUsed             map[*logic.Table]bool
+}
+
+func newUses() uses {
+	return uses{map[*logic.Const]bool{}, map[*logic.Const]bool{}, map[string]bool{}, map[*logic.Table]bool{}}
+}
+
+// printer starts a file. Constants and helpers stand at the top of the C but
+// depend on how the program below uses them, so that is printed once for
+// nothing.
 func (s Source) printer() *printer {
-	return &printer{p: s.Program, up: strings.ToUpper(s.Program.ID), lo: s.Program.ID}
+	first := &printer{p: s.Program, order: pruned(s.Program), names: chooseNames(s.Program), lo: s.Program.ID, uses: newUses()}
+	first.machineFunctions()
+	first.step()
+	return &printer{p: first.p, order: first.order, names: first.names, lo: first.lo, uses: newUses(), used: first.uses}
 }
 
 func (w *printer) line(format string, args ...any) {
@@ -77,7 +99,7 @@ func (w *printer) comment(indent string, lines ...string) {
 	for _, l := range lines {
 		wrapped = append(wrapped, wrap(Comment(l), lineWidth-len(indent)-3)...)
 	}
-	if len(wrapped) == 1 && len(indent)+len(wrapped[0])+6 <= lineWidth {
+	if len(wrapped) == 1 && len(indent)+columns(wrapped[0])+6 <= lineWidth {
 		w.line("%s/* %s */", indent, wrapped[0])
 		return
 	}
@@ -91,8 +113,6 @@ func (w *printer) comment(indent string, lines ...string) {
 	w.line("%s */", indent)
 }
 
-const lineWidth = 100
-
 // wrap breaks a text at blanks. A word that is too long stays whole.
 func wrap(text string, width int) []string {
 	var lines []string
@@ -101,7 +121,7 @@ func wrap(text string, width int) []string {
 		switch {
 		case line == "":
 			line = word
-		case len(line)+1+len(word) <= width:
+		case columns(line)+1+columns(word) <= width:
 			line += " " + word
 		default:
 			lines = append(lines, line)
@@ -109,6 +129,21 @@ func wrap(text string, width int) []string {
 		}
 	}
 	return append(lines, line)
+}
+
+// columns is how wide a text stands on the screen, near enough.
+func columns(s string) int { return utf8.RuneCountInString(s) }
+
+// statement prints one statement or the head of one, broken at its junctions
+// where it is long. What is not in brackets goes on one step further in.
+func (w *printer) statement(indent, head string, p piece, tail string) {
+	column := len(indent) + len(head)
+	hang := len(indent) + 8
+	if !p.closed() && column+len(p.flat())+len(tail) > lineWidth {
+		w.line("%s%s%s%s", indent, head, p.layoutHanging(column, len(indent)+4, len(tail)), tail)
+		return
+	}
+	w.line("%s%s%s%s", indent, head, p.layout(column, hang, len(tail)), tail)
 }
 
 // banner opens every file.

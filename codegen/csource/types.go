@@ -24,46 +24,107 @@ func storage(r logic.Range) string {
 	return "int32_t"
 }
 
-// typeOf is the C type of a variable.
-func typeOf(v *logic.Var) string {
-	if v.Kind == logic.Bool {
+// holds is what a type can hold.
+func holds(typ string) logic.Range {
+	switch typ {
+	case "uint8_t":
+		return logic.Range{Lo: 0, Hi: 255}
+	case "uint16_t":
+		return logic.Count
+	case "int8_t":
+		return logic.Range{Lo: -128, Hi: 127}
+	case "int16_t":
+		return logic.Int16
+	case "uint32_t":
+		return logic.Range{Lo: 0, Hi: 1<<32 - 1}
+	}
+	return logic.Int32
+}
+
+func unsigned(typ string) bool { return strings.HasPrefix(typ, "uint") }
+
+// typeOf is the C type of a variable, an input or an output.
+func (w *printer) typeOf(v *logic.Var) string {
+	switch {
+	case v.Kind == logic.Bool:
 		return "bool"
+	case w.isInput(v) && v.Signed:
+		return "int16_t"
+	case w.isInput(v), w.isFlags(v):
+		return "uint16_t"
+	case w.isOutput(v) && storage(v.Range) == "int8_t":
+		return "int16_t"
 	}
 	return storage(v.Range)
 }
 
-// inputType is what the board hands over: counts as they come.
-func inputType(v *logic.Var) string {
+// keptType is the type of a variable in the record: no bool, for what comes
+// back from a memory may be any pattern of bits.
+func keptType(v *logic.Var) string { return storage(v.Range) }
+
+func (w *printer) isInput(v *logic.Var) bool  { return among(w.p.Inputs, v) }
+func (w *printer) isOutput(v *logic.Var) bool { return among(w.p.Outputs, v) }
+func (w *printer) isLocal(v *logic.Var) bool  { return !w.isOutput(v) && among(w.p.Locals, v) }
+
+func (w *printer) isFlags(v *logic.Var) bool {
+	_, ok := w.gathered[v]
+	return ok
+}
+
+// read prints where a variable stands.
+func (w *printer) read(v *logic.Var) string {
+	name := w.vars[v]
 	switch {
-	case v.Kind == logic.Bool:
-		return "bool"
-	case v.Signed:
-		return "int16_t"
+	case w.isInput(v):
+		return "in->" + name
+	case w.isLocal(v):
+		return name
+	case w.isOutput(v):
+		return "out->" + name
 	}
-	return "uint16_t"
+	return "m->" + name
 }
 
-func (w *printer) enumName(v *logic.Var) string { return "enum " + w.lo + "_" + v.Name }
-
-func (w *printer) word(v *logic.Var, n int64) string {
-	return strings.ToUpper(w.lo + "_" + v.Name + "_" + v.Enum.Words[n].Name)
-}
-
-func (w *printer) macro(name string) string { return w.up + "_" + name }
-
-// literal is an integer constant of at least int16 width; a wider one carries
-// its width.
-func literal(v int64, wide bool) string {
+// literal is a signed integer constant: an int where it fits 16 bits and no
+// more is asked for, else as wide as an int32_t.
+func literal(v int64, k width) string {
 	switch {
 	case v == -1<<31:
 		return "(-INT32_C(2147483647) - 1)"
-	case wide || !logic.Int16.Holds(v):
+	case k == wide || !logic.Int16.Holds(v):
 		if v < 0 {
 			return fmt.Sprintf("(-INT32_C(%d))", -v)
 		}
 		return fmt.Sprintf("INT32_C(%d)", v)
+	case v == -32768:
+		return "(-32767 - 1)"
 	case v < 0:
 		return fmt.Sprintf("(%d)", v)
 	}
 	return fmt.Sprint(v)
+}
+
+// natural is an unsigned integer constant.
+func natural(v int64) string {
+	if v > 65535 {
+		return fmt.Sprintf("UINT32_C(%d)", v)
+	}
+	return fmt.Sprintf("%du", v)
+}
+
+// numeral is a constant of a type.
+func numeral(v int64, typ string) string {
+	switch {
+	case typ == "bool" && v != 0:
+		return "true"
+	case typ == "bool":
+		return "false"
+	case unsigned(typ):
+		return natural(v)
+	case v < 0 && v > -32768 && typ != "int32_t":
+		return fmt.Sprint(v)
+	case typ == "int32_t":
+		return literal(v, wide)
+	}
+	return literal(v, narrow)
 }

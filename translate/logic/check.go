@@ -144,7 +144,7 @@ func (k *checker) table(t *Table) {
 		if dx <= 0 {
 			k.fail("table %s: point %d is not right of the one before", t.Name, i)
 		}
-		if !Int32.Holds(dx*dy) || !Int32.Holds(-dx*dy) {
+		if !Int32.Holds(dx) || !Int32.Holds(dx*dy) || !Int32.Holds(-dx*dy) {
 			k.fail("table %s: piece %d overflows 32 bits", t.Name, i)
 		}
 	}
@@ -220,12 +220,18 @@ func (k *checker) block(b Block) {
 	case *Set:
 		k.set(b)
 	case *Timer:
+		if b.Restart == nil {
+			k.fail("%s: nothing restarts the timer; say False where nothing does", b.Var.Name)
+		}
 		k.truth(b.Restart)
 		k.truth(b.Hold)
 		k.limit(b.Var, b.Limit)
 	case *Flags:
 		if len(b.Bits) > maxBits {
 			k.fail("%s: %d conditions for %d bits", b.Out.Name, len(b.Bits), maxBits)
+		}
+		if most := int64(1)<<len(b.Bits) - 1; b.Out.Kind != Int || !(Range{0, most}).Within(b.Out.Range) {
+			k.fail("%s: its %d conditions can make %d, it holds %d..%d", b.Out.Name, len(b.Bits), most, b.Out.Range.Lo, b.Out.Range.Hi)
 		}
 		for _, f := range b.Bits {
 			k.truth(f.When)

@@ -76,6 +76,8 @@ func TestImpossibleStateGoesToSafe(t *testing.T) {
 	}
 }
 
+func boundTo(lo, hi int64) *Var { return intVar("bits", lo, hi) }
+
 // TestCheckRefuses puts one mistake at a time into a sound program.
 func TestCheckRefuses(t *testing.T) {
 	x, y := intVar("x", 0, 100), intVar("y", 0, 100)
@@ -100,6 +102,9 @@ func TestCheckRefuses(t *testing.T) {
 		"always true":             {base(&Set{Var: x, When: Ge(Use(in), Lit(0)), To: Lit(1)}, setY), "always comes out the same"},
 		"never true":              {base(&Set{Var: x, When: Gt(Prev(y), Lit(100)), To: Lit(1)}, setY), "always comes out the same"},
 		"wrong sort":              {base(&Set{Var: x, When: Lit(1), To: Lit(1)}, setY), "not a truth value"},
+		"flags without room":      {base(setY, &Flags{Out: boundTo(0, 1), Bits: []Flag{{Name: "a", When: Eq(Use(in), Lit(1))}, {Name: "b", When: Eq(Use(in), Lit(2))}}}), "can make 3, it holds 0..1"},
+		"timer never restarted":   {base(setY, &Timer{Var: x, Limit: one}), "nothing restarts the timer"},
+		"table too wide":          {&Program{ID: "t", Tables: []*Table{{Name: "tab", X: []int64{-1 << 31, 1<<31 - 1}, Y: []int64{5, 5}}}}, "overflows 32 bits"},
 		"timer without range":     {base(&Timer{Var: x, Limit: one, Restart: False()}, setY), "is not 0..ONE"},
 		"name taken":              {&Program{ID: "t", Inputs: []*Var{intVar("x", 0, 9)}, State: []*Var{x}, Order: []Block{&Set{Var: x, To: Lit(1)}}}, "there is a"},
 		"table goes back":         {&Program{ID: "t", Tables: []*Table{{Name: "tab", X: []int64{1, 1}, Y: []int64{0, 1}}}}, "is not right of"},

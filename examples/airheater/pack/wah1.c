@@ -34,10 +34,9 @@
 
 #include <stddef.h>
 
-/* These do not compile where an assumption of this file does not hold. */
-typedef char wah1_assert_int_has_16_bits[(((unsigned)-1) >= 0xFFFFu) ? 1 : -1];
-typedef char wah1_assert_division_cuts_off_towards_zero[(((-7) / 2) == -3) ? 1 : -1];
-
+/* Constants. What the program below can reach was worked out for these values: after a change in
+ * the plant, change the sheet and print the program anew.
+ */
 /* counts: lowest believable count, about -29.6 degC (electronics.sensors[0].valid, line 123):
  * platinum (IEC 60751)
  */
@@ -89,27 +88,25 @@ typedef char wah1_assert_division_cuts_off_towards_zero[(((-7) / 2) == -3) ? 1 :
  */
 #define WAH1_BURNER_CALL_EFFECT_WITHIN 631u
 /* counts: 7.16 K towards the set point (process.settles_on, line 19): 0.5 of the differential */
-#define WAH1_BURNER_CALL_EFFECT 5u
+#define WAH1_BURNER_CALL_EFFECT 5
 /* steps: runs for 6 min (timers[0].lasts, line 36): 6 min / 250 ms a step, rounded up */
 #define WAH1_RUN_ON_LASTS 1440u
 
-static uint16_t clamp_u16(uint16_t x, uint16_t low, uint16_t high)
+/* These do not compile where an assumption of this file does not hold. */
+typedef char wah1_int_has_16_bits[(((unsigned)-1) >= 0xFFFFu) ? 1 : -1];
+typedef char wah1_division_cuts_off_towards_zero[(((-7) / 2) == -3) ? 1 : -1];
+typedef char wah1_room_1[(WAH1_EXCHANGER_PROBE_CLEAR_AFTER <= 255u) ? 1 : -1];
+typedef char wah1_room_2[(WAH1_EXCHANGER_PROBE_PROVE_WITHIN <= 255u) ? 1 : -1];
+typedef char wah1_room_burner_call_effect_for[(WAH1_BURNER_CALL_EFFECT_WITHIN <= 65535u) ? 1 : -1];
+typedef char wah1_room_run_on_for[(WAH1_RUN_ON_LASTS <= 65535u) ? 1 : -1];
+
+/* x, held between low and high */
+static uint16_t wah1_clamp_u16(uint16_t x, uint16_t low, uint16_t high)
 {
     if (x < low) {
         return low;
     }
     return (x > high) ? high : x;
-}
-
-/* Check word of a record. It starts from a number that belongs to this program's record alone, and
- * no blank record has it.
- */
-static uint16_t check_word(const struct wah1_remembered *r)
-{
-    uint32_t word = UINT32_C(23131);
-
-    (void)r;
-    return (uint16_t)word;
 }
 
 /* platinum film probe clamped beside the old disc: is it believed? */
@@ -337,36 +334,19 @@ void wah1_start(struct wah1 *m, const struct wah1_remembered *r)
 
 bool wah1_remember(const struct wah1 *m, struct wah1_remembered *r)
 {
-    uint16_t check;
-    bool changed = false;
+    const bool changed = r->check != 23131u;
 
-    (void)m;
-    check = check_word(r);
-    if (r->check != check) {
-        r->check = check;
-        changed = true;
-    }
+    (void)m; /* nothing of this program survives a power cut */
+    r->check = 23131u;
     return changed;
 }
 
 void wah1_step(struct wah1 *m, const struct wah1_in *in, struct wah1_out *out)
 {
     /* platinum film probe clamped beside the old disc: this sample cannot be believed */
-    bool exchanger_probe_bad;
-    uint16_t exchanger_probe_now; /* this sample, or the last believable one */
-    uint16_t exchanger_probe_less; /* the smaller of the two before */
-    uint16_t exchanger_probe_more; /* the larger of the two before */
-    /* platinum film probe clamped beside the old disc: median of three believable samples */
-    uint16_t exchanger_probe_counts;
-    /* snap disc on the exchanger, starts the fan once it is warm: its contact is made */
-    bool fan_disc_contact;
-    bool exchanger_stat_contact; /* second disc, holds the exchanger down: its contact is made */
-    bool burner_call_wanted; /* the old wiring calls for it */
-    bool burner_call_effect_seen; /* the temperature has moved as it should */
-    bool fan_wanted; /* the old wiring calls for it */
-
-    exchanger_probe_bad = (in->exchanger_probe < WAH1_EXCHANGER_PROBE_LOWEST) ||
+    const bool exchanger_probe_bad = (in->exchanger_probe < WAH1_EXCHANGER_PROBE_LOWEST) ||
         (in->exchanger_probe > WAH1_EXCHANGER_PROBE_HIGHEST);
+
     if (exchanger_probe_bad) {
         /* a bad sample starts the count again */
         m->exchanger_probe_good_for = 0u;
@@ -375,24 +355,47 @@ void wah1_step(struct wah1 *m, const struct wah1_in *in, struct wah1_out *out)
     } else {
         /* stays */
     }
+
     wah1_exchanger_probe_state(m, exchanger_probe_bad);
-    exchanger_probe_now = (uint16_t)(exchanger_probe_bad
-        ? m->exchanger_probe_last : in->exchanger_probe);
-    exchanger_probe_less = (uint16_t)((m->exchanger_probe_last < m->exchanger_probe_before)
-        ? m->exchanger_probe_last : m->exchanger_probe_before);
-    exchanger_probe_more = (uint16_t)((m->exchanger_probe_last < m->exchanger_probe_before)
-        ? m->exchanger_probe_before : m->exchanger_probe_last);
-    exchanger_probe_counts = clamp_u16(exchanger_probe_now, exchanger_probe_less, exchanger_probe_more);
+
+    /* this sample, or the last believable one */
+    const uint16_t exchanger_probe_now = (uint16_t)(exchanger_probe_bad
+                                                    ? m->exchanger_probe_last
+                                                    : in->exchanger_probe);
+    /* the smaller of the two before */
+    const uint16_t exchanger_probe_less = (uint16_t)(
+            (m->exchanger_probe_last < m->exchanger_probe_before)
+            ? m->exchanger_probe_last : m->exchanger_probe_before);
+    /* the larger of the two before */
+    const uint16_t exchanger_probe_more = (uint16_t)(
+            (m->exchanger_probe_last < m->exchanger_probe_before)
+            ? m->exchanger_probe_before : m->exchanger_probe_last);
+    /* platinum film probe clamped beside the old disc: median of three believable samples */
+    const uint16_t exchanger_probe_counts = wah1_clamp_u16(exchanger_probe_now,
+                                                           exchanger_probe_less,
+                                                           exchanger_probe_more);
+
     if (!exchanger_probe_bad) {
         m->exchanger_probe_before = m->exchanger_probe_last;
     }
+
     m->exchanger_probe_last = exchanger_probe_now;
     wah1_fan_disc(m, exchanger_probe_counts);
-    fan_disc_contact = m->fan_disc == WAH1_FAN_DISC_MADE;
+
+    /* snap disc on the exchanger, starts the fan once it is warm: its contact is made */
+    const bool fan_disc_contact = m->fan_disc == WAH1_FAN_DISC_MADE;
+
     wah1_exchanger_stat(m, exchanger_probe_counts);
-    exchanger_stat_contact = m->exchanger_stat == WAH1_EXCHANGER_STAT_MADE;
-    burner_call_wanted = in->room_calls && exchanger_stat_contact;
-    burner_call_effect_seen = ((int32_t)exchanger_probe_counts - (int32_t)m->burner_call_effect_from) >= (int32_t)WAH1_BURNER_CALL_EFFECT;
+
+    /* second disc, holds the exchanger down: its contact is made */
+    const bool exchanger_stat_contact = m->exchanger_stat == WAH1_EXCHANGER_STAT_MADE;
+    /* the old wiring calls for it */
+    const bool burner_call_wanted = in->room_calls && exchanger_stat_contact;
+    /* the temperature has moved as it should */
+    const bool burner_call_effect_seen = ((int32_t)exchanger_probe_counts -
+                                          (int32_t)m->burner_call_effect_from) >=
+        (int32_t)WAH1_BURNER_CALL_EFFECT;
+
     if ((m->burner_call != WAH1_BURNER_CALL_ON) || burner_call_effect_seen) {
         m->burner_call_effect_for = 0u;
     } else if (m->burner_call_effect_for < WAH1_BURNER_CALL_EFFECT_WITHIN) {
@@ -400,26 +403,35 @@ void wah1_step(struct wah1 *m, const struct wah1_in *in, struct wah1_out *out)
     } else {
         /* stays */
     }
+
     if ((m->burner_call != WAH1_BURNER_CALL_ON) ||
         burner_call_effect_seen ||
         (exchanger_probe_counts < m->burner_call_effect_from)) {
         m->burner_call_effect_from = exchanger_probe_counts;
     }
+
     if (m->burner_call_effect_for >= WAH1_BURNER_CALL_EFFECT_WITHIN) {
         /* on, and nothing follows: is the probe in its pocket? */
         m->burner_call_no_effect = true;
     }
+
     wah1_burner_call(m, burner_call_wanted);
     out->burner_call = m->burner_call == WAH1_BURNER_CALL_ON;
     wah1_run_on(m, out);
-    fan_wanted = fan_disc_contact || (m->run_on == WAH1_RUN_ON_RUNNING);
+
+    /* the old wiring calls for it */
+    const bool fan_wanted = fan_disc_contact || (m->run_on == WAH1_RUN_ON_RUNNING);
+
     wah1_fan(m, fan_wanted);
     out->fan = m->fan == WAH1_FAN_ON;
-    out->fault = 0u;
+
+    uint16_t fault = 0u;
+
     if (m->exchanger_probe_state == WAH1_EXCHANGER_PROBE_STATE_FAULTY) {
-        out->fault = (uint16_t)(out->fault | WAH1_FAULT_EXCHANGER_PROBE);
+        fault = (uint16_t)(fault | WAH1_FAULT_EXCHANGER_PROBE);
     }
     if (m->burner_call_no_effect) {
-        out->fault = (uint16_t)(out->fault | WAH1_FAULT_BURNER_CALL_NO_EFFECT);
+        fault = (uint16_t)(fault | WAH1_FAULT_BURNER_CALL_NO_EFFECT);
     }
+    out->fault = fault;
 }

@@ -39,8 +39,10 @@
 #define WAH1_STEP_MS 250u /* ms from one call of wah1_step to the next */
 
 /* Bits of fault in struct wah1_out; 0 means none. */
-#define WAH1_FAULT_EXCHANGER_PROBE 0x0001u /* platinum film probe clamped beside the old disc: not believed */
-#define WAH1_FAULT_BURNER_CALL_NO_EFFECT 0x0002u /* call to the approved automatic burner control: on for long without effect on exchanger_probe */
+/* platinum film probe clamped beside the old disc: not believed */
+#define WAH1_FAULT_EXCHANGER_PROBE 0x0001u
+/* call to the approved automatic burner control: on for long without effect on exchanger_probe */
+#define WAH1_FAULT_BURNER_CALL_NO_EFFECT 0x0002u
 
 /* platinum film probe clamped beside the old disc: is it believed? */
 enum wah1_exchanger_probe_state {
@@ -88,8 +90,8 @@ struct wah1_in {
     uint16_t exchanger_probe; /* platinum film probe clamped beside the old disc, raw counts */
 };
 
-/* What the program wants. True means the load is on, or open. Which way the coil is driven follows
- * from what the load does with no supply:
+/* What the program wants. True means that the load is on, or open, whichever way its coil has to be
+ * driven for that: wah1_port.c does the rest.
  */
 struct wah1_out {
     bool burner_call; /* call to the approved automatic burner control; rests off, safe off */
@@ -97,7 +99,8 @@ struct wah1_out {
     uint16_t fault; /* 0: none; one bit for each fault */
 };
 
-/* What must survive a power cut. The check word tells a good record from blank or foreign memory.
+/* What must survive a power cut. The check word tells a good record from blank, torn or foreign
+ * memory.
  */
 struct wah1_remembered {
     uint16_t check; /* check word over the rest */

@@ -1,23 +1,32 @@
-/* wah1_port.c: main loop and board, to start from. This file is yours: it was written once and is
- * never overwritten. The functions of the board below do nothing yet; they leave every coil without
- * current. Fill in each of them, then take the line with WAH1_BOARD_IS_FILLED_IN out.
+/* wah1_port.c: main loop and board, to start from.
+ *
+ * This file is yours: it was written once and is never overwritten. The functions of the board,
+ * below the loop, do nothing yet. As they stand no coil gets current, and the loop stops at its
+ * first turn, because there is no clock.
+ *
+ * Still to be supplied: every function marked YOURS, the start of clock, pins and converter before
+ * the loop, the watchdog's own setting, and what the C library of the board needs.
  */
 #include "wah1_port.h"
 
 #include <stddef.h>
 
-/* Coils without current: what the loads do with no supply. */
+/* No current anywhere: what the loads do with no supply. */
 static void rest(void)
 {
-    wah1_port_drive_burner_call(false);
-    wah1_port_drive_fan(false);
+    wah1_port_drive_burner_call(false); /* burner_call then rests off */
+    wah1_port_drive_fan(false); /* fan then rests on */
 }
 
+/* From what the program wants to current in the coils. */
 static void drive(const struct wah1_out *out)
 {
-    /* call to the approved automatic burner control: rests off. */
+    /* call to the approved automatic burner control: rests off with no supply. Current where the
+     * program wants it.
+     */
     wah1_port_drive_burner_call(out->burner_call);
-    /* 0.75 kW fan through its contactor: rests on, so current in the coil takes it the other way.
+    /* 0.75 kW fan through its contactor: rests on with no supply, so it is current in the coil that
+     * takes it the other way. Current where the program does not want it.
      */
     wah1_port_drive_fan(!out->fan);
     wah1_port_show(out->fault);
@@ -25,13 +34,14 @@ static void drive(const struct wah1_out *out)
 
 static void sense(struct wah1_in *in)
 {
-    in->room_calls = wah1_port_room_calls();
-    in->air_proven = wah1_port_air_proven();
-    in->exchanger_probe = wah1_port_exchanger_probe();
+    in->room_calls = wah1_port_read_room_calls();
+    in->air_proven = wah1_port_read_air_proven();
+    in->exchanger_probe = wah1_port_read_exchanger_probe();
 }
 
-/* A step that comes late by one is made up for; more of them mean that the times of the program are
- * wrong, so the coils go without current and the watchdog is left to start the board anew.
+/* One step that comes late is made up for. More of them, or no clock, mean that the times of the
+ * program are wrong: the coils go without current, and the watchdog is left to start the board
+ * anew.
  */
 #define MOST_STEPS_AT_ONCE 2u
 
@@ -59,9 +69,10 @@ int main(void)
         while (due > 0u) {
             sense(&in);
             wah1_step(&m, &in, &out);
+            drive(&out);
             due--;
         }
-        drive(&out);
+        /* The loads first: a memory may take its time. */
         if (wah1_remember(&m, &kept)) {
             wah1_port_keep(&kept);
         }
@@ -70,59 +81,63 @@ int main(void)
 }
 
 /* The board. Nothing below is done yet. */
-#define WAH1_BOARD_IS_FILLED_IN 0 /* 1 once every function below does its work */
 
 uint16_t wah1_port_wait(void)
 {
-    /* wait for a hardware timer of WAH1_STEP_MS ms */
-    return (uint16_t)WAH1_BOARD_IS_FILLED_IN;
+    /* YOURS: wait for a hardware timer of WAH1_STEP_MS ms */
+    return 0u; /* no clock */
 }
 
-bool wah1_port_room_calls(void)
+bool wah1_port_read_room_calls(void)
 {
-    /* read the pin; which level a broken wire gives is said in the sheet */
+    /* YOURS: read the pin; which level a broken wire gives is said in the sheet */
     return false;
 }
 
-bool wah1_port_air_proven(void)
+bool wah1_port_read_air_proven(void)
 {
-    /* read the pin; which level a broken wire gives is said in the sheet */
+    /* YOURS: read the pin; which level a broken wire gives is said in the sheet */
     return false;
 }
 
-uint16_t wah1_port_exchanger_probe(void)
+uint16_t wah1_port_read_exchanger_probe(void)
 {
-    /* read the converter; 0 counts as a broken sensor */
+    /* YOURS: read the converter; 0 counts as a broken sensor */
     return 0u;
 }
 
-void wah1_port_drive_burner_call(bool driven)
+void wah1_port_drive_burner_call(bool current)
 {
-    (void)driven; /* set the pin */
+    /* YOURS: set the pin; it must be without current before the program starts, too */
+    (void)current;
 }
 
-void wah1_port_drive_fan(bool driven)
+void wah1_port_drive_fan(bool current)
 {
-    (void)driven; /* set the pin */
+    /* YOURS: set the pin; it must be without current before the program starts, too */
+    (void)current;
 }
 
 void wah1_port_show(uint16_t fault)
 {
-    (void)fault; /* show it */
+    /* YOURS: show it */
+    (void)fault;
 }
 
 bool wah1_port_recall(struct wah1_remembered *r)
 {
-    (void)r; /* read it from the memory that survives */
+    /* YOURS: read it from the memory that survives */
+    (void)r;
     return false;
 }
 
 void wah1_port_keep(const struct wah1_remembered *r)
 {
-    (void)r; /* write it to the memory that survives */
+    /* YOURS: write it to the memory that survives */
+    (void)r;
 }
 
 void wah1_port_alive(void)
 {
-    /* toggle the pin of the external watchdog */
+    /* YOURS: toggle the pin of the external watchdog */
 }

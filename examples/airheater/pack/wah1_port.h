@@ -36,33 +36,34 @@
 #include "wah1.h"
 
 /* Time. Returns once the next step is due, with the number of steps that have become due since the
- * last return: 1 when all is well, more when steps were missed.
+ * last return: 1 when all is well, more when steps were missed, 0 when there is no clock.
  */
 uint16_t wah1_port_wait(void);
 
 /* room thermostat, stays as it is */
-bool wah1_port_room_calls(void);
+bool wah1_port_read_room_calls(void);
 
 /* differential pressure switch over the fan */
-bool wah1_port_air_proven(void);
+bool wah1_port_read_air_proven(void);
 
 /* platinum film probe clamped beside the old disc, raw counts, as the converter gives them */
-uint16_t wah1_port_exchanger_probe(void);
+uint16_t wah1_port_read_exchanger_probe(void);
 
 /* Drives the coil or gate of call to the approved automatic burner control: true puts current into
  * it.
  */
-void wah1_port_drive_burner_call(bool driven);
+void wah1_port_drive_burner_call(bool current);
 
 /* Drives the coil or gate of 0.75 kW fan through its contactor: true puts current into it. */
-void wah1_port_drive_fan(bool driven);
+void wah1_port_drive_fan(bool current);
 
 /* Shows the faults to somebody: a lamp, a display, a bus. Bits are named in wah1.h. */
 void wah1_port_show(uint16_t fault);
 
-/* The memory that survives a power cut. Reading returns false where there is none or it cannot be
- * read. A write must not be torn: write a second copy, or let the check word find the torn one,
- * which then comes up tripped.
+/* The memory that survives a power cut, for a record of 2 bytes (sizeof, where the compiler leaves
+ * gaps). Reading returns false where there is none or it cannot be read. A write that is torn is
+ * found by the check word and comes up tripped; keep two copies in turn to avoid that.
+ * This program has nothing to remember: both may do nothing.
  */
 bool wah1_port_recall(struct wah1_remembered *r);
 void wah1_port_keep(const struct wah1_remembered *r);

@@ -29,10 +29,9 @@
 
 #include <stddef.h>
 
-/* These do not compile where an assumption of this file does not hold. */
-typedef char cal2_assert_int_has_16_bits[(((unsigned)-1) >= 0xFFFFu) ? 1 : -1];
-typedef char cal2_assert_division_cuts_off_towards_zero[(((-7) / 2) == -3) ? 1 : -1];
-
+/* Constants. What the program below can reach was worked out for these values: after a change in
+ * the plant, change the sheet and print the program anew.
+ */
 /* counts: lowest believable count, about 150.1 degC (assumed for electronics.sensors[0].valid: the
  * range of its kind, short of both rails): thermistor (beta)
  */
@@ -82,25 +81,24 @@ typedef char cal2_assert_division_cuts_off_towards_zero[(((-7) / 2) == -3) ? 1 :
  */
 #define CAL2_HEATER_EFFECT_WITHIN 6105u
 /* counts: 2.98 K towards the set point (process.settles_on, line 19): 0.5 of the differential */
-#define CAL2_HEATER_EFFECT 107u
+#define CAL2_HEATER_EFFECT 107
 
-static uint16_t clamp_u16(uint16_t x, uint16_t low, uint16_t high)
+/* These do not compile where an assumption of this file does not hold. */
+typedef char cal2_int_has_16_bits[(((unsigned)-1) >= 0xFFFFu) ? 1 : -1];
+typedef char cal2_division_cuts_off_towards_zero[(((-7) / 2) == -3) ? 1 : -1];
+typedef char cal2_room_tank_probe_good_for[(CAL2_TANK_PROBE_CLEAR_AFTER <= 255u) ? 1 : -1];
+typedef char cal2_room_tank_probe_state_for[(CAL2_TANK_PROBE_PROVE_WITHIN <= 255u) ? 1 : -1];
+typedef char cal2_room_heater_apart_for[(CAL2_HEATER_CONTACT_SETTLES <= 255u) ? 1 : -1];
+typedef char cal2_room_heater_effect_for[(CAL2_HEATER_EFFECT_WITHIN <= 65535u) ? 1 : -1];
+typedef char cal2_room_heater_for[(CAL2_HEATER_MIN_OFF <= 255u) ? 1 : -1];
+
+/* x, held between low and high */
+static uint16_t cal2_clamp_u16(uint16_t x, uint16_t low, uint16_t high)
 {
     if (x < low) {
         return low;
     }
     return (x > high) ? high : x;
-}
-
-/* Check word of a record. It starts from a number that belongs to this program's record alone, and
- * no blank record has it.
- */
-static uint16_t check_word(const struct cal2_remembered *r)
-{
-    uint32_t word = UINT32_C(23131);
-
-    (void)r;
-    return (uint16_t)word;
 }
 
 /* thermistor in the pocket of the old rod stat: is it believed? */
@@ -246,33 +244,19 @@ void cal2_start(struct cal2 *m, const struct cal2_remembered *r)
 
 bool cal2_remember(const struct cal2 *m, struct cal2_remembered *r)
 {
-    uint16_t check;
-    bool changed = false;
+    const bool changed = r->check != 23131u;
 
-    (void)m;
-    check = check_word(r);
-    if (r->check != check) {
-        r->check = check;
-        changed = true;
-    }
+    (void)m; /* nothing of this program survives a power cut */
+    r->check = 23131u;
     return changed;
 }
 
 void cal2_step(struct cal2 *m, const struct cal2_in *in, struct cal2_out *out)
 {
     /* thermistor in the pocket of the old rod stat: this sample cannot be believed */
-    bool tank_probe_bad;
-    uint16_t tank_probe_now; /* this sample, or the last believable one */
-    uint16_t tank_probe_less; /* the smaller of the two before */
-    uint16_t tank_probe_more; /* the larger of the two before */
-    /* thermistor in the pocket of the old rod stat: median of three believable samples */
-    uint16_t tank_probe_counts;
-    bool tank_stat_contact; /* rod immersion stat in the top boss: its contact is made */
-    bool heater_wanted; /* the old wiring calls for it */
-    bool heater_effect_seen; /* the temperature has moved as it should */
-
-    tank_probe_bad = (in->tank_probe < CAL2_TANK_PROBE_LOWEST) ||
+    const bool tank_probe_bad = (in->tank_probe < CAL2_TANK_PROBE_LOWEST) ||
         (in->tank_probe > CAL2_TANK_PROBE_HIGHEST);
+
     if (tank_probe_bad) {
         /* a bad sample starts the count again */
         m->tank_probe_good_for = 0u;
@@ -281,20 +265,35 @@ void cal2_step(struct cal2 *m, const struct cal2_in *in, struct cal2_out *out)
     } else {
         /* stays */
     }
+
     cal2_tank_probe_state(m, tank_probe_bad);
-    tank_probe_now = (uint16_t)(tank_probe_bad ? m->tank_probe_last : in->tank_probe);
-    tank_probe_less = (uint16_t)((m->tank_probe_last < m->tank_probe_before)
-        ? m->tank_probe_last : m->tank_probe_before);
-    tank_probe_more = (uint16_t)((m->tank_probe_last < m->tank_probe_before)
-        ? m->tank_probe_before : m->tank_probe_last);
-    tank_probe_counts = clamp_u16(tank_probe_now, tank_probe_less, tank_probe_more);
+
+    /* this sample, or the last believable one */
+    const uint16_t tank_probe_now = (uint16_t)(tank_probe_bad
+                                               ? m->tank_probe_last : in->tank_probe);
+    /* the smaller of the two before */
+    const uint16_t tank_probe_less = (uint16_t)((m->tank_probe_last < m->tank_probe_before)
+                                                ? m->tank_probe_last : m->tank_probe_before);
+    /* the larger of the two before */
+    const uint16_t tank_probe_more = (uint16_t)((m->tank_probe_last < m->tank_probe_before)
+                                                ? m->tank_probe_before : m->tank_probe_last);
+    /* thermistor in the pocket of the old rod stat: median of three believable samples */
+    const uint16_t tank_probe_counts = cal2_clamp_u16(tank_probe_now,
+                                                      tank_probe_less,
+                                                      tank_probe_more);
+
     if (!tank_probe_bad) {
         m->tank_probe_before = m->tank_probe_last;
     }
+
     m->tank_probe_last = tank_probe_now;
     cal2_tank_stat(m, tank_probe_counts);
-    tank_stat_contact = m->tank_stat == CAL2_TANK_STAT_MADE;
-    heater_wanted = tank_stat_contact && in->flow_proven;
+
+    /* rod immersion stat in the top boss: its contact is made */
+    const bool tank_stat_contact = m->tank_stat == CAL2_TANK_STAT_MADE;
+    /* the old wiring calls for it */
+    const bool heater_wanted = tank_stat_contact && in->flow_proven;
+
     if ((in->heater_seen && (m->heater == CAL2_HEATER_ON)) ||
         (!in->heater_seen && (m->heater != CAL2_HEATER_ON))) {
         m->heater_apart_for = 0u;
@@ -303,11 +302,16 @@ void cal2_step(struct cal2 *m, const struct cal2_in *in, struct cal2_out *out)
     } else {
         /* stays */
     }
+
     if ((m->heater_apart_for >= CAL2_HEATER_CONTACT_SETTLES) && in->heater_seen) {
         /* seen made although told to open; stays until the next start, for it must be looked at */
         m->heater_welded = true;
     }
-    heater_effect_seen = ((int32_t)m->heater_effect_from - (int32_t)tank_probe_counts) >= (int32_t)CAL2_HEATER_EFFECT;
+
+    /* the temperature has moved as it should */
+    const bool heater_effect_seen = ((int32_t)m->heater_effect_from - (int32_t)tank_probe_counts) >=
+        (int32_t)CAL2_HEATER_EFFECT;
+
     if ((m->heater != CAL2_HEATER_ON) || heater_effect_seen) {
         m->heater_effect_for = 0u;
     } else if (!in->limit_open && (m->heater_effect_for < CAL2_HEATER_EFFECT_WITHIN)) {
@@ -315,28 +319,34 @@ void cal2_step(struct cal2 *m, const struct cal2_in *in, struct cal2_out *out)
     } else {
         /* stays */
     }
+
     if ((m->heater != CAL2_HEATER_ON) ||
         heater_effect_seen ||
         (tank_probe_counts > m->heater_effect_from)) {
         m->heater_effect_from = tank_probe_counts;
     }
+
     if (m->heater_effect_for >= CAL2_HEATER_EFFECT_WITHIN) {
         /* on, and nothing follows: is the probe in its pocket? */
         m->heater_no_effect = true;
     }
+
     cal2_heater(m, in, heater_wanted);
     out->heater = m->heater == CAL2_HEATER_ON;
-    out->fault = 0u;
+
+    uint16_t fault = 0u;
+
     if (m->tank_probe_state == CAL2_TANK_PROBE_STATE_FAULTY) {
-        out->fault = (uint16_t)(out->fault | CAL2_FAULT_TANK_PROBE);
+        fault = (uint16_t)(fault | CAL2_FAULT_TANK_PROBE);
     }
     if (m->heater_welded) {
-        out->fault = (uint16_t)(out->fault | CAL2_FAULT_HEATER_WELDED);
+        fault = (uint16_t)(fault | CAL2_FAULT_HEATER_WELDED);
     }
     if ((m->heater_apart_for >= CAL2_HEATER_CONTACT_SETTLES) && !in->heater_seen) {
-        out->fault = (uint16_t)(out->fault | CAL2_FAULT_HEATER_NOT_MADE);
+        fault = (uint16_t)(fault | CAL2_FAULT_HEATER_NOT_MADE);
     }
     if (m->heater_no_effect) {
-        out->fault = (uint16_t)(out->fault | CAL2_FAULT_HEATER_NO_EFFECT);
+        fault = (uint16_t)(fault | CAL2_FAULT_HEATER_NO_EFFECT);
     }
+    out->fault = fault;
 }

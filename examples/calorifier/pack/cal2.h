@@ -34,10 +34,14 @@
 #define CAL2_STEP_MS 250u /* ms from one call of cal2_step to the next */
 
 /* Bits of fault in struct cal2_out; 0 means none. */
-#define CAL2_FAULT_TANK_PROBE 0x0001u /* thermistor in the pocket of the old rod stat: not believed */
-#define CAL2_FAULT_HEATER_WELDED 0x0002u /* 9 kW immersion heater through its contactor: the contact did not open */
-#define CAL2_FAULT_HEATER_NOT_MADE 0x0004u /* 9 kW immersion heater through its contactor: the contact did not make */
-#define CAL2_FAULT_HEATER_NO_EFFECT 0x0008u /* 9 kW immersion heater through its contactor: on for long without effect on tank_probe */
+/* thermistor in the pocket of the old rod stat: not believed */
+#define CAL2_FAULT_TANK_PROBE 0x0001u
+/* 9 kW immersion heater through its contactor: the contact did not open */
+#define CAL2_FAULT_HEATER_WELDED 0x0002u
+/* 9 kW immersion heater through its contactor: the contact did not make */
+#define CAL2_FAULT_HEATER_NOT_MADE 0x0004u
+/* 9 kW immersion heater through its contactor: on for long without effect on tank_probe */
+#define CAL2_FAULT_HEATER_NO_EFFECT 0x0008u
 
 /* thermistor in the pocket of the old rod stat: is it believed? */
 enum cal2_tank_probe_state {
@@ -67,15 +71,16 @@ struct cal2_in {
     bool heater_seen; /* read-back contact of 9 kW immersion heater through its contactor */
 };
 
-/* What the program wants. True means the load is on, or open. Which way the coil is driven follows
- * from what the load does with no supply:
+/* What the program wants. True means that the load is on, or open, whichever way its coil has to be
+ * driven for that: cal2_port.c does the rest.
  */
 struct cal2_out {
     bool heater; /* 9 kW immersion heater through its contactor; rests off, safe off */
     uint16_t fault; /* 0: none; one bit for each fault */
 };
 
-/* What must survive a power cut. The check word tells a good record from blank or foreign memory.
+/* What must survive a power cut. The check word tells a good record from blank, torn or foreign
+ * memory.
  */
 struct cal2_remembered {
     uint16_t check; /* check word over the rest */

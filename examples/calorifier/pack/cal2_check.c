@@ -31,317 +31,362 @@
 #include <stdio.h>
 #include <string.h>
 
-/* Inputs held for so many steps; the outputs after each odd and each even step of them; the state
- * after the last.
- */
-struct row {
-    uint32_t steps;
-    struct cal2_in in;
-    struct cal2_out odd;
-    struct cal2_out even;
-    struct cal2 after;
-};
-
+/* What has been compared, and where the comparison stands. */
 static unsigned long passed;
 static unsigned long failed;
+static const char *doing = "";
+static unsigned long vector_now;
+static unsigned long row_now;
+static unsigned long step_now;
 
-static void verdict(bool good, const char *what, unsigned long vector, unsigned long row, unsigned long step)
+#define MOST_SHOWN 20ul
+
+static bool bad;
+
+static void compare(const char *what, long got, long wanted)
 {
-    if (good) {
-        passed++;
+    if (got == wanted) {
         return;
     }
-    failed++;
-    if (failed <= 20ul) {
-        (void)printf("vector %lu row %lu step %lu: %s differs\n", vector, row, step, what);
+    bad = true;
+    if (failed < MOST_SHOWN) {
+        (void)printf("%s, vector %lu row %lu step %lu: %s is %ld, wanted %ld\n", doing, vector_now,
+                     row_now, step_now, what, got, wanted);
     }
 }
 
+static void verdict(void)
+{
+    if (bad) {
+        failed++;
+    } else {
+        passed++;
+    }
+    bad = false;
+}
+
+static void compare_out(const struct cal2_out *got, const struct cal2_out *wanted)
+{
+    compare("heater", (long)got->heater, (long)wanted->heater);
+    compare("fault", (long)got->fault, (long)wanted->fault);
+    verdict();
+}
+
+static void compare_state(const struct cal2 *got, const struct cal2 *wanted)
+{
+    compare("tank_probe_good_for",
+            (long)got->tank_probe_good_for,
+            (long)wanted->tank_probe_good_for);
+    compare("tank_probe_state", (long)got->tank_probe_state, (long)wanted->tank_probe_state);
+    compare("tank_probe_state_for",
+            (long)got->tank_probe_state_for,
+            (long)wanted->tank_probe_state_for);
+    compare("tank_probe_last", (long)got->tank_probe_last, (long)wanted->tank_probe_last);
+    compare("tank_probe_before", (long)got->tank_probe_before, (long)wanted->tank_probe_before);
+    compare("tank_stat", (long)got->tank_stat, (long)wanted->tank_stat);
+    compare("heater", (long)got->heater, (long)wanted->heater);
+    compare("heater_for", (long)got->heater_for, (long)wanted->heater_for);
+    compare("heater_apart_for", (long)got->heater_apart_for, (long)wanted->heater_apart_for);
+    compare("heater_welded", (long)got->heater_welded, (long)wanted->heater_welded);
+    compare("heater_effect_from", (long)got->heater_effect_from, (long)wanted->heater_effect_from);
+    compare("heater_effect_for", (long)got->heater_effect_for, (long)wanted->heater_effect_for);
+    compare("heater_no_effect", (long)got->heater_no_effect, (long)wanted->heater_no_effect);
+    verdict();
+}
+
+/* Inputs held for so many steps; the outputs after each of them; the state after the last. */
+struct row {
+    uint32_t steps;
+    struct cal2_in in;
+    struct cal2_out out;
+    struct cal2 after;
+};
+
 static const struct row rows[] = {
     /* vector 1 */
-    {1u, {false, false, 1972u, false}, {false, 0u}, {false, 0u},
-     {1u, 0u, 1u, 1972u, 0u, 0u, 0u, 1u, 0u, false, 0u, 0u, false}},
-    {1u, {false, false, 1972u, false}, {false, 0u}, {false, 0u},
-     {2u, 0u, 2u, 1972u, 1972u, 0u, 0u, 2u, 0u, false, 1972u, 0u, false}},
-    {1u, {false, false, 1972u, false}, {false, 0u}, {false, 0u},
-     {3u, 0u, 3u, 1972u, 1972u, 0u, 0u, 3u, 0u, false, 1972u, 0u, false}},
-    {1u, {false, false, 1972u, false}, {false, 0u}, {false, 0u},
-     {4u, 1u, 0u, 1972u, 1972u, 0u, 0u, 4u, 0u, false, 1972u, 0u, false}},
-    {1u, {false, false, 1972u, false}, {false, 0u}, {false, 0u},
-     {5u, 1u, 1u, 1972u, 1972u, 0u, 0u, 5u, 0u, false, 1972u, 0u, false}},
-    {11u, {false, false, 1972u, false}, {false, 0u}, {false, 0u},
-     {16u, 1u, 12u, 1972u, 1972u, 0u, 0u, 16u, 0u, false, 1972u, 0u, false}},
-    {1u, {false, false, 1972u, false}, {false, 0u}, {false, 0u},
-     {17u, 1u, 12u, 1972u, 1972u, 0u, 0u, 17u, 0u, false, 1972u, 0u, false}},
-    {23u, {false, false, 1972u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1972u, 1972u, 0u, 0u, 40u, 0u, false, 1972u, 0u, false}},
-    {1u, {false, false, 1972u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1972u, 1972u, 0u, 0u, 41u, 0u, false, 1972u, 0u, false}},
-    {199u, {false, false, 1972u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1972u, 1972u, 0u, 0u, 240u, 0u, false, 1972u, 0u, false}},
-    {1u, {false, false, 1972u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1972u, 1972u, 0u, 0u, 240u, 0u, false, 1972u, 0u, false}},
-    {1u, {true, false, 1972u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1972u, 1972u, 0u, 0u, 240u, 0u, false, 1972u, 0u, false}},
-    {1u, {false, false, 0u, false}, {false, 0u}, {false, 0u},
-     {0u, 2u, 0u, 1972u, 1972u, 0u, 0u, 240u, 0u, false, 1972u, 0u, false}},
+    {1u, {false, false, 1972u, false}, {false, 0u}, {1u, 0u, 1u, 1972u, 0u, 0u, 0u, 1u, 0u, false,
+     0u, 0u, false}},
+    {1u, {false, false, 1972u, false}, {false, 0u}, {2u, 0u, 2u, 1972u, 1972u, 0u, 0u, 2u, 0u,
+     false, 1972u, 0u, false}},
+    {1u, {false, false, 1972u, false}, {false, 0u}, {3u, 0u, 3u, 1972u, 1972u, 0u, 0u, 3u, 0u,
+     false, 1972u, 0u, false}},
+    {1u, {false, false, 1972u, false}, {false, 0u}, {4u, 1u, 0u, 1972u, 1972u, 0u, 0u, 4u, 0u,
+     false, 1972u, 0u, false}},
+    {1u, {false, false, 1972u, false}, {false, 0u}, {5u, 1u, 1u, 1972u, 1972u, 0u, 0u, 5u, 0u,
+     false, 1972u, 0u, false}},
+    {11u, {false, false, 1972u, false}, {false, 0u}, {16u, 1u, 12u, 1972u, 1972u, 0u, 0u, 16u, 0u,
+     false, 1972u, 0u, false}},
+    {1u, {false, false, 1972u, false}, {false, 0u}, {17u, 1u, 12u, 1972u, 1972u, 0u, 0u, 17u, 0u,
+     false, 1972u, 0u, false}},
+    {23u, {false, false, 1972u, false}, {false, 0u}, {40u, 1u, 12u, 1972u, 1972u, 0u, 0u, 40u, 0u,
+     false, 1972u, 0u, false}},
+    {1u, {false, false, 1972u, false}, {false, 0u}, {40u, 1u, 12u, 1972u, 1972u, 0u, 0u, 41u, 0u,
+     false, 1972u, 0u, false}},
+    {199u, {false, false, 1972u, false}, {false, 0u}, {40u, 1u, 12u, 1972u, 1972u, 0u, 0u, 240u, 0u,
+     false, 1972u, 0u, false}},
+    {1u, {false, false, 1972u, false}, {false, 0u}, {40u, 1u, 12u, 1972u, 1972u, 0u, 0u, 240u, 0u,
+     false, 1972u, 0u, false}},
+    {1u, {true, false, 1972u, false}, {false, 0u}, {40u, 1u, 12u, 1972u, 1972u, 0u, 0u, 240u, 0u,
+     false, 1972u, 0u, false}},
+    {1u, {false, false, 0u, false}, {false, 0u}, {0u, 2u, 0u, 1972u, 1972u, 0u, 0u, 240u, 0u, false,
+     1972u, 0u, false}},
     /* vector 2 */
-    {11u, {false, false, 0u, false}, {false, 0u}, {false, 0u},
-     {0u, 0u, 11u, 0u, 0u, 0u, 0u, 11u, 0u, false, 0u, 0u, false}},
-    {1u, {false, false, 0u, false}, {false, 1u}, {false, 1u},
-     {0u, 3u, 0u, 0u, 0u, 0u, 0u, 12u, 0u, false, 0u, 0u, false}},
-    {1u, {false, false, 0u, false}, {false, 1u}, {false, 1u},
-     {0u, 3u, 1u, 0u, 0u, 0u, 0u, 13u, 0u, false, 0u, 0u, false}},
-    {1u, {false, false, 226u, false}, {false, 1u}, {false, 1u},
-     {0u, 3u, 2u, 0u, 0u, 0u, 0u, 14u, 0u, false, 0u, 0u, false}},
-    {1u, {false, false, 227u, false}, {false, 1u}, {false, 1u},
-     {1u, 3u, 3u, 227u, 0u, 0u, 0u, 15u, 0u, false, 0u, 0u, false}},
-    {2u, {false, false, 1973u, false}, {false, 1u}, {false, 1u},
-     {3u, 3u, 5u, 1973u, 1973u, 0u, 0u, 17u, 0u, false, 1973u, 0u, false}},
+    {11u, {false, false, 0u, false}, {false, 0u}, {0u, 0u, 11u, 0u, 0u, 0u, 0u, 11u, 0u, false, 0u,
+     0u, false}},
+    {1u, {false, false, 0u, false}, {false, 1u}, {0u, 3u, 0u, 0u, 0u, 0u, 0u, 12u, 0u, false, 0u,
+     0u, false}},
+    {1u, {false, false, 0u, false}, {false, 1u}, {0u, 3u, 1u, 0u, 0u, 0u, 0u, 13u, 0u, false, 0u,
+     0u, false}},
+    {1u, {false, false, 226u, false}, {false, 1u}, {0u, 3u, 2u, 0u, 0u, 0u, 0u, 14u, 0u, false, 0u,
+     0u, false}},
+    {1u, {false, false, 227u, false}, {false, 1u}, {1u, 3u, 3u, 227u, 0u, 0u, 0u, 15u, 0u, false,
+     0u, 0u, false}},
+    {2u, {false, false, 1973u, false}, {false, 1u}, {3u, 3u, 5u, 1973u, 1973u, 0u, 0u, 17u, 0u,
+     false, 1973u, 0u, false}},
     /* vector 3 */
-    {2u, {false, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {2u, 0u, 2u, 1973u, 1973u, 0u, 0u, 2u, 0u, false, 1973u, 0u, false}},
-    {2u, {false, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {4u, 1u, 0u, 1973u, 1973u, 1u, 0u, 4u, 0u, false, 1973u, 0u, false}},
-    {1u, {false, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {5u, 1u, 1u, 1973u, 1973u, 1u, 0u, 5u, 0u, false, 1973u, 0u, false}},
-    {235u, {false, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 240u, 0u, false, 1973u, 0u, false}},
+    {2u, {false, false, 1973u, false}, {false, 0u}, {2u, 0u, 2u, 1973u, 1973u, 0u, 0u, 2u, 0u,
+     false, 1973u, 0u, false}},
+    {2u, {false, false, 1973u, false}, {false, 0u}, {4u, 1u, 0u, 1973u, 1973u, 1u, 0u, 4u, 0u,
+     false, 1973u, 0u, false}},
+    {1u, {false, false, 1973u, false}, {false, 0u}, {5u, 1u, 1u, 1973u, 1973u, 1u, 0u, 5u, 0u,
+     false, 1973u, 0u, false}},
+    {235u, {false, false, 1973u, false}, {false, 0u}, {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 240u, 0u,
+     false, 1973u, 0u, false}},
     /* vector 4 */
-    {4u, {false, false, 1974u, false}, {false, 0u}, {false, 0u},
-     {4u, 1u, 0u, 1974u, 1974u, 1u, 0u, 4u, 0u, false, 1974u, 0u, false}},
-    {1u, {false, false, 4085u, false}, {false, 0u}, {false, 0u},
-     {5u, 1u, 1u, 4085u, 1974u, 1u, 0u, 5u, 0u, false, 1974u, 0u, false}},
-    {1u, {false, false, 4086u, false}, {false, 0u}, {false, 0u},
-     {0u, 2u, 0u, 4085u, 1974u, 1u, 0u, 6u, 0u, false, 4085u, 0u, false}},
-    {1u, {false, false, 1972u, true}, {false, 0u}, {false, 0u},
-     {1u, 2u, 1u, 1972u, 4085u, 1u, 0u, 7u, 1u, false, 1974u, 0u, false}},
+    {4u, {false, false, 1974u, false}, {false, 0u}, {4u, 1u, 0u, 1974u, 1974u, 1u, 0u, 4u, 0u,
+     false, 1974u, 0u, false}},
+    {1u, {false, false, 4085u, false}, {false, 0u}, {5u, 1u, 1u, 4085u, 1974u, 1u, 0u, 5u, 0u,
+     false, 1974u, 0u, false}},
+    {1u, {false, false, 4086u, false}, {false, 0u}, {0u, 2u, 0u, 4085u, 1974u, 1u, 0u, 6u, 0u,
+     false, 4085u, 0u, false}},
+    {1u, {false, false, 1972u, true}, {false, 0u}, {1u, 2u, 1u, 1972u, 4085u, 1u, 0u, 7u, 1u, false,
+     1974u, 0u, false}},
     /* vector 5 */
-    {1u, {false, false, 1972u, true}, {false, 0u}, {false, 0u},
-     {1u, 0u, 1u, 1972u, 0u, 0u, 0u, 1u, 1u, false, 0u, 0u, false}},
-    {2u, {false, false, 1972u, true}, {false, 0u}, {false, 0u},
-     {3u, 0u, 3u, 1972u, 1972u, 0u, 0u, 3u, 3u, false, 1972u, 0u, false}},
-    {1u, {false, false, 1972u, true}, {false, 2u}, {false, 2u},
-     {4u, 1u, 0u, 1972u, 1972u, 0u, 0u, 4u, 4u, true, 1972u, 0u, false}},
-    {1u, {false, false, 1972u, true}, {false, 2u}, {false, 2u},
-     {5u, 1u, 1u, 1972u, 1972u, 0u, 0u, 5u, 4u, true, 1972u, 0u, false}},
-    {1u, {false, false, 2079u, false}, {false, 2u}, {false, 2u},
-     {6u, 1u, 2u, 2079u, 1972u, 0u, 0u, 6u, 0u, true, 1972u, 0u, false}},
-    {1u, {false, false, 4086u, false}, {false, 2u}, {false, 2u},
-     {0u, 2u, 0u, 2079u, 1972u, 0u, 0u, 7u, 0u, true, 2079u, 0u, false}},
-    {1u, {true, false, 1973u, false}, {false, 2u}, {false, 2u},
-     {1u, 2u, 1u, 1973u, 2079u, 0u, 0u, 8u, 0u, true, 1973u, 0u, false}},
-    {1u, {true, false, 1973u, false}, {false, 2u}, {false, 2u},
-     {2u, 2u, 2u, 1973u, 1973u, 0u, 0u, 9u, 0u, true, 1973u, 0u, false}},
-    {1u, {true, false, 1973u, false}, {false, 2u}, {false, 2u},
-     {3u, 2u, 3u, 1973u, 1973u, 0u, 0u, 10u, 0u, true, 1973u, 0u, false}},
-    {1u, {true, false, 1972u, false}, {false, 2u}, {false, 2u},
-     {4u, 1u, 0u, 1972u, 1973u, 1u, 0u, 11u, 0u, true, 1973u, 0u, false}},
-    {1u, {true, false, 1973u, false}, {false, 2u}, {false, 2u},
-     {5u, 1u, 1u, 1973u, 1972u, 1u, 0u, 12u, 0u, true, 1973u, 0u, false}},
+    {1u, {false, false, 1972u, true}, {false, 0u}, {1u, 0u, 1u, 1972u, 0u, 0u, 0u, 1u, 1u, false,
+     0u, 0u, false}},
+    {2u, {false, false, 1972u, true}, {false, 0u}, {3u, 0u, 3u, 1972u, 1972u, 0u, 0u, 3u, 3u, false,
+     1972u, 0u, false}},
+    {1u, {false, false, 1972u, true}, {false, 2u}, {4u, 1u, 0u, 1972u, 1972u, 0u, 0u, 4u, 4u, true,
+     1972u, 0u, false}},
+    {1u, {false, false, 1972u, true}, {false, 2u}, {5u, 1u, 1u, 1972u, 1972u, 0u, 0u, 5u, 4u, true,
+     1972u, 0u, false}},
+    {1u, {false, false, 2079u, false}, {false, 2u}, {6u, 1u, 2u, 2079u, 1972u, 0u, 0u, 6u, 0u, true,
+     1972u, 0u, false}},
+    {1u, {false, false, 4086u, false}, {false, 2u}, {0u, 2u, 0u, 2079u, 1972u, 0u, 0u, 7u, 0u, true,
+     2079u, 0u, false}},
+    {1u, {true, false, 1973u, false}, {false, 2u}, {1u, 2u, 1u, 1973u, 2079u, 0u, 0u, 8u, 0u, true,
+     1973u, 0u, false}},
+    {1u, {true, false, 1973u, false}, {false, 2u}, {2u, 2u, 2u, 1973u, 1973u, 0u, 0u, 9u, 0u, true,
+     1973u, 0u, false}},
+    {1u, {true, false, 1973u, false}, {false, 2u}, {3u, 2u, 3u, 1973u, 1973u, 0u, 0u, 10u, 0u, true,
+     1973u, 0u, false}},
+    {1u, {true, false, 1972u, false}, {false, 2u}, {4u, 1u, 0u, 1972u, 1973u, 1u, 0u, 11u, 0u, true,
+     1973u, 0u, false}},
+    {1u, {true, false, 1973u, false}, {false, 2u}, {5u, 1u, 1u, 1973u, 1972u, 1u, 0u, 12u, 0u, true,
+     1973u, 0u, false}},
     /* vector 6 */
-    {5u, {false, false, 1972u, false}, {false, 0u}, {false, 0u},
-     {5u, 1u, 1u, 1972u, 1972u, 0u, 0u, 5u, 0u, false, 1972u, 0u, false}},
-    {1u, {false, false, 2079u, false}, {false, 0u}, {false, 0u},
-     {6u, 1u, 2u, 2079u, 1972u, 0u, 0u, 6u, 0u, false, 1972u, 0u, false}},
-    {1u, {false, false, 4086u, false}, {false, 0u}, {false, 0u},
-     {0u, 2u, 0u, 2079u, 1972u, 0u, 0u, 7u, 0u, false, 2079u, 0u, false}},
-    {3u, {true, false, 2187u, false}, {false, 0u}, {false, 0u},
-     {3u, 2u, 3u, 2187u, 2187u, 0u, 0u, 10u, 0u, false, 2187u, 0u, false}},
-    {1u, {true, false, 227u, false}, {false, 0u}, {false, 0u},
-     {4u, 1u, 0u, 227u, 2187u, 1u, 0u, 11u, 0u, false, 2187u, 0u, false}},
-    {1u, {true, false, 227u, false}, {false, 0u}, {false, 0u},
-     {5u, 1u, 1u, 227u, 227u, 0u, 0u, 12u, 0u, false, 227u, 0u, false}},
-    {240u, {false, false, 4084u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 4084u, 4084u, 1u, 0u, 240u, 0u, false, 4084u, 0u, false}},
-    {1u, {false, true, 65535u, false}, {false, 0u}, {false, 0u},
-     {0u, 2u, 0u, 4084u, 4084u, 1u, 0u, 240u, 0u, false, 4084u, 0u, false}},
-    {1u, {true, true, 65535u, false}, {false, 0u}, {false, 0u},
-     {0u, 2u, 1u, 4084u, 4084u, 1u, 0u, 240u, 0u, false, 4084u, 0u, false}},
-    {3u, {true, false, 226u, true}, {false, 0u}, {false, 0u},
-     {0u, 2u, 4u, 4084u, 4084u, 1u, 0u, 240u, 3u, false, 4084u, 0u, false}},
-    {3u, {true, false, 226u, true}, {false, 2u}, {false, 2u},
-     {0u, 2u, 7u, 4084u, 4084u, 1u, 0u, 240u, 4u, true, 4084u, 0u, false}},
-    {1u, {true, true, 226u, true}, {false, 3u}, {false, 3u},
-     {0u, 3u, 0u, 4084u, 4084u, 0u, 0u, 240u, 4u, true, 4084u, 0u, false}},
-    {39u, {true, true, 4084u, true}, {false, 3u}, {false, 3u},
-     {39u, 3u, 12u, 4084u, 4084u, 0u, 0u, 240u, 4u, true, 4084u, 0u, false}},
-    {1u, {true, true, 1750u, false}, {false, 2u}, {false, 2u},
-     {40u, 1u, 0u, 1750u, 4084u, 1u, 0u, 240u, 0u, true, 4084u, 0u, false}},
-    {1u, {true, true, 1750u, false}, {false, 2u}, {false, 2u},
-     {40u, 1u, 1u, 1750u, 1750u, 1u, 0u, 240u, 0u, true, 1750u, 0u, false}},
+    {5u, {false, false, 1972u, false}, {false, 0u}, {5u, 1u, 1u, 1972u, 1972u, 0u, 0u, 5u, 0u,
+     false, 1972u, 0u, false}},
+    {1u, {false, false, 2079u, false}, {false, 0u}, {6u, 1u, 2u, 2079u, 1972u, 0u, 0u, 6u, 0u,
+     false, 1972u, 0u, false}},
+    {1u, {false, false, 4086u, false}, {false, 0u}, {0u, 2u, 0u, 2079u, 1972u, 0u, 0u, 7u, 0u,
+     false, 2079u, 0u, false}},
+    {3u, {true, false, 2187u, false}, {false, 0u}, {3u, 2u, 3u, 2187u, 2187u, 0u, 0u, 10u, 0u,
+     false, 2187u, 0u, false}},
+    {1u, {true, false, 227u, false}, {false, 0u}, {4u, 1u, 0u, 227u, 2187u, 1u, 0u, 11u, 0u, false,
+     2187u, 0u, false}},
+    {1u, {true, false, 227u, false}, {false, 0u}, {5u, 1u, 1u, 227u, 227u, 0u, 0u, 12u, 0u, false,
+     227u, 0u, false}},
+    {240u, {false, false, 4084u, false}, {false, 0u}, {40u, 1u, 12u, 4084u, 4084u, 1u, 0u, 240u, 0u,
+     false, 4084u, 0u, false}},
+    {1u, {false, true, 65535u, false}, {false, 0u}, {0u, 2u, 0u, 4084u, 4084u, 1u, 0u, 240u, 0u,
+     false, 4084u, 0u, false}},
+    {1u, {true, true, 65535u, false}, {false, 0u}, {0u, 2u, 1u, 4084u, 4084u, 1u, 0u, 240u, 0u,
+     false, 4084u, 0u, false}},
+    {3u, {true, false, 226u, true}, {false, 0u}, {0u, 2u, 4u, 4084u, 4084u, 1u, 0u, 240u, 3u, false,
+     4084u, 0u, false}},
+    {3u, {true, false, 226u, true}, {false, 2u}, {0u, 2u, 7u, 4084u, 4084u, 1u, 0u, 240u, 4u, true,
+     4084u, 0u, false}},
+    {1u, {true, true, 226u, true}, {false, 3u}, {0u, 3u, 0u, 4084u, 4084u, 0u, 0u, 240u, 4u, true,
+     4084u, 0u, false}},
+    {39u, {true, true, 4084u, true}, {false, 3u}, {39u, 3u, 12u, 4084u, 4084u, 0u, 0u, 240u, 4u,
+     true, 4084u, 0u, false}},
+    {1u, {true, true, 1750u, false}, {false, 2u}, {40u, 1u, 0u, 1750u, 4084u, 1u, 0u, 240u, 0u,
+     true, 4084u, 0u, false}},
+    {1u, {true, true, 1750u, false}, {false, 2u}, {40u, 1u, 1u, 1750u, 1750u, 1u, 0u, 240u, 0u,
+     true, 1750u, 0u, false}},
     /* vector 7 */
-    {5u, {false, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {5u, 1u, 1u, 1973u, 1973u, 1u, 0u, 5u, 0u, false, 1973u, 0u, false}},
-    {234u, {true, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 239u, 0u, false, 1973u, 0u, false}},
-    {1u, {true, false, 1750u, false}, {true, 0u}, {true, 0u},
-     {40u, 1u, 12u, 1750u, 1973u, 1u, 1u, 0u, 0u, false, 1973u, 0u, false}},
-    {1u, {true, false, 1750u, false}, {true, 0u}, {true, 0u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 1u, 1u, false, 1750u, 0u, false}},
-    {1u, {true, false, 1750u, false}, {true, 0u}, {true, 0u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 2u, 2u, false, 1750u, 1u, false}},
-    {1u, {true, false, 1750u, false}, {true, 0u}, {true, 0u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 3u, 3u, false, 1750u, 2u, false}},
-    {1u, {true, false, 1750u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 4u, 4u, false, 1750u, 3u, false}},
-    {1u, {false, false, 1750u, false}, {false, 4u}, {false, 4u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 0u, 0u, 4u, false, 1750u, 4u, false}},
-    {5u, {false, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 5u, 0u, false, 1973u, 0u, false}},
-    {234u, {true, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 239u, 0u, false, 1973u, 0u, false}},
-    {3u, {true, false, 1750u, false}, {true, 0u}, {true, 0u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 2u, 2u, false, 1750u, 1u, false}},
-    {1u, {false, true, 1750u, true}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 0u, 0u, 0u, false, 1750u, 1u, false}},
-    {5u, {false, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 5u, 0u, false, 1973u, 0u, false}},
-    {234u, {true, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 239u, 0u, false, 1973u, 0u, false}},
-    {3u, {true, false, 1750u, false}, {true, 0u}, {true, 0u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 2u, 2u, false, 1750u, 1u, false}},
-    {1u, {true, false, 228u, false}, {true, 0u}, {true, 0u},
-     {40u, 1u, 12u, 228u, 1750u, 1u, 1u, 3u, 3u, false, 1750u, 2u, false}},
-    {1u, {true, false, 65535u, false}, {true, 4u}, {true, 4u},
-     {0u, 2u, 0u, 228u, 1750u, 0u, 1u, 4u, 4u, false, 228u, 0u, false}},
-    {1u, {true, false, 1858u, false}, {true, 4u}, {true, 4u},
-     {1u, 2u, 1u, 1858u, 228u, 0u, 1u, 5u, 4u, false, 1750u, 1u, false}},
-    {115u, {true, false, 1973u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 1973u, 1973u, 1u, 1u, 120u, 4u, false, 1973u, 116u, false}},
-    {5u, {true, false, 1750u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 125u, 4u, false, 1750u, 3u, false}},
-    {6101u, {true, false, 1750u, true}, {true, 0u}, {true, 0u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 240u, 0u, false, 1750u, 6104u, false}},
-    {1u, {true, false, 1750u, true}, {false, 8u}, {false, 8u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 0u, 0u, 0u, false, 1750u, 6105u, true}},
+    {5u, {false, false, 1973u, false}, {false, 0u}, {5u, 1u, 1u, 1973u, 1973u, 1u, 0u, 5u, 0u,
+     false, 1973u, 0u, false}},
+    {234u, {true, false, 1973u, false}, {false, 0u}, {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 239u, 0u,
+     false, 1973u, 0u, false}},
+    {1u, {true, false, 1750u, false}, {true, 0u}, {40u, 1u, 12u, 1750u, 1973u, 1u, 1u, 0u, 0u,
+     false, 1973u, 0u, false}},
+    {1u, {true, false, 1750u, false}, {true, 0u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 1u, 1u,
+     false, 1750u, 0u, false}},
+    {1u, {true, false, 1750u, false}, {true, 0u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 2u, 2u,
+     false, 1750u, 1u, false}},
+    {1u, {true, false, 1750u, false}, {true, 0u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 3u, 3u,
+     false, 1750u, 2u, false}},
+    {1u, {true, false, 1750u, false}, {true, 4u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 4u, 4u,
+     false, 1750u, 3u, false}},
+    {1u, {false, false, 1750u, false}, {false, 4u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 0u, 0u, 4u,
+     false, 1750u, 4u, false}},
+    {5u, {false, false, 1973u, false}, {false, 0u}, {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 5u, 0u,
+     false, 1973u, 0u, false}},
+    {234u, {true, false, 1973u, false}, {false, 0u}, {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 239u, 0u,
+     false, 1973u, 0u, false}},
+    {3u, {true, false, 1750u, false}, {true, 0u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 2u, 2u,
+     false, 1750u, 1u, false}},
+    {1u, {false, true, 1750u, true}, {false, 0u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 0u, 0u, 0u,
+     false, 1750u, 1u, false}},
+    {5u, {false, false, 1973u, false}, {false, 0u}, {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 5u, 0u,
+     false, 1973u, 0u, false}},
+    {234u, {true, false, 1973u, false}, {false, 0u}, {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 239u, 0u,
+     false, 1973u, 0u, false}},
+    {3u, {true, false, 1750u, false}, {true, 0u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 2u, 2u,
+     false, 1750u, 1u, false}},
+    {1u, {true, false, 228u, false}, {true, 0u}, {40u, 1u, 12u, 228u, 1750u, 1u, 1u, 3u, 3u, false,
+     1750u, 2u, false}},
+    {1u, {true, false, 65535u, false}, {true, 4u}, {0u, 2u, 0u, 228u, 1750u, 0u, 1u, 4u, 4u, false,
+     228u, 0u, false}},
+    {1u, {true, false, 1858u, false}, {true, 4u}, {1u, 2u, 1u, 1858u, 228u, 0u, 1u, 5u, 4u, false,
+     1750u, 1u, false}},
+    {115u, {true, false, 1973u, false}, {true, 4u}, {40u, 1u, 12u, 1973u, 1973u, 1u, 1u, 120u, 4u,
+     false, 1973u, 116u, false}},
+    {5u, {true, false, 1750u, false}, {true, 4u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 125u, 4u,
+     false, 1750u, 3u, false}},
+    {6101u, {true, false, 1750u, true}, {true, 0u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 240u, 0u,
+     false, 1750u, 6104u, false}},
+    {1u, {true, false, 1750u, true}, {false, 8u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 0u, 0u, 0u,
+     false, 1750u, 6105u, true}},
     /* vector 8 */
-    {5u, {false, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {5u, 1u, 1u, 1973u, 1973u, 1u, 0u, 5u, 0u, false, 1973u, 0u, false}},
-    {234u, {true, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 239u, 0u, false, 1973u, 0u, false}},
-    {3u, {true, false, 1750u, false}, {true, 0u}, {true, 0u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 2u, 2u, false, 1750u, 1u, false}},
-    {1u, {true, false, 228u, false}, {true, 0u}, {true, 0u},
-     {40u, 1u, 12u, 228u, 1750u, 1u, 1u, 3u, 3u, false, 1750u, 2u, false}},
-    {1u, {true, false, 1972u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 1972u, 228u, 1u, 1u, 4u, 4u, false, 1750u, 3u, false}},
-    {1u, {true, false, 0u, false}, {true, 4u}, {true, 4u},
-     {0u, 2u, 0u, 1972u, 228u, 1u, 1u, 5u, 4u, false, 1972u, 4u, false}},
-    {1u, {true, false, 227u, false}, {true, 4u}, {true, 4u},
-     {1u, 2u, 1u, 227u, 1972u, 0u, 1u, 6u, 4u, false, 228u, 0u, false}},
-    {1u, {false, false, 227u, false}, {false, 4u}, {false, 4u},
-     {2u, 2u, 2u, 227u, 227u, 0u, 0u, 0u, 4u, false, 228u, 1u, false}},
-    {5u, {false, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {7u, 1u, 3u, 1973u, 1973u, 1u, 0u, 5u, 0u, false, 1973u, 0u, false}},
-    {234u, {true, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 239u, 0u, false, 1973u, 0u, false}},
-    {3u, {true, false, 1750u, false}, {true, 0u}, {true, 0u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 2u, 2u, false, 1750u, 1u, false}},
-    {1u, {true, false, 228u, false}, {true, 0u}, {true, 0u},
-     {40u, 1u, 12u, 228u, 1750u, 1u, 1u, 3u, 3u, false, 1750u, 2u, false}},
-    {1u, {true, false, 1972u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 1972u, 228u, 1u, 1u, 4u, 4u, false, 1750u, 3u, false}},
-    {1u, {true, false, 0u, false}, {true, 4u}, {true, 4u},
-     {0u, 2u, 0u, 1972u, 228u, 1u, 1u, 5u, 4u, false, 1972u, 4u, false}},
-    {114u, {true, false, 227u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 227u, 227u, 0u, 1u, 119u, 4u, false, 228u, 113u, false}},
-    {1u, {true, false, 227u, false}, {false, 4u}, {false, 4u},
-     {40u, 1u, 12u, 227u, 227u, 0u, 0u, 0u, 4u, false, 228u, 114u, false}},
-    {8u, {true, false, 4085u, true}, {false, 2u}, {false, 2u},
-     {40u, 1u, 12u, 4085u, 4085u, 1u, 0u, 8u, 4u, true, 4085u, 0u, false}},
-    {1u, {true, false, 4084u, true}, {false, 2u}, {false, 2u},
-     {40u, 1u, 12u, 4084u, 4085u, 1u, 0u, 9u, 4u, true, 4085u, 0u, false}},
-    {1u, {true, false, 4192u, true}, {false, 2u}, {false, 2u},
-     {0u, 2u, 0u, 4084u, 4085u, 1u, 0u, 10u, 4u, true, 4084u, 0u, false}},
+    {5u, {false, false, 1973u, false}, {false, 0u}, {5u, 1u, 1u, 1973u, 1973u, 1u, 0u, 5u, 0u,
+     false, 1973u, 0u, false}},
+    {234u, {true, false, 1973u, false}, {false, 0u}, {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 239u, 0u,
+     false, 1973u, 0u, false}},
+    {3u, {true, false, 1750u, false}, {true, 0u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 2u, 2u,
+     false, 1750u, 1u, false}},
+    {1u, {true, false, 228u, false}, {true, 0u}, {40u, 1u, 12u, 228u, 1750u, 1u, 1u, 3u, 3u, false,
+     1750u, 2u, false}},
+    {1u, {true, false, 1972u, false}, {true, 4u}, {40u, 1u, 12u, 1972u, 228u, 1u, 1u, 4u, 4u, false,
+     1750u, 3u, false}},
+    {1u, {true, false, 0u, false}, {true, 4u}, {0u, 2u, 0u, 1972u, 228u, 1u, 1u, 5u, 4u, false,
+     1972u, 4u, false}},
+    {1u, {true, false, 227u, false}, {true, 4u}, {1u, 2u, 1u, 227u, 1972u, 0u, 1u, 6u, 4u, false,
+     228u, 0u, false}},
+    {1u, {false, false, 227u, false}, {false, 4u}, {2u, 2u, 2u, 227u, 227u, 0u, 0u, 0u, 4u, false,
+     228u, 1u, false}},
+    {5u, {false, false, 1973u, false}, {false, 0u}, {7u, 1u, 3u, 1973u, 1973u, 1u, 0u, 5u, 0u,
+     false, 1973u, 0u, false}},
+    {234u, {true, false, 1973u, false}, {false, 0u}, {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 239u, 0u,
+     false, 1973u, 0u, false}},
+    {3u, {true, false, 1750u, false}, {true, 0u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 2u, 2u,
+     false, 1750u, 1u, false}},
+    {1u, {true, false, 228u, false}, {true, 0u}, {40u, 1u, 12u, 228u, 1750u, 1u, 1u, 3u, 3u, false,
+     1750u, 2u, false}},
+    {1u, {true, false, 1972u, false}, {true, 4u}, {40u, 1u, 12u, 1972u, 228u, 1u, 1u, 4u, 4u, false,
+     1750u, 3u, false}},
+    {1u, {true, false, 0u, false}, {true, 4u}, {0u, 2u, 0u, 1972u, 228u, 1u, 1u, 5u, 4u, false,
+     1972u, 4u, false}},
+    {114u, {true, false, 227u, false}, {true, 4u}, {40u, 1u, 12u, 227u, 227u, 0u, 1u, 119u, 4u,
+     false, 228u, 113u, false}},
+    {1u, {true, false, 227u, false}, {false, 4u}, {40u, 1u, 12u, 227u, 227u, 0u, 0u, 0u, 4u, false,
+     228u, 114u, false}},
+    {8u, {true, false, 4085u, true}, {false, 2u}, {40u, 1u, 12u, 4085u, 4085u, 1u, 0u, 8u, 4u, true,
+     4085u, 0u, false}},
+    {1u, {true, false, 4084u, true}, {false, 2u}, {40u, 1u, 12u, 4084u, 4085u, 1u, 0u, 9u, 4u, true,
+     4085u, 0u, false}},
+    {1u, {true, false, 4192u, true}, {false, 2u}, {0u, 2u, 0u, 4084u, 4085u, 1u, 0u, 10u, 4u, true,
+     4084u, 0u, false}},
     /* vector 9 */
-    {5u, {false, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {5u, 1u, 1u, 1973u, 1973u, 1u, 0u, 5u, 0u, false, 1973u, 0u, false}},
-    {234u, {true, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 239u, 0u, false, 1973u, 0u, false}},
-    {4u, {true, false, 1750u, false}, {true, 0u}, {true, 0u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 3u, 3u, false, 1750u, 2u, false}},
-    {1u, {true, false, 1750u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 4u, 4u, false, 1750u, 3u, false}},
-    {116u, {true, false, 1973u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 1973u, 1973u, 1u, 1u, 120u, 4u, false, 1973u, 119u, false}},
-    {1u, {true, false, 1748u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 1748u, 1973u, 1u, 1u, 121u, 4u, false, 1973u, 120u, false}},
-    {1u, {true, false, 1748u, false}, {false, 4u}, {false, 4u},
-     {40u, 1u, 12u, 1748u, 1748u, 0u, 0u, 0u, 4u, false, 1748u, 0u, false}},
-    {8u, {true, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 8u, 0u, false, 1973u, 0u, false}},
-    {1u, {true, false, 1750u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1750u, 1973u, 1u, 0u, 9u, 0u, false, 1973u, 0u, false}},
-    {1u, {false, false, 1750u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 0u, 10u, 0u, false, 1750u, 0u, false}},
-    {2u, {false, false, 1749u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1749u, 1749u, 0u, 0u, 12u, 0u, false, 1749u, 0u, false}},
-    {227u, {true, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 239u, 0u, false, 1973u, 0u, false}},
-    {4u, {true, false, 1973u, false}, {true, 0u}, {true, 0u},
-     {40u, 1u, 12u, 1973u, 1973u, 1u, 1u, 3u, 3u, false, 1973u, 3u, false}},
-    {3u, {true, false, 1973u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 1973u, 1973u, 1u, 1u, 6u, 4u, false, 1973u, 6u, false}},
-    {3u, {true, false, 1750u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 9u, 4u, false, 1750u, 1u, false}},
-    {1u, {true, false, 228u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 228u, 1750u, 1u, 1u, 10u, 4u, false, 1750u, 2u, false}},
-    {1u, {true, false, 1972u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 1972u, 228u, 1u, 1u, 11u, 4u, false, 1750u, 3u, false}},
-    {118u, {true, false, 1974u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 1974u, 1974u, 1u, 1u, 129u, 4u, false, 1974u, 121u, false}},
-    {5983u, {true, false, 2083u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 2083u, 2083u, 1u, 1u, 240u, 4u, false, 2083u, 6104u, false}},
-    {1u, {true, false, 2083u, false}, {false, 12u}, {false, 12u},
-     {40u, 1u, 12u, 2083u, 2083u, 1u, 0u, 0u, 4u, false, 2083u, 6105u, true}},
-    {240u, {true, false, 2083u, false}, {false, 8u}, {false, 8u},
-     {40u, 1u, 12u, 2083u, 2083u, 1u, 0u, 240u, 0u, false, 2083u, 0u, true}},
+    {5u, {false, false, 1973u, false}, {false, 0u}, {5u, 1u, 1u, 1973u, 1973u, 1u, 0u, 5u, 0u,
+     false, 1973u, 0u, false}},
+    {234u, {true, false, 1973u, false}, {false, 0u}, {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 239u, 0u,
+     false, 1973u, 0u, false}},
+    {4u, {true, false, 1750u, false}, {true, 0u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 3u, 3u,
+     false, 1750u, 2u, false}},
+    {1u, {true, false, 1750u, false}, {true, 4u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 4u, 4u,
+     false, 1750u, 3u, false}},
+    {116u, {true, false, 1973u, false}, {true, 4u}, {40u, 1u, 12u, 1973u, 1973u, 1u, 1u, 120u, 4u,
+     false, 1973u, 119u, false}},
+    {1u, {true, false, 1748u, false}, {true, 4u}, {40u, 1u, 12u, 1748u, 1973u, 1u, 1u, 121u, 4u,
+     false, 1973u, 120u, false}},
+    {1u, {true, false, 1748u, false}, {false, 4u}, {40u, 1u, 12u, 1748u, 1748u, 0u, 0u, 0u, 4u,
+     false, 1748u, 0u, false}},
+    {8u, {true, false, 1973u, false}, {false, 0u}, {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 8u, 0u,
+     false, 1973u, 0u, false}},
+    {1u, {true, false, 1750u, false}, {false, 0u}, {40u, 1u, 12u, 1750u, 1973u, 1u, 0u, 9u, 0u,
+     false, 1973u, 0u, false}},
+    {1u, {false, false, 1750u, false}, {false, 0u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 0u, 10u, 0u,
+     false, 1750u, 0u, false}},
+    {2u, {false, false, 1749u, false}, {false, 0u}, {40u, 1u, 12u, 1749u, 1749u, 0u, 0u, 12u, 0u,
+     false, 1749u, 0u, false}},
+    {227u, {true, false, 1973u, false}, {false, 0u}, {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 239u, 0u,
+     false, 1973u, 0u, false}},
+    {4u, {true, false, 1973u, false}, {true, 0u}, {40u, 1u, 12u, 1973u, 1973u, 1u, 1u, 3u, 3u,
+     false, 1973u, 3u, false}},
+    {3u, {true, false, 1973u, false}, {true, 4u}, {40u, 1u, 12u, 1973u, 1973u, 1u, 1u, 6u, 4u,
+     false, 1973u, 6u, false}},
+    {3u, {true, false, 1750u, false}, {true, 4u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 9u, 4u,
+     false, 1750u, 1u, false}},
+    {1u, {true, false, 228u, false}, {true, 4u}, {40u, 1u, 12u, 228u, 1750u, 1u, 1u, 10u, 4u, false,
+     1750u, 2u, false}},
+    {1u, {true, false, 1972u, false}, {true, 4u}, {40u, 1u, 12u, 1972u, 228u, 1u, 1u, 11u, 4u,
+     false, 1750u, 3u, false}},
+    {118u, {true, false, 1974u, false}, {true, 4u}, {40u, 1u, 12u, 1974u, 1974u, 1u, 1u, 129u, 4u,
+     false, 1974u, 121u, false}},
+    {5983u, {true, false, 2083u, false}, {true, 4u}, {40u, 1u, 12u, 2083u, 2083u, 1u, 1u, 240u, 4u,
+     false, 2083u, 6104u, false}},
+    {1u, {true, false, 2083u, false}, {false, 12u}, {40u, 1u, 12u, 2083u, 2083u, 1u, 0u, 0u, 4u,
+     false, 2083u, 6105u, true}},
+    {240u, {true, false, 2083u, false}, {false, 8u}, {40u, 1u, 12u, 2083u, 2083u, 1u, 0u, 240u, 0u,
+     false, 2083u, 0u, true}},
     /* vector 10 */
-    {5u, {false, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {5u, 1u, 1u, 1973u, 1973u, 1u, 0u, 5u, 0u, false, 1973u, 0u, false}},
-    {234u, {true, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 239u, 0u, false, 1973u, 0u, false}},
-    {4u, {true, false, 1750u, false}, {true, 0u}, {true, 0u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 3u, 3u, false, 1750u, 2u, false}},
-    {2u, {true, true, 4086u, false}, {true, 4u}, {true, 4u},
-     {0u, 2u, 1u, 1750u, 1750u, 1u, 1u, 5u, 4u, false, 1750u, 2u, false}},
-    {4u, {true, true, 4086u, true}, {true, 0u}, {true, 0u},
-     {0u, 2u, 5u, 1750u, 1750u, 1u, 1u, 9u, 0u, false, 1750u, 2u, false}},
-    {1u, {true, false, 4086u, true}, {true, 0u}, {true, 0u},
-     {0u, 2u, 6u, 1750u, 1750u, 1u, 1u, 10u, 0u, false, 1750u, 3u, false}},
-    {1u, {true, false, 4085u, true}, {true, 0u}, {true, 0u},
-     {1u, 2u, 7u, 4085u, 1750u, 1u, 1u, 11u, 0u, false, 1750u, 4u, false}},
-    {1u, {true, false, 4085u, true}, {false, 1u}, {false, 1u},
-     {2u, 3u, 0u, 4085u, 4085u, 0u, 0u, 0u, 0u, false, 4085u, 5u, false}},
-    {37u, {true, false, 1973u, false}, {false, 1u}, {false, 1u},
-     {39u, 3u, 12u, 1973u, 1973u, 0u, 0u, 37u, 0u, false, 1973u, 0u, false}},
-    {197u, {true, false, 1973u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 234u, 0u, false, 1973u, 0u, false}},
-    {3u, {true, false, 1750u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 0u, 237u, 0u, false, 1750u, 0u, false}},
-    {1u, {true, false, 228u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 228u, 1750u, 1u, 0u, 238u, 0u, false, 1750u, 0u, false}},
-    {1u, {true, false, 1972u, false}, {false, 0u}, {false, 0u},
-     {40u, 1u, 12u, 1972u, 228u, 1u, 0u, 239u, 0u, false, 1750u, 0u, false}},
-    {1u, {true, false, 1974u, false}, {true, 0u}, {true, 0u},
-     {40u, 1u, 12u, 1974u, 1972u, 1u, 1u, 0u, 0u, false, 1972u, 0u, false}},
-    {3u, {true, false, 2083u, false}, {true, 0u}, {true, 0u},
-     {40u, 1u, 12u, 2083u, 2083u, 1u, 1u, 3u, 3u, false, 2083u, 3u, false}},
-    {1u, {true, false, 1976u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 1976u, 2083u, 1u, 1u, 4u, 4u, false, 2083u, 4u, false}},
-    {1u, {true, false, 228u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 228u, 1976u, 1u, 1u, 5u, 4u, false, 1976u, 0u, false}},
-    {4u, {true, false, 2083u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 2083u, 2083u, 1u, 1u, 9u, 4u, false, 2083u, 4u, false}},
-    {1u, {true, false, 2084u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 2084u, 2083u, 1u, 1u, 10u, 4u, false, 2083u, 5u, false}},
-    {1u, {true, false, 2191u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 2191u, 2084u, 1u, 1u, 11u, 4u, false, 2084u, 6u, false}},
-    {3u, {true, true, 1750u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 14u, 4u, false, 1750u, 0u, false}},
-    {2u, {true, true, 1644u, false}, {true, 4u}, {true, 4u},
-     {40u, 1u, 12u, 1644u, 1644u, 0u, 1u, 16u, 4u, false, 1750u, 0u, false}},
+    {5u, {false, false, 1973u, false}, {false, 0u}, {5u, 1u, 1u, 1973u, 1973u, 1u, 0u, 5u, 0u,
+     false, 1973u, 0u, false}},
+    {234u, {true, false, 1973u, false}, {false, 0u}, {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 239u, 0u,
+     false, 1973u, 0u, false}},
+    {4u, {true, false, 1750u, false}, {true, 0u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 3u, 3u,
+     false, 1750u, 2u, false}},
+    {2u, {true, true, 4086u, false}, {true, 4u}, {0u, 2u, 1u, 1750u, 1750u, 1u, 1u, 5u, 4u, false,
+     1750u, 2u, false}},
+    {4u, {true, true, 4086u, true}, {true, 0u}, {0u, 2u, 5u, 1750u, 1750u, 1u, 1u, 9u, 0u, false,
+     1750u, 2u, false}},
+    {1u, {true, false, 4086u, true}, {true, 0u}, {0u, 2u, 6u, 1750u, 1750u, 1u, 1u, 10u, 0u, false,
+     1750u, 3u, false}},
+    {1u, {true, false, 4085u, true}, {true, 0u}, {1u, 2u, 7u, 4085u, 1750u, 1u, 1u, 11u, 0u, false,
+     1750u, 4u, false}},
+    {1u, {true, false, 4085u, true}, {false, 1u}, {2u, 3u, 0u, 4085u, 4085u, 0u, 0u, 0u, 0u, false,
+     4085u, 5u, false}},
+    {37u, {true, false, 1973u, false}, {false, 1u}, {39u, 3u, 12u, 1973u, 1973u, 0u, 0u, 37u, 0u,
+     false, 1973u, 0u, false}},
+    {197u, {true, false, 1973u, false}, {false, 0u}, {40u, 1u, 12u, 1973u, 1973u, 1u, 0u, 234u, 0u,
+     false, 1973u, 0u, false}},
+    {3u, {true, false, 1750u, false}, {false, 0u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 0u, 237u, 0u,
+     false, 1750u, 0u, false}},
+    {1u, {true, false, 228u, false}, {false, 0u}, {40u, 1u, 12u, 228u, 1750u, 1u, 0u, 238u, 0u,
+     false, 1750u, 0u, false}},
+    {1u, {true, false, 1972u, false}, {false, 0u}, {40u, 1u, 12u, 1972u, 228u, 1u, 0u, 239u, 0u,
+     false, 1750u, 0u, false}},
+    {1u, {true, false, 1974u, false}, {true, 0u}, {40u, 1u, 12u, 1974u, 1972u, 1u, 1u, 0u, 0u,
+     false, 1972u, 0u, false}},
+    {3u, {true, false, 2083u, false}, {true, 0u}, {40u, 1u, 12u, 2083u, 2083u, 1u, 1u, 3u, 3u,
+     false, 2083u, 3u, false}},
+    {1u, {true, false, 1976u, false}, {true, 4u}, {40u, 1u, 12u, 1976u, 2083u, 1u, 1u, 4u, 4u,
+     false, 2083u, 4u, false}},
+    {1u, {true, false, 228u, false}, {true, 4u}, {40u, 1u, 12u, 228u, 1976u, 1u, 1u, 5u, 4u, false,
+     1976u, 0u, false}},
+    {4u, {true, false, 2083u, false}, {true, 4u}, {40u, 1u, 12u, 2083u, 2083u, 1u, 1u, 9u, 4u,
+     false, 2083u, 4u, false}},
+    {1u, {true, false, 2084u, false}, {true, 4u}, {40u, 1u, 12u, 2084u, 2083u, 1u, 1u, 10u, 4u,
+     false, 2083u, 5u, false}},
+    {1u, {true, false, 2191u, false}, {true, 4u}, {40u, 1u, 12u, 2191u, 2084u, 1u, 1u, 11u, 4u,
+     false, 2084u, 6u, false}},
+    {3u, {true, true, 1750u, false}, {true, 4u}, {40u, 1u, 12u, 1750u, 1750u, 1u, 1u, 14u, 4u,
+     false, 1750u, 0u, false}},
+    {2u, {true, true, 1644u, false}, {true, 4u}, {40u, 1u, 12u, 1644u, 1644u, 0u, 1u, 16u, 4u,
+     false, 1750u, 0u, false}},
 };
 
 /* Where each vector begins and ends in the rows, and the record that it starts with. */
@@ -365,30 +410,7 @@ static const struct vector vectors[] = {
     {115u, 137u, false, {0u}},
 };
 
-static bool same_out(const struct cal2_out *a, const struct cal2_out *b)
-{
-    return (a->heater == b->heater) &&
-           (a->fault == b->fault);
-}
-
-static bool same_state(const struct cal2 *a, const struct cal2 *b)
-{
-    return (a->tank_probe_good_for == b->tank_probe_good_for) &&
-           (a->tank_probe_state == b->tank_probe_state) &&
-           (a->tank_probe_state_for == b->tank_probe_state_for) &&
-           (a->tank_probe_last == b->tank_probe_last) &&
-           (a->tank_probe_before == b->tank_probe_before) &&
-           (a->tank_stat == b->tank_stat) &&
-           (a->heater == b->heater) &&
-           (a->heater_for == b->heater_for) &&
-           (a->heater_apart_for == b->heater_apart_for) &&
-           (a->heater_welded == b->heater_welded) &&
-           (a->heater_effect_from == b->heater_effect_from) &&
-           (a->heater_effect_for == b->heater_effect_for) &&
-           (a->heater_no_effect == b->heater_no_effect);
-}
-
-static void run(const struct vector *v, unsigned long number)
+static void run(const struct vector *v)
 {
     struct cal2 m;
     struct cal2_out out;
@@ -399,36 +421,49 @@ static void run(const struct vector *v, unsigned long number)
     (void)memset(&out, 0, sizeof out);
     cal2_start(&m, v->has_record ? &v->record : NULL);
     for (i = v->first; i < v->end; i++) {
+        row_now = (unsigned long)(i - v->first) + 1ul;
         for (n = 0u; n < rows[i].steps; n++) {
+            step_now = (unsigned long)n + 1ul;
             cal2_step(&m, &rows[i].in, &out);
-            verdict(same_out(&out, ((n & 1u) == 0u) ? &rows[i].odd : &rows[i].even), "output", number, (unsigned long)(i - v->first), (unsigned long)n);
+            compare_out(&out, &rows[i].out);
         }
-        verdict(same_state(&m, &rows[i].after), "state", number, (unsigned long)(i - v->first), (unsigned long)n);
+        compare_state(&m, &rows[i].after);
     }
 }
 
-static const struct cal2 first = {0u, 0u, 0u, 0u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false};
+static const struct cal2 fresh =
+    {0u, 0u, 0u, 0u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false};
+
+static void start_and_compare(const char *what, const struct cal2_remembered *r,
+                              const struct cal2 *wanted)
+{
+    struct cal2 m;
+
+    doing = what;
+    (void)memset(&m, 0x5A, sizeof m);
+    cal2_start(&m, r);
+    compare_state(&m, wanted);
+}
 
 static void records(void)
 {
-    struct cal2 fresh;
     struct cal2 m;
     struct cal2_remembered r;
 
-    (void)memset(&m, 0x5A, sizeof m);
-    (void)memset(&fresh, 0xA5, sizeof fresh);
-    cal2_start(&fresh, NULL);
-    verdict(same_state(&fresh, &first), "start without a record", 0ul, 0ul, 0ul);
-
+    start_and_compare("start without a record", NULL, &fresh);
     (void)memset(&r, 0x00, sizeof r);
-    cal2_start(&m, &r);
-    verdict(same_state(&m, &fresh), "start with a blank record", 0ul, 0ul, 0ul);
+    start_and_compare("start with a blank record", &r, &fresh);
     (void)memset(&r, 0xFF, sizeof r);
-    cal2_start(&m, &r);
-    verdict(same_state(&m, &fresh), "start with an erased record", 0ul, 0ul, 0ul);
-    (void)memset(&r, 0, sizeof r);
-    verdict(cal2_remember(&fresh, &r), "a new record to write", 0ul, 0ul, 0ul);
-    verdict(!cal2_remember(&fresh, &r), "no record to write", 0ul, 0ul, 0ul);
+    start_and_compare("start with an erased record", &r, &fresh);
+
+    doing = "record";
+    m = fresh;
+    (void)memset(&r, 0x00, sizeof r);
+    compare("changed", cal2_remember(&m, &r) ? 1l : 0l, 1l);
+    verdict();
+    compare("changed", cal2_remember(&m, &r) ? 1l : 0l, 0l);
+    verdict();
+    start_and_compare("start with its own record", &r, &fresh);
 }
 
 static void upset(void)
@@ -438,30 +473,99 @@ static void upset(void)
     struct cal2_out out;
 
     (void)memset(&in, 0, sizeof in);
-    cal2_start(&m, NULL);
-    m.tank_probe_state = 255u;
-    cal2_step(&m, &in, &out);
-    verdict(m.tank_probe_state == (uint8_t)CAL2_TANK_PROBE_STATE_FAULTY, "tank_probe_state after an upset", 0ul, 0ul, 0ul);
-    cal2_start(&m, NULL);
-    m.tank_stat = 255u;
-    cal2_step(&m, &in, &out);
-    verdict(m.tank_stat == (uint8_t)CAL2_TANK_STAT_OPEN, "tank_stat after an upset", 0ul, 0ul, 0ul);
-    cal2_start(&m, NULL);
-    m.heater = 255u;
-    cal2_step(&m, &in, &out);
-    verdict(m.heater == (uint8_t)CAL2_HEATER_OFF, "heater after an upset", 0ul, 0ul, 0ul);
-    (void)m;
-    (void)in;
-    (void)out;
+    (void)memset(&out, 0, sizeof out);
+    {
+        static const struct cal2 after =
+           {0u, 3u, 0u, 0u, 0u, 0u, 0u, 1u, 0u, false, 0u, 0u, false};
+        static const struct cal2_out wanted =
+           {false, 1u};
+
+        doing = "tank_probe_state upset";
+        cal2_start(&m, NULL);
+        m.tank_probe_state = 4u;
+        cal2_step(&m, &in, &out);
+        compare_out(&out, &wanted);
+        compare_state(&m, &after);
+    }
+    {
+        static const struct cal2 after =
+           {0u, 3u, 0u, 0u, 0u, 0u, 0u, 1u, 0u, false, 0u, 0u, false};
+        static const struct cal2_out wanted =
+           {false, 1u};
+
+        doing = "tank_probe_state upset";
+        cal2_start(&m, NULL);
+        m.tank_probe_state = 255u;
+        cal2_step(&m, &in, &out);
+        compare_out(&out, &wanted);
+        compare_state(&m, &after);
+    }
+    {
+        static const struct cal2 after =
+           {0u, 0u, 1u, 0u, 0u, 0u, 0u, 1u, 0u, false, 0u, 0u, false};
+        static const struct cal2_out wanted =
+           {false, 0u};
+
+        doing = "tank_stat upset";
+        cal2_start(&m, NULL);
+        m.tank_stat = 2u;
+        cal2_step(&m, &in, &out);
+        compare_out(&out, &wanted);
+        compare_state(&m, &after);
+    }
+    {
+        static const struct cal2 after =
+           {0u, 0u, 1u, 0u, 0u, 0u, 0u, 1u, 0u, false, 0u, 0u, false};
+        static const struct cal2_out wanted =
+           {false, 0u};
+
+        doing = "tank_stat upset";
+        cal2_start(&m, NULL);
+        m.tank_stat = 255u;
+        cal2_step(&m, &in, &out);
+        compare_out(&out, &wanted);
+        compare_state(&m, &after);
+    }
+    {
+        static const struct cal2 after =
+           {0u, 0u, 1u, 0u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false};
+        static const struct cal2_out wanted =
+           {false, 0u};
+
+        doing = "heater upset";
+        cal2_start(&m, NULL);
+        m.heater = 2u;
+        cal2_step(&m, &in, &out);
+        compare_out(&out, &wanted);
+        compare_state(&m, &after);
+    }
+    {
+        static const struct cal2 after =
+           {0u, 0u, 1u, 0u, 0u, 0u, 0u, 0u, 0u, false, 0u, 0u, false};
+        static const struct cal2_out wanted =
+           {false, 0u};
+
+        doing = "heater upset";
+        cal2_start(&m, NULL);
+        m.heater = 255u;
+        cal2_step(&m, &in, &out);
+        compare_out(&out, &wanted);
+        compare_state(&m, &after);
+    }
 }
 
 int main(void)
 {
-    unsigned long i;
+    uint32_t i;
 
-    for (i = 0ul; i < (unsigned long)(sizeof vectors / sizeof vectors[0]); i++) {
-        run(&vectors[i], i + 1ul);
+    doing = "recorded inputs";
+    for (i = 0u; i < (uint32_t)(sizeof vectors / sizeof vectors[0]); i++) {
+        vector_now = (unsigned long)i + 1ul;
+        run(&vectors[i]);
     }
+    vector_now = 0ul;
+    row_now = 0ul;
+    step_now = 0ul;
     records();
     upset();
     (void)printf("%lu passed, %lu failed\n", passed, failed);

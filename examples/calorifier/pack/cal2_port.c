@@ -1,34 +1,43 @@
-/* cal2_port.c: main loop and board, to start from. This file is yours: it was written once and is
- * never overwritten. The functions of the board below do nothing yet; they leave every coil without
- * current. Fill in each of them, then take the line with CAL2_BOARD_IS_FILLED_IN out.
+/* cal2_port.c: main loop and board, to start from.
+ *
+ * This file is yours: it was written once and is never overwritten. The functions of the board,
+ * below the loop, do nothing yet. As they stand no coil gets current, and the loop stops at its
+ * first turn, because there is no clock.
+ *
+ * Still to be supplied: every function marked YOURS, the start of clock, pins and converter before
+ * the loop, the watchdog's own setting, and what the C library of the board needs.
  */
 #include "cal2_port.h"
 
 #include <stddef.h>
 
-/* Coils without current: what the loads do with no supply. */
+/* No current anywhere: what the loads do with no supply. */
 static void rest(void)
 {
-    cal2_port_drive_heater(false);
+    cal2_port_drive_heater(false); /* heater then rests off */
 }
 
+/* From what the program wants to current in the coils. */
 static void drive(const struct cal2_out *out)
 {
-    /* 9 kW immersion heater through its contactor: rests off. */
+    /* 9 kW immersion heater through its contactor: rests off with no supply. Current where the
+     * program wants it.
+     */
     cal2_port_drive_heater(out->heater);
     cal2_port_show(out->fault);
 }
 
 static void sense(struct cal2_in *in)
 {
-    in->flow_proven = cal2_port_flow_proven();
-    in->limit_open = cal2_port_limit_open();
-    in->tank_probe = cal2_port_tank_probe();
-    in->heater_seen = cal2_port_heater_seen();
+    in->flow_proven = cal2_port_read_flow_proven();
+    in->limit_open = cal2_port_read_limit_open();
+    in->tank_probe = cal2_port_read_tank_probe();
+    in->heater_seen = cal2_port_read_heater_seen();
 }
 
-/* A step that comes late by one is made up for; more of them mean that the times of the program are
- * wrong, so the coils go without current and the watchdog is left to start the board anew.
+/* One step that comes late is made up for. More of them, or no clock, mean that the times of the
+ * program are wrong: the coils go without current, and the watchdog is left to start the board
+ * anew.
  */
 #define MOST_STEPS_AT_ONCE 2u
 
@@ -56,9 +65,10 @@ int main(void)
         while (due > 0u) {
             sense(&in);
             cal2_step(&m, &in, &out);
+            drive(&out);
             due--;
         }
-        drive(&out);
+        /* The loads first: a memory may take its time. */
         if (cal2_remember(&m, &kept)) {
             cal2_port_keep(&kept);
         }
@@ -67,60 +77,63 @@ int main(void)
 }
 
 /* The board. Nothing below is done yet. */
-#define CAL2_BOARD_IS_FILLED_IN 0 /* 1 once every function below does its work */
 
 uint16_t cal2_port_wait(void)
 {
-    /* wait for a hardware timer of CAL2_STEP_MS ms */
-    return (uint16_t)CAL2_BOARD_IS_FILLED_IN;
+    /* YOURS: wait for a hardware timer of CAL2_STEP_MS ms */
+    return 0u; /* no clock */
 }
 
-bool cal2_port_flow_proven(void)
+bool cal2_port_read_flow_proven(void)
 {
-    /* read the pin; which level a broken wire gives is said in the sheet */
+    /* YOURS: read the pin; which level a broken wire gives is said in the sheet */
     return false;
 }
 
-bool cal2_port_limit_open(void)
+bool cal2_port_read_limit_open(void)
 {
-    /* read the pin; which level a broken wire gives is said in the sheet */
+    /* YOURS: read the pin; which level a broken wire gives is said in the sheet */
     return false;
 }
 
-uint16_t cal2_port_tank_probe(void)
+uint16_t cal2_port_read_tank_probe(void)
 {
-    /* read the converter; 0 counts as a broken sensor */
+    /* YOURS: read the converter; 0 counts as a broken sensor */
     return 0u;
 }
 
-bool cal2_port_heater_seen(void)
+bool cal2_port_read_heater_seen(void)
 {
-    /* read the pin; which level a broken wire gives is said in the sheet */
+    /* YOURS: read the pin; which level a broken wire gives is said in the sheet */
     return false;
 }
 
-void cal2_port_drive_heater(bool driven)
+void cal2_port_drive_heater(bool current)
 {
-    (void)driven; /* set the pin */
+    /* YOURS: set the pin; it must be without current before the program starts, too */
+    (void)current;
 }
 
 void cal2_port_show(uint16_t fault)
 {
-    (void)fault; /* show it */
+    /* YOURS: show it */
+    (void)fault;
 }
 
 bool cal2_port_recall(struct cal2_remembered *r)
 {
-    (void)r; /* read it from the memory that survives */
+    /* YOURS: read it from the memory that survives */
+    (void)r;
     return false;
 }
 
 void cal2_port_keep(const struct cal2_remembered *r)
 {
-    (void)r; /* write it to the memory that survives */
+    /* YOURS: write it to the memory that survives */
+    (void)r;
 }
 
 void cal2_port_alive(void)
 {
-    /* toggle the pin of the external watchdog */
+    /* YOURS: toggle the pin of the external watchdog */
 }

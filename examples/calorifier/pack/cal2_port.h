@@ -31,33 +31,34 @@
 #include "cal2.h"
 
 /* Time. Returns once the next step is due, with the number of steps that have become due since the
- * last return: 1 when all is well, more when steps were missed.
+ * last return: 1 when all is well, more when steps were missed, 0 when there is no clock.
  */
 uint16_t cal2_port_wait(void);
 
 /* flow switch on the primary pump */
-bool cal2_port_flow_proven(void);
+bool cal2_port_read_flow_proven(void);
 
 /* auxiliary contact of the limit's own contactor */
-bool cal2_port_limit_open(void);
+bool cal2_port_read_limit_open(void);
 
 /* thermistor in the pocket of the old rod stat, raw counts, as the converter gives them */
-uint16_t cal2_port_tank_probe(void);
+uint16_t cal2_port_read_tank_probe(void);
 
 /* read-back contact of 9 kW immersion heater through its contactor */
-bool cal2_port_heater_seen(void);
+bool cal2_port_read_heater_seen(void);
 
 /* Drives the coil or gate of 9 kW immersion heater through its contactor: true puts current into
  * it.
  */
-void cal2_port_drive_heater(bool driven);
+void cal2_port_drive_heater(bool current);
 
 /* Shows the faults to somebody: a lamp, a display, a bus. Bits are named in cal2.h. */
 void cal2_port_show(uint16_t fault);
 
-/* The memory that survives a power cut. Reading returns false where there is none or it cannot be
- * read. A write must not be torn: write a second copy, or let the check word find the torn one,
- * which then comes up tripped.
+/* The memory that survives a power cut, for a record of 2 bytes (sizeof, where the compiler leaves
+ * gaps). Reading returns false where there is none or it cannot be read. A write that is torn is
+ * found by the check word and comes up tripped; keep two copies in turn to avoid that.
+ * This program has nothing to remember: both may do nothing.
  */
 bool cal2_port_recall(struct cal2_remembered *r);
 void cal2_port_keep(const struct cal2_remembered *r);

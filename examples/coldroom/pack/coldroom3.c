@@ -33,10 +33,9 @@
 
 #include <stddef.h>
 
-/* These do not compile where an assumption of this file does not hold. */
-typedef char coldroom3_assert_int_has_16_bits[(((unsigned)-1) >= 0xFFFFu) ? 1 : -1];
-typedef char coldroom3_assert_division_cuts_off_towards_zero[(((-7) / 2) == -3) ? 1 : -1];
-
+/* Constants. What the program below can reach was worked out for these values: after a change in
+ * the plant, change the sheet and print the program anew.
+ */
 /* counts: lowest believable count, about 60 degC (electronics.sensors[0].valid, line 133):
  * thermistor (beta)
  */
@@ -128,25 +127,25 @@ typedef char coldroom3_assert_division_cuts_off_towards_zero[(((-7) / 2) == -3) 
 #define COLDROOM3_COMPRESSOR_EFFECT_WITHIN 7121u
 /* counts: 1.5 K towards the set point (process.worst.settles_on, line 23): 0.5 of the differential
  */
-#define COLDROOM3_COMPRESSOR_EFFECT 69u
+#define COLDROOM3_COMPRESSOR_EFFECT 69
 
-static uint16_t clamp_u16(uint16_t x, uint16_t low, uint16_t high)
+/* These do not compile where an assumption of this file does not hold. */
+typedef char coldroom3_int_has_16_bits[(((unsigned)-1) >= 0xFFFFu) ? 1 : -1];
+typedef char coldroom3_division_cuts_off_towards_zero[(((-7) / 2) == -3) ? 1 : -1];
+typedef char coldroom3_room_1[(COLDROOM3_ROOM_PROBE_CLEAR_AFTER <= 255u) ? 1 : -1];
+typedef char coldroom3_room_2[(COLDROOM3_ROOM_PROBE_PROVE_WITHIN <= 255u) ? 1 : -1];
+typedef char coldroom3_room_3[(COLDROOM3_COIL_PROBE_CLEAR_AFTER <= 255u) ? 1 : -1];
+typedef char coldroom3_room_4[(COLDROOM3_COIL_PROBE_PROVE_WITHIN <= 255u) ? 1 : -1];
+typedef char coldroom3_room_5[(COLDROOM3_COMPRESSOR_EFFECT_WITHIN <= 65535u) ? 1 : -1];
+typedef char coldroom3_room_compressor_for[(COLDROOM3_COMPRESSOR_MIN_OFF <= 65535u) ? 1 : -1];
+
+/* x, held between low and high */
+static uint16_t coldroom3_clamp_u16(uint16_t x, uint16_t low, uint16_t high)
 {
     if (x < low) {
         return low;
     }
     return (x > high) ? high : x;
-}
-
-/* Check word of a record. It starts from a number that belongs to this program's record alone, and
- * no blank record has it.
- */
-static uint16_t check_word(const struct coldroom3_remembered *r)
-{
-    uint32_t word = UINT32_C(23131);
-
-    (void)r;
-    return (uint16_t)word;
 }
 
 /* return air: is it believed? */
@@ -331,7 +330,9 @@ static void coldroom3_defrost(struct coldroom3 *m, uint16_t coil_probe_counts)
 }
 
 /* 2.2 kW compressor through its contactor */
-static void coldroom3_compressor(struct coldroom3 *m, const struct coldroom3_in *in, bool compressor_wanted)
+static void coldroom3_compressor(struct coldroom3 *m,
+                                 const struct coldroom3_in *in,
+                                 bool compressor_wanted)
 {
     if (m->compressor_for < COLDROOM3_COMPRESSOR_MIN_OFF) {
         m->compressor_for++;
@@ -460,41 +461,19 @@ void coldroom3_start(struct coldroom3 *m, const struct coldroom3_remembered *r)
 
 bool coldroom3_remember(const struct coldroom3 *m, struct coldroom3_remembered *r)
 {
-    uint16_t check;
-    bool changed = false;
+    const bool changed = r->check != 23131u;
 
-    (void)m;
-    check = check_word(r);
-    if (r->check != check) {
-        r->check = check;
-        changed = true;
-    }
+    (void)m; /* nothing of this program survives a power cut */
+    r->check = 23131u;
     return changed;
 }
 
 void coldroom3_step(struct coldroom3 *m, const struct coldroom3_in *in, struct coldroom3_out *out)
 {
-    bool room_probe_bad; /* return air: this sample cannot be believed */
-    uint16_t room_probe_now; /* this sample, or the last believable one */
-    uint16_t room_probe_less; /* the smaller of the two before */
-    uint16_t room_probe_more; /* the larger of the two before */
-    uint16_t room_probe_counts; /* return air: median of three believable samples */
-    bool coil_probe_bad; /* on the coil, at the last row: this sample cannot be believed */
-    uint16_t coil_probe_now; /* this sample, or the last believable one */
-    uint16_t coil_probe_less; /* the smaller of the two before */
-    uint16_t coil_probe_more; /* the larger of the two before */
-    /* on the coil, at the last row: median of three believable samples */
-    uint16_t coil_probe_counts;
-    bool room_stat_contact; /* vapour-bulb control in the return air: its contact is made */
-    /* second vapour-bulb control, rings at the gatehouse: its contact is made */
-    bool warm_stat_contact;
-    bool compressor_wanted; /* the old wiring calls for it */
-    bool compressor_effect_seen; /* the temperature has moved as it should */
-    bool defrost_heater_wanted; /* the old wiring calls for it */
-    bool warm_alarm_wanted; /* the old wiring calls for it */
-
-    room_probe_bad = (in->room_probe < COLDROOM3_ROOM_PROBE_LOWEST) ||
+    /* return air: this sample cannot be believed */
+    const bool room_probe_bad = (in->room_probe < COLDROOM3_ROOM_PROBE_LOWEST) ||
         (in->room_probe > COLDROOM3_ROOM_PROBE_HIGHEST);
+
     if (room_probe_bad) {
         /* a bad sample starts the count again */
         m->room_probe_good_for = 0u;
@@ -503,19 +482,33 @@ void coldroom3_step(struct coldroom3 *m, const struct coldroom3_in *in, struct c
     } else {
         /* stays */
     }
+
     coldroom3_room_probe_state(m, room_probe_bad);
-    room_probe_now = (uint16_t)(room_probe_bad ? m->room_probe_last : in->room_probe);
-    room_probe_less = (uint16_t)((m->room_probe_last < m->room_probe_before)
-        ? m->room_probe_last : m->room_probe_before);
-    room_probe_more = (uint16_t)((m->room_probe_last < m->room_probe_before)
-        ? m->room_probe_before : m->room_probe_last);
-    room_probe_counts = clamp_u16(room_probe_now, room_probe_less, room_probe_more);
+
+    /* this sample, or the last believable one */
+    const uint16_t room_probe_now = (uint16_t)(room_probe_bad
+                                               ? m->room_probe_last : in->room_probe);
+    /* the smaller of the two before */
+    const uint16_t room_probe_less = (uint16_t)((m->room_probe_last < m->room_probe_before)
+                                                ? m->room_probe_last : m->room_probe_before);
+    /* the larger of the two before */
+    const uint16_t room_probe_more = (uint16_t)((m->room_probe_last < m->room_probe_before)
+                                                ? m->room_probe_before : m->room_probe_last);
+    /* return air: median of three believable samples */
+    const uint16_t room_probe_counts = coldroom3_clamp_u16(room_probe_now,
+                                                           room_probe_less,
+                                                           room_probe_more);
+
     if (!room_probe_bad) {
         m->room_probe_before = m->room_probe_last;
     }
+
     m->room_probe_last = room_probe_now;
-    coil_probe_bad = (in->coil_probe < COLDROOM3_COIL_PROBE_LOWEST) ||
+
+    /* on the coil, at the last row: this sample cannot be believed */
+    const bool coil_probe_bad = (in->coil_probe < COLDROOM3_COIL_PROBE_LOWEST) ||
         (in->coil_probe > COLDROOM3_COIL_PROBE_HIGHEST);
+
     if (coil_probe_bad) {
         /* a bad sample starts the count again */
         m->coil_probe_good_for = 0u;
@@ -524,29 +517,52 @@ void coldroom3_step(struct coldroom3 *m, const struct coldroom3_in *in, struct c
     } else {
         /* stays */
     }
+
     coldroom3_coil_probe_state(m, coil_probe_bad);
-    coil_probe_now = (uint16_t)(coil_probe_bad ? m->coil_probe_last : in->coil_probe);
-    coil_probe_less = (uint16_t)((m->coil_probe_last < m->coil_probe_before)
-        ? m->coil_probe_last : m->coil_probe_before);
-    coil_probe_more = (uint16_t)((m->coil_probe_last < m->coil_probe_before)
-        ? m->coil_probe_before : m->coil_probe_last);
-    coil_probe_counts = clamp_u16(coil_probe_now, coil_probe_less, coil_probe_more);
+
+    /* this sample, or the last believable one */
+    const uint16_t coil_probe_now = (uint16_t)(coil_probe_bad
+                                               ? m->coil_probe_last : in->coil_probe);
+    /* the smaller of the two before */
+    const uint16_t coil_probe_less = (uint16_t)((m->coil_probe_last < m->coil_probe_before)
+                                                ? m->coil_probe_last : m->coil_probe_before);
+    /* the larger of the two before */
+    const uint16_t coil_probe_more = (uint16_t)((m->coil_probe_last < m->coil_probe_before)
+                                                ? m->coil_probe_before : m->coil_probe_last);
+    /* on the coil, at the last row: median of three believable samples */
+    const uint16_t coil_probe_counts = coldroom3_clamp_u16(coil_probe_now,
+                                                           coil_probe_less,
+                                                           coil_probe_more);
+
     if (!coil_probe_bad) {
         m->coil_probe_before = m->coil_probe_last;
     }
+
     m->coil_probe_last = coil_probe_now;
     coldroom3_room_stat(m, room_probe_counts);
-    room_stat_contact = m->room_stat == COLDROOM3_ROOM_STAT_MADE;
+
+    /* vapour-bulb control in the return air: its contact is made */
+    const bool room_stat_contact = m->room_stat == COLDROOM3_ROOM_STAT_MADE;
+
     coldroom3_warm_stat(m, room_probe_counts);
-    warm_stat_contact = (m->warm_stat == COLDROOM3_WARM_STAT_MADE) ||
+
+    /* second vapour-bulb control, rings at the gatehouse: its contact is made */
+    const bool warm_stat_contact = (m->warm_stat == COLDROOM3_WARM_STAT_MADE) ||
         (m->room_probe_state != COLDROOM3_ROOM_PROBE_STATE_GOOD);
+
     m->defrost_at = (uint16_t)((m->defrost_at >= COLDROOM3_DEFROST_LAST_STEP)
-        ? INT32_C(0) : ((int32_t)m->defrost_at + INT32_C(1)));
+                               ? INT32_C(0) : ((int32_t)m->defrost_at + INT32_C(1)));
     coldroom3_defrost(m, coil_probe_counts);
-    compressor_wanted = room_stat_contact &&
+
+    /* the old wiring calls for it */
+    const bool compressor_wanted = room_stat_contact &&
         in->hp_switch &&
         (m->defrost != COLDROOM3_DEFROST_RUNNING);
-    compressor_effect_seen = ((int32_t)room_probe_counts - (int32_t)m->compressor_effect_from) >= (int32_t)COLDROOM3_COMPRESSOR_EFFECT;
+    /* the temperature has moved as it should */
+    const bool compressor_effect_seen = ((int32_t)room_probe_counts -
+                                         (int32_t)m->compressor_effect_from) >=
+        (int32_t)COLDROOM3_COMPRESSOR_EFFECT;
+
     if ((m->compressor != COLDROOM3_COMPRESSOR_ON) || compressor_effect_seen) {
         m->compressor_effect_for = 0u;
     } else if (m->compressor_effect_for < COLDROOM3_COMPRESSOR_EFFECT_WITHIN) {
@@ -554,31 +570,43 @@ void coldroom3_step(struct coldroom3 *m, const struct coldroom3_in *in, struct c
     } else {
         /* stays */
     }
+
     if ((m->compressor != COLDROOM3_COMPRESSOR_ON) ||
         compressor_effect_seen ||
         (room_probe_counts < m->compressor_effect_from)) {
         m->compressor_effect_from = room_probe_counts;
     }
+
     if (m->compressor_effect_for >= COLDROOM3_COMPRESSOR_EFFECT_WITHIN) {
         /* on, and nothing follows: is the probe in its pocket? */
         m->compressor_no_effect = true;
     }
+
     coldroom3_compressor(m, in, compressor_wanted);
     out->compressor = m->compressor == COLDROOM3_COMPRESSOR_ON;
-    defrost_heater_wanted = m->defrost == COLDROOM3_DEFROST_RUNNING;
+
+    /* the old wiring calls for it */
+    const bool defrost_heater_wanted = m->defrost == COLDROOM3_DEFROST_RUNNING;
+
     coldroom3_defrost_heater(m, defrost_heater_wanted);
     out->defrost_heater = m->defrost_heater == COLDROOM3_DEFROST_HEATER_ON;
-    warm_alarm_wanted = warm_stat_contact;
+
+    /* the old wiring calls for it */
+    const bool warm_alarm_wanted = warm_stat_contact;
+
     coldroom3_warm_alarm(m, warm_alarm_wanted);
     out->warm_alarm = m->warm_alarm == COLDROOM3_WARM_ALARM_ON;
-    out->fault = 0u;
+
+    uint16_t fault = 0u;
+
     if (m->room_probe_state == COLDROOM3_ROOM_PROBE_STATE_FAULTY) {
-        out->fault = (uint16_t)(out->fault | COLDROOM3_FAULT_ROOM_PROBE);
+        fault = (uint16_t)(fault | COLDROOM3_FAULT_ROOM_PROBE);
     }
     if (m->coil_probe_state == COLDROOM3_COIL_PROBE_STATE_FAULTY) {
-        out->fault = (uint16_t)(out->fault | COLDROOM3_FAULT_COIL_PROBE);
+        fault = (uint16_t)(fault | COLDROOM3_FAULT_COIL_PROBE);
     }
     if (m->compressor_no_effect) {
-        out->fault = (uint16_t)(out->fault | COLDROOM3_FAULT_COMPRESSOR_NO_EFFECT);
+        fault = (uint16_t)(fault | COLDROOM3_FAULT_COMPRESSOR_NO_EFFECT);
     }
+    out->fault = fault;
 }

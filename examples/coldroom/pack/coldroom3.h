@@ -40,7 +40,8 @@
 /* Bits of fault in struct coldroom3_out; 0 means none. */
 #define COLDROOM3_FAULT_ROOM_PROBE 0x0001u /* return air: not believed */
 #define COLDROOM3_FAULT_COIL_PROBE 0x0002u /* on the coil, at the last row: not believed */
-#define COLDROOM3_FAULT_COMPRESSOR_NO_EFFECT 0x0004u /* 2.2 kW compressor through its contactor: on for long without effect on room_probe */
+/* 2.2 kW compressor through its contactor: on for long without effect on room_probe */
+#define COLDROOM3_FAULT_COMPRESSOR_NO_EFFECT 0x0004u
 
 /* return air: is it believed? */
 enum coldroom3_room_probe_state {
@@ -101,8 +102,8 @@ struct coldroom3_in {
     uint16_t coil_probe; /* on the coil, at the last row, raw counts */
 };
 
-/* What the program wants. True means the load is on, or open. Which way the coil is driven follows
- * from what the load does with no supply:
+/* What the program wants. True means that the load is on, or open, whichever way its coil has to be
+ * driven for that: coldroom3_port.c does the rest.
  */
 struct coldroom3_out {
     bool compressor; /* 2.2 kW compressor through its contactor; rests off, safe off */
@@ -111,7 +112,8 @@ struct coldroom3_out {
     uint16_t fault; /* 0: none; one bit for each fault */
 };
 
-/* What must survive a power cut. The check word tells a good record from blank or foreign memory.
+/* What must survive a power cut. The check word tells a good record from blank, torn or foreign
+ * memory.
  */
 struct coldroom3_remembered {
     uint16_t check; /* check word over the rest */

@@ -1,39 +1,52 @@
-/* coldroom3_port.c: main loop and board, to start from. This file is yours: it was written once and
- * is never overwritten. The functions of the board below do nothing yet; they leave every coil
- * without current. Fill in each of them, then take the line with COLDROOM3_BOARD_IS_FILLED_IN out.
+/* coldroom3_port.c: main loop and board, to start from.
+ *
+ * This file is yours: it was written once and is never overwritten. The functions of the board,
+ * below the loop, do nothing yet. As they stand no coil gets current, and the loop stops at its
+ * first turn, because there is no clock.
+ *
+ * Still to be supplied: every function marked YOURS, the start of clock, pins and converter before
+ * the loop, the watchdog's own setting, and what the C library of the board needs.
  */
 #include "coldroom3_port.h"
 
 #include <stddef.h>
 
-/* Coils without current: what the loads do with no supply. */
+/* No current anywhere: what the loads do with no supply. */
 static void rest(void)
 {
-    coldroom3_port_drive_compressor(false);
-    coldroom3_port_drive_defrost_heater(false);
-    coldroom3_port_drive_warm_alarm(false);
+    coldroom3_port_drive_compressor(false); /* compressor then rests off */
+    coldroom3_port_drive_defrost_heater(false); /* defrost_heater then rests off */
+    coldroom3_port_drive_warm_alarm(false); /* warm_alarm then rests on */
 }
 
+/* From what the program wants to current in the coils. */
 static void drive(const struct coldroom3_out *out)
 {
-    /* 2.2 kW compressor through its contactor: rests off. */
+    /* 2.2 kW compressor through its contactor: rests off with no supply. Current where the program
+     * wants it.
+     */
     coldroom3_port_drive_compressor(out->compressor);
-    /* 1.2 kW defrost heater in the coil: rests off. */
+    /* 1.2 kW defrost heater in the coil: rests off with no supply. Current where the program wants
+     * it.
+     */
     coldroom3_port_drive_defrost_heater(out->defrost_heater);
-    /* sounder at the gatehouse: rests on, so current in the coil takes it the other way. */
+    /* sounder at the gatehouse: rests on with no supply, so it is current in the coil that takes it
+     * the other way. Current where the program does not want it.
+     */
     coldroom3_port_drive_warm_alarm(!out->warm_alarm);
     coldroom3_port_show(out->fault);
 }
 
 static void sense(struct coldroom3_in *in)
 {
-    in->hp_switch = coldroom3_port_hp_switch();
-    in->room_probe = coldroom3_port_room_probe();
-    in->coil_probe = coldroom3_port_coil_probe();
+    in->hp_switch = coldroom3_port_read_hp_switch();
+    in->room_probe = coldroom3_port_read_room_probe();
+    in->coil_probe = coldroom3_port_read_coil_probe();
 }
 
-/* A step that comes late by one is made up for; more of them mean that the times of the program are
- * wrong, so the coils go without current and the watchdog is left to start the board anew.
+/* One step that comes late is made up for. More of them, or no clock, mean that the times of the
+ * program are wrong: the coils go without current, and the watchdog is left to start the board
+ * anew.
  */
 #define MOST_STEPS_AT_ONCE 2u
 
@@ -61,9 +74,10 @@ int main(void)
         while (due > 0u) {
             sense(&in);
             coldroom3_step(&m, &in, &out);
+            drive(&out);
             due--;
         }
-        drive(&out);
+        /* The loads first: a memory may take its time. */
         if (coldroom3_remember(&m, &kept)) {
             coldroom3_port_keep(&kept);
         }
@@ -72,64 +86,69 @@ int main(void)
 }
 
 /* The board. Nothing below is done yet. */
-#define COLDROOM3_BOARD_IS_FILLED_IN 0 /* 1 once every function below does its work */
 
 uint16_t coldroom3_port_wait(void)
 {
-    /* wait for a hardware timer of COLDROOM3_STEP_MS ms */
-    return (uint16_t)COLDROOM3_BOARD_IS_FILLED_IN;
+    /* YOURS: wait for a hardware timer of COLDROOM3_STEP_MS ms */
+    return 0u; /* no clock */
 }
 
-bool coldroom3_port_hp_switch(void)
+bool coldroom3_port_read_hp_switch(void)
 {
-    /* read the pin; which level a broken wire gives is said in the sheet */
+    /* YOURS: read the pin; which level a broken wire gives is said in the sheet */
     return false;
 }
 
-uint16_t coldroom3_port_room_probe(void)
+uint16_t coldroom3_port_read_room_probe(void)
 {
-    /* read the converter; 0 counts as a broken sensor */
+    /* YOURS: read the converter; 0 counts as a broken sensor */
     return 0u;
 }
 
-uint16_t coldroom3_port_coil_probe(void)
+uint16_t coldroom3_port_read_coil_probe(void)
 {
-    /* read the converter; 0 counts as a broken sensor */
+    /* YOURS: read the converter; 0 counts as a broken sensor */
     return 0u;
 }
 
-void coldroom3_port_drive_compressor(bool driven)
+void coldroom3_port_drive_compressor(bool current)
 {
-    (void)driven; /* set the pin */
+    /* YOURS: set the pin; it must be without current before the program starts, too */
+    (void)current;
 }
 
-void coldroom3_port_drive_defrost_heater(bool driven)
+void coldroom3_port_drive_defrost_heater(bool current)
 {
-    (void)driven; /* set the pin */
+    /* YOURS: set the pin; it must be without current before the program starts, too */
+    (void)current;
 }
 
-void coldroom3_port_drive_warm_alarm(bool driven)
+void coldroom3_port_drive_warm_alarm(bool current)
 {
-    (void)driven; /* set the pin */
+    /* YOURS: set the pin; it must be without current before the program starts, too */
+    (void)current;
 }
 
 void coldroom3_port_show(uint16_t fault)
 {
-    (void)fault; /* show it */
+    /* YOURS: show it */
+    (void)fault;
 }
 
 bool coldroom3_port_recall(struct coldroom3_remembered *r)
 {
-    (void)r; /* read it from the memory that survives */
+    /* YOURS: read it from the memory that survives */
+    (void)r;
     return false;
 }
 
 void coldroom3_port_keep(const struct coldroom3_remembered *r)
 {
-    (void)r; /* write it to the memory that survives */
+    /* YOURS: write it to the memory that survives */
+    (void)r;
 }
 
 void coldroom3_port_alive(void)
 {
-    /* reload the watchdog of the controller */
+    /* YOURS: reload the watchdog of the controller */
 }

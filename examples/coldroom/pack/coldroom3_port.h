@@ -35,34 +35,35 @@
 #include "coldroom3.h"
 
 /* Time. Returns once the next step is due, with the number of steps that have become due since the
- * last return: 1 when all is well, more when steps were missed.
+ * last return: 1 when all is well, more when steps were missed, 0 when there is no clock.
  */
 uint16_t coldroom3_port_wait(void);
 
 /* high-pressure switch of the compressor, healthy when closed */
-bool coldroom3_port_hp_switch(void);
+bool coldroom3_port_read_hp_switch(void);
 
 /* return air, raw counts, as the converter gives them */
-uint16_t coldroom3_port_room_probe(void);
+uint16_t coldroom3_port_read_room_probe(void);
 
 /* on the coil, at the last row, raw counts, as the converter gives them */
-uint16_t coldroom3_port_coil_probe(void);
+uint16_t coldroom3_port_read_coil_probe(void);
 
 /* Drives the coil or gate of 2.2 kW compressor through its contactor: true puts current into it. */
-void coldroom3_port_drive_compressor(bool driven);
+void coldroom3_port_drive_compressor(bool current);
 
 /* Drives the coil or gate of 1.2 kW defrost heater in the coil: true puts current into it. */
-void coldroom3_port_drive_defrost_heater(bool driven);
+void coldroom3_port_drive_defrost_heater(bool current);
 
 /* Drives the coil or gate of sounder at the gatehouse: true puts current into it. */
-void coldroom3_port_drive_warm_alarm(bool driven);
+void coldroom3_port_drive_warm_alarm(bool current);
 
 /* Shows the faults to somebody: a lamp, a display, a bus. Bits are named in coldroom3.h. */
 void coldroom3_port_show(uint16_t fault);
 
-/* The memory that survives a power cut. Reading returns false where there is none or it cannot be
- * read. A write must not be torn: write a second copy, or let the check word find the torn one,
- * which then comes up tripped.
+/* The memory that survives a power cut, for a record of 2 bytes (sizeof, where the compiler leaves
+ * gaps). Reading returns false where there is none or it cannot be read. A write that is torn is
+ * found by the check word and comes up tripped; keep two copies in turn to avoid that.
+ * This program has nothing to remember: both may do nothing.
  */
 bool coldroom3_port_recall(struct coldroom3_remembered *r);
 void coldroom3_port_keep(const struct coldroom3_remembered *r);

@@ -26,10 +26,9 @@
 
 #include <stddef.h>
 
-/* These do not compile where an assumption of this file does not hold. */
-typedef char frost7_assert_int_has_16_bits[(((unsigned)-1) >= 0xFFFFu) ? 1 : -1];
-typedef char frost7_assert_division_cuts_off_towards_zero[(((-7) / 2) == -3) ? 1 : -1];
-
+/* Constants. What the program below can reach was worked out for these values: after a change in
+ * the plant, change the sheet and print the program anew.
+ */
 /* counts: lowest believable count, about -40 degC (electronics.sensors[0].valid, line 75):
  * thermistor (beta)
  */
@@ -74,25 +73,23 @@ typedef char frost7_assert_division_cuts_off_towards_zero[(((-7) / 2) == -3) ? 1
 #define FROST7_TAPE_EFFECT_WITHIN 5439u
 /* counts: 1.49 K towards the set point (process.worst.settles_on, line 23): 0.5 of the differential
  */
-#define FROST7_TAPE_EFFECT 66u
+#define FROST7_TAPE_EFFECT 66
 
-static uint16_t clamp_u16(uint16_t x, uint16_t low, uint16_t high)
+/* These do not compile where an assumption of this file does not hold. */
+typedef char frost7_int_has_16_bits[(((unsigned)-1) >= 0xFFFFu) ? 1 : -1];
+typedef char frost7_division_cuts_off_towards_zero[(((-7) / 2) == -3) ? 1 : -1];
+typedef char frost7_room_line_probe_good_for[(FROST7_LINE_PROBE_CLEAR_AFTER <= 255u) ? 1 : -1];
+typedef char frost7_room_line_probe_state_for[(FROST7_LINE_PROBE_PROVE_WITHIN <= 255u) ? 1 : -1];
+typedef char frost7_room_tape_effect_for[(FROST7_TAPE_EFFECT_WITHIN <= 65535u) ? 1 : -1];
+typedef char frost7_room_tape_for[(FROST7_TAPE_MIN_OFF <= 255u) ? 1 : -1];
+
+/* x, held between low and high */
+static uint16_t frost7_clamp_u16(uint16_t x, uint16_t low, uint16_t high)
 {
     if (x < low) {
         return low;
     }
     return (x > high) ? high : x;
-}
-
-/* Check word of a record. It starts from a number that belongs to this program's record alone, and
- * no blank record has it.
- */
-static uint16_t check_word(const struct frost7_remembered *r)
-{
-    uint32_t word = UINT32_C(23131);
-
-    (void)r;
-    return (uint16_t)word;
 }
 
 /* strapped to the line under the lagging: is it believed? */
@@ -230,33 +227,19 @@ void frost7_start(struct frost7 *m, const struct frost7_remembered *r)
 
 bool frost7_remember(const struct frost7 *m, struct frost7_remembered *r)
 {
-    uint16_t check;
-    bool changed = false;
+    const bool changed = r->check != 23131u;
 
-    (void)m;
-    check = check_word(r);
-    if (r->check != check) {
-        r->check = check;
-        changed = true;
-    }
+    (void)m; /* nothing of this program survives a power cut */
+    r->check = 23131u;
     return changed;
 }
 
 void frost7_step(struct frost7 *m, const struct frost7_in *in, struct frost7_out *out)
 {
     /* strapped to the line under the lagging: this sample cannot be believed */
-    bool line_probe_bad;
-    uint16_t line_probe_now; /* this sample, or the last believable one */
-    uint16_t line_probe_less; /* the smaller of the two before */
-    uint16_t line_probe_more; /* the larger of the two before */
-    /* strapped to the line under the lagging: median of three believable samples */
-    uint16_t line_probe_counts;
-    bool line_stat_contact; /* capillary stat strapped to the line: its contact is made */
-    bool tape_wanted; /* the old wiring calls for it */
-    bool tape_effect_seen; /* the temperature has moved as it should */
-
-    line_probe_bad = (in->line_probe < FROST7_LINE_PROBE_LOWEST) ||
+    const bool line_probe_bad = (in->line_probe < FROST7_LINE_PROBE_LOWEST) ||
         (in->line_probe > FROST7_LINE_PROBE_HIGHEST);
+
     if (line_probe_bad) {
         /* a bad sample starts the count again */
         m->line_probe_good_for = 0u;
@@ -265,21 +248,38 @@ void frost7_step(struct frost7 *m, const struct frost7_in *in, struct frost7_out
     } else {
         /* stays */
     }
+
     frost7_line_probe_state(m, line_probe_bad);
-    line_probe_now = (uint16_t)(line_probe_bad ? m->line_probe_last : in->line_probe);
-    line_probe_less = (uint16_t)((m->line_probe_last < m->line_probe_before)
-        ? m->line_probe_last : m->line_probe_before);
-    line_probe_more = (uint16_t)((m->line_probe_last < m->line_probe_before)
-        ? m->line_probe_before : m->line_probe_last);
-    line_probe_counts = clamp_u16(line_probe_now, line_probe_less, line_probe_more);
+
+    /* this sample, or the last believable one */
+    const uint16_t line_probe_now = (uint16_t)(line_probe_bad
+                                               ? m->line_probe_last : in->line_probe);
+    /* the smaller of the two before */
+    const uint16_t line_probe_less = (uint16_t)((m->line_probe_last < m->line_probe_before)
+                                                ? m->line_probe_last : m->line_probe_before);
+    /* the larger of the two before */
+    const uint16_t line_probe_more = (uint16_t)((m->line_probe_last < m->line_probe_before)
+                                                ? m->line_probe_before : m->line_probe_last);
+    /* strapped to the line under the lagging: median of three believable samples */
+    const uint16_t line_probe_counts = frost7_clamp_u16(line_probe_now,
+                                                        line_probe_less,
+                                                        line_probe_more);
+
     if (!line_probe_bad) {
         m->line_probe_before = m->line_probe_last;
     }
+
     m->line_probe_last = line_probe_now;
     frost7_line_stat(m, line_probe_counts);
-    line_stat_contact = m->line_stat == FROST7_LINE_STAT_MADE;
-    tape_wanted = line_stat_contact;
-    tape_effect_seen = ((int32_t)line_probe_counts - (int32_t)m->tape_effect_from) >= (int32_t)FROST7_TAPE_EFFECT;
+
+    /* capillary stat strapped to the line: its contact is made */
+    const bool line_stat_contact = m->line_stat == FROST7_LINE_STAT_MADE;
+    /* the old wiring calls for it */
+    const bool tape_wanted = line_stat_contact;
+    /* the temperature has moved as it should */
+    const bool tape_effect_seen = ((int32_t)line_probe_counts - (int32_t)m->tape_effect_from) >=
+        (int32_t)FROST7_TAPE_EFFECT;
+
     if ((m->tape != FROST7_TAPE_ON) || tape_effect_seen) {
         m->tape_effect_for = 0u;
     } else if (m->tape_effect_for < FROST7_TAPE_EFFECT_WITHIN) {
@@ -287,22 +287,28 @@ void frost7_step(struct frost7 *m, const struct frost7_in *in, struct frost7_out
     } else {
         /* stays */
     }
+
     if ((m->tape != FROST7_TAPE_ON) ||
         tape_effect_seen ||
         (line_probe_counts < m->tape_effect_from)) {
         m->tape_effect_from = line_probe_counts;
     }
+
     if (m->tape_effect_for >= FROST7_TAPE_EFFECT_WITHIN) {
         /* on, and nothing follows: is the probe in its pocket? */
         m->tape_no_effect = true;
     }
+
     frost7_tape(m, tape_wanted);
     out->tape = m->tape == FROST7_TAPE_ON;
-    out->fault = 0u;
+
+    uint16_t fault = 0u;
+
     if (m->line_probe_state == FROST7_LINE_PROBE_STATE_FAULTY) {
-        out->fault = (uint16_t)(out->fault | FROST7_FAULT_LINE_PROBE);
+        fault = (uint16_t)(fault | FROST7_FAULT_LINE_PROBE);
     }
     if (m->tape_no_effect) {
-        out->fault = (uint16_t)(out->fault | FROST7_FAULT_TAPE_NO_EFFECT);
+        fault = (uint16_t)(fault | FROST7_FAULT_TAPE_NO_EFFECT);
     }
+    out->fault = fault;
 }

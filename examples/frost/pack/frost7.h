@@ -32,7 +32,10 @@
 
 /* Bits of fault in struct frost7_out; 0 means none. */
 #define FROST7_FAULT_LINE_PROBE 0x0001u /* strapped to the line under the lagging: not believed */
-#define FROST7_FAULT_TAPE_NO_EFFECT 0x0002u /* self-limiting trace heating tape, 900 W, through a contactor whose coil opens it: on for long without effect on line_probe */
+/* self-limiting trace heating tape, 900 W, through a contactor whose coil opens it: on for long
+ * without effect on line_probe
+ */
+#define FROST7_FAULT_TAPE_NO_EFFECT 0x0002u
 
 /* strapped to the line under the lagging: is it believed? */
 enum frost7_line_probe_state {
@@ -59,8 +62,8 @@ struct frost7_in {
     uint16_t line_probe; /* strapped to the line under the lagging, raw counts */
 };
 
-/* What the program wants. True means the load is on, or open. Which way the coil is driven follows
- * from what the load does with no supply:
+/* What the program wants. True means that the load is on, or open, whichever way its coil has to be
+ * driven for that: frost7_port.c does the rest.
  */
 struct frost7_out {
     /* self-limiting trace heating tape, 900 W, through a contactor whose coil opens it; rests on,
@@ -70,7 +73,8 @@ struct frost7_out {
     uint16_t fault; /* 0: none; one bit for each fault */
 };
 
-/* What must survive a power cut. The check word tells a good record from blank or foreign memory.
+/* What must survive a power cut. The check word tells a good record from blank, torn or foreign
+ * memory.
  */
 struct frost7_remembered {
     uint16_t check; /* check word over the rest */

@@ -1,21 +1,28 @@
-/* frost7_port.c: main loop and board, to start from. This file is yours: it was written once and is
- * never overwritten. The functions of the board below do nothing yet; they leave every coil without
- * current. Fill in each of them, then take the line with FROST7_BOARD_IS_FILLED_IN out.
+/* frost7_port.c: main loop and board, to start from.
+ *
+ * This file is yours: it was written once and is never overwritten. The functions of the board,
+ * below the loop, do nothing yet. As they stand no coil gets current, and the loop stops at its
+ * first turn, because there is no clock.
+ *
+ * Still to be supplied: every function marked YOURS, the start of clock, pins and converter before
+ * the loop, the watchdog's own setting, and what the C library of the board needs.
  */
 #include "frost7_port.h"
 
 #include <stddef.h>
 
-/* Coils without current: what the loads do with no supply. */
+/* No current anywhere: what the loads do with no supply. */
 static void rest(void)
 {
-    frost7_port_drive_tape(false);
+    frost7_port_drive_tape(false); /* tape then rests on */
 }
 
+/* From what the program wants to current in the coils. */
 static void drive(const struct frost7_out *out)
 {
-    /* self-limiting trace heating tape, 900 W, through a contactor whose coil opens it: rests on,
-     * so current in the coil takes it the other way.
+    /* self-limiting trace heating tape, 900 W, through a contactor whose coil opens it: rests on
+     * with no supply, so it is current in the coil that takes it the other way. Current where the
+     * program does not want it.
      */
     frost7_port_drive_tape(!out->tape);
     frost7_port_show(out->fault);
@@ -23,11 +30,12 @@ static void drive(const struct frost7_out *out)
 
 static void sense(struct frost7_in *in)
 {
-    in->line_probe = frost7_port_line_probe();
+    in->line_probe = frost7_port_read_line_probe();
 }
 
-/* A step that comes late by one is made up for; more of them mean that the times of the program are
- * wrong, so the coils go without current and the watchdog is left to start the board anew.
+/* One step that comes late is made up for. More of them, or no clock, mean that the times of the
+ * program are wrong: the coils go without current, and the watchdog is left to start the board
+ * anew.
  */
 #define MOST_STEPS_AT_ONCE 2u
 
@@ -55,9 +63,10 @@ int main(void)
         while (due > 0u) {
             sense(&in);
             frost7_step(&m, &in, &out);
+            drive(&out);
             due--;
         }
-        drive(&out);
+        /* The loads first: a memory may take its time. */
         if (frost7_remember(&m, &kept)) {
             frost7_port_keep(&kept);
         }
@@ -66,42 +75,45 @@ int main(void)
 }
 
 /* The board. Nothing below is done yet. */
-#define FROST7_BOARD_IS_FILLED_IN 0 /* 1 once every function below does its work */
 
 uint16_t frost7_port_wait(void)
 {
-    /* wait for a hardware timer of FROST7_STEP_MS ms */
-    return (uint16_t)FROST7_BOARD_IS_FILLED_IN;
+    /* YOURS: wait for a hardware timer of FROST7_STEP_MS ms */
+    return 0u; /* no clock */
 }
 
-uint16_t frost7_port_line_probe(void)
+uint16_t frost7_port_read_line_probe(void)
 {
-    /* read the converter; 0 counts as a broken sensor */
+    /* YOURS: read the converter; 0 counts as a broken sensor */
     return 0u;
 }
 
-void frost7_port_drive_tape(bool driven)
+void frost7_port_drive_tape(bool current)
 {
-    (void)driven; /* set the pin */
+    /* YOURS: set the pin; it must be without current before the program starts, too */
+    (void)current;
 }
 
 void frost7_port_show(uint16_t fault)
 {
-    (void)fault; /* show it */
+    /* YOURS: show it */
+    (void)fault;
 }
 
 bool frost7_port_recall(struct frost7_remembered *r)
 {
-    (void)r; /* read it from the memory that survives */
+    /* YOURS: read it from the memory that survives */
+    (void)r;
     return false;
 }
 
 void frost7_port_keep(const struct frost7_remembered *r)
 {
-    (void)r; /* write it to the memory that survives */
+    /* YOURS: write it to the memory that survives */
+    (void)r;
 }
 
 void frost7_port_alive(void)
 {
-    /* toggle the pin of the external watchdog */
+    /* YOURS: toggle the pin of the external watchdog */
 }

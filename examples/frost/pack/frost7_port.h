@@ -28,24 +28,25 @@
 #include "frost7.h"
 
 /* Time. Returns once the next step is due, with the number of steps that have become due since the
- * last return: 1 when all is well, more when steps were missed.
+ * last return: 1 when all is well, more when steps were missed, 0 when there is no clock.
  */
 uint16_t frost7_port_wait(void);
 
 /* strapped to the line under the lagging, raw counts, as the converter gives them */
-uint16_t frost7_port_line_probe(void);
+uint16_t frost7_port_read_line_probe(void);
 
 /* Drives the coil or gate of self-limiting trace heating tape, 900 W, through a contactor whose
  * coil opens it: true puts current into it.
  */
-void frost7_port_drive_tape(bool driven);
+void frost7_port_drive_tape(bool current);
 
 /* Shows the faults to somebody: a lamp, a display, a bus. Bits are named in frost7.h. */
 void frost7_port_show(uint16_t fault);
 
-/* The memory that survives a power cut. Reading returns false where there is none or it cannot be
- * read. A write must not be torn: write a second copy, or let the check word find the torn one,
- * which then comes up tripped.
+/* The memory that survives a power cut, for a record of 2 bytes (sizeof, where the compiler leaves
+ * gaps). Reading returns false where there is none or it cannot be read. A write that is torn is
+ * found by the check word and comes up tripped; keep two copies in turn to avoid that.
+ * This program has nothing to remember: both may do nothing.
  */
 bool frost7_port_recall(struct frost7_remembered *r);
 void frost7_port_keep(const struct frost7_remembered *r);

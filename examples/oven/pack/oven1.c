@@ -29,10 +29,9 @@
 
 #include <stddef.h>
 
-/* These do not compile where an assumption of this file does not hold. */
-typedef char oven1_assert_int_has_16_bits[(((unsigned)-1) >= 0xFFFFu) ? 1 : -1];
-typedef char oven1_assert_division_cuts_off_towards_zero[(((-7) / 2) == -3) ? 1 : -1];
-
+/* Constants. What the program below can reach was worked out for these values: after a change in
+ * the plant, change the sheet and print the program anew.
+ */
 /* counts: lowest believable count, about 0.1 degC (electronics.sensors[0].valid, line 94): type K
  * (IEC 60584-1)
  */
@@ -78,25 +77,23 @@ typedef char oven1_assert_division_cuts_off_towards_zero[(((-7) / 2) == -3) ? 1 
  */
 #define OVEN1_ELEMENTS_EFFECT_WITHIN 959u
 /* counts: 6.66 K towards the set point (process.settles_on, line 18): 0.5 of the differential */
-#define OVEN1_ELEMENTS_EFFECT 20u
+#define OVEN1_ELEMENTS_EFFECT 20
 
-static uint16_t clamp_u16(uint16_t x, uint16_t low, uint16_t high)
+/* These do not compile where an assumption of this file does not hold. */
+typedef char oven1_int_has_16_bits[(((unsigned)-1) >= 0xFFFFu) ? 1 : -1];
+typedef char oven1_division_cuts_off_towards_zero[(((-7) / 2) == -3) ? 1 : -1];
+typedef char oven1_room_chamber_probe_good_for[(OVEN1_CHAMBER_PROBE_CLEAR_AFTER <= 255u) ? 1 : -1];
+typedef char oven1_room_2[(OVEN1_CHAMBER_PROBE_PROVE_WITHIN <= 255u) ? 1 : -1];
+typedef char oven1_room_elements_apart_for[(OVEN1_ELEMENTS_CONTACT_SETTLES <= 255u) ? 1 : -1];
+typedef char oven1_room_elements_effect_for[(OVEN1_ELEMENTS_EFFECT_WITHIN <= 65535u) ? 1 : -1];
+
+/* x, held between low and high */
+static uint16_t oven1_clamp_u16(uint16_t x, uint16_t low, uint16_t high)
 {
     if (x < low) {
         return low;
     }
     return (x > high) ? high : x;
-}
-
-/* Check word of a record. It starts from a number that belongs to this program's record alone, and
- * no blank record has it.
- */
-static uint16_t check_word(const struct oven1_remembered *r)
-{
-    uint32_t word = UINT32_C(23131);
-
-    (void)r;
-    return (uint16_t)word;
 }
 
 /* sheathed thermocouple beside the old bulb: is it believed? */
@@ -229,34 +226,19 @@ void oven1_start(struct oven1 *m, const struct oven1_remembered *r)
 
 bool oven1_remember(const struct oven1 *m, struct oven1_remembered *r)
 {
-    uint16_t check;
-    bool changed = false;
+    const bool changed = r->check != 23131u;
 
-    (void)m;
-    check = check_word(r);
-    if (r->check != check) {
-        r->check = check;
-        changed = true;
-    }
+    (void)m; /* nothing of this program survives a power cut */
+    r->check = 23131u;
     return changed;
 }
 
 void oven1_step(struct oven1 *m, const struct oven1_in *in, struct oven1_out *out)
 {
     /* sheathed thermocouple beside the old bulb: this sample cannot be believed */
-    bool chamber_probe_bad;
-    uint16_t chamber_probe_now; /* this sample, or the last believable one */
-    uint16_t chamber_probe_less; /* the smaller of the two before */
-    uint16_t chamber_probe_more; /* the larger of the two before */
-    /* sheathed thermocouple beside the old bulb: median of three believable samples */
-    uint16_t chamber_probe_counts;
-    /* capillary stat with its bulb in the crown of the chamber: its contact is made */
-    bool chamber_stat_contact;
-    bool elements_wanted; /* the old wiring calls for it */
-    bool elements_effect_seen; /* the temperature has moved as it should */
-
-    chamber_probe_bad = (in->chamber_probe < OVEN1_CHAMBER_PROBE_LOWEST) ||
+    const bool chamber_probe_bad = (in->chamber_probe < OVEN1_CHAMBER_PROBE_LOWEST) ||
         (in->chamber_probe > OVEN1_CHAMBER_PROBE_HIGHEST);
+
     if (chamber_probe_bad) {
         /* a bad sample starts the count again */
         m->chamber_probe_good_for = 0u;
@@ -265,20 +247,37 @@ void oven1_step(struct oven1 *m, const struct oven1_in *in, struct oven1_out *ou
     } else {
         /* stays */
     }
+
     oven1_chamber_probe_state(m, chamber_probe_bad);
-    chamber_probe_now = (uint16_t)(chamber_probe_bad ? m->chamber_probe_last : in->chamber_probe);
-    chamber_probe_less = (uint16_t)((m->chamber_probe_last < m->chamber_probe_before)
-        ? m->chamber_probe_last : m->chamber_probe_before);
-    chamber_probe_more = (uint16_t)((m->chamber_probe_last < m->chamber_probe_before)
-        ? m->chamber_probe_before : m->chamber_probe_last);
-    chamber_probe_counts = clamp_u16(chamber_probe_now, chamber_probe_less, chamber_probe_more);
+
+    /* this sample, or the last believable one */
+    const uint16_t chamber_probe_now = (uint16_t)(chamber_probe_bad
+                                                  ? m->chamber_probe_last : in->chamber_probe);
+    /* the smaller of the two before */
+    const uint16_t chamber_probe_less = (uint16_t)(
+            (m->chamber_probe_last < m->chamber_probe_before)
+            ? m->chamber_probe_last : m->chamber_probe_before);
+    /* the larger of the two before */
+    const uint16_t chamber_probe_more = (uint16_t)(
+            (m->chamber_probe_last < m->chamber_probe_before)
+            ? m->chamber_probe_before : m->chamber_probe_last);
+    /* sheathed thermocouple beside the old bulb: median of three believable samples */
+    const uint16_t chamber_probe_counts = oven1_clamp_u16(chamber_probe_now,
+                                                          chamber_probe_less,
+                                                          chamber_probe_more);
+
     if (!chamber_probe_bad) {
         m->chamber_probe_before = m->chamber_probe_last;
     }
+
     m->chamber_probe_last = chamber_probe_now;
     oven1_chamber_stat(m, chamber_probe_counts);
-    chamber_stat_contact = m->chamber_stat == OVEN1_CHAMBER_STAT_MADE;
-    elements_wanted = chamber_stat_contact && in->door_shut;
+
+    /* capillary stat with its bulb in the crown of the chamber: its contact is made */
+    const bool chamber_stat_contact = m->chamber_stat == OVEN1_CHAMBER_STAT_MADE;
+    /* the old wiring calls for it */
+    const bool elements_wanted = chamber_stat_contact && in->door_shut;
+
     if ((in->elements_seen && (m->elements == OVEN1_ELEMENTS_ON)) ||
         (!in->elements_seen && (m->elements != OVEN1_ELEMENTS_ON))) {
         m->elements_apart_for = 0u;
@@ -287,11 +286,17 @@ void oven1_step(struct oven1 *m, const struct oven1_in *in, struct oven1_out *ou
     } else {
         /* stays */
     }
+
     if ((m->elements_apart_for >= OVEN1_ELEMENTS_CONTACT_SETTLES) && in->elements_seen) {
         /* seen made although told to open; stays until the next start, for it must be looked at */
         m->elements_welded = true;
     }
-    elements_effect_seen = ((int32_t)chamber_probe_counts - (int32_t)m->elements_effect_from) >= (int32_t)OVEN1_ELEMENTS_EFFECT;
+
+    /* the temperature has moved as it should */
+    const bool elements_effect_seen = ((int32_t)chamber_probe_counts -
+                                       (int32_t)m->elements_effect_from) >=
+        (int32_t)OVEN1_ELEMENTS_EFFECT;
+
     if ((m->elements != OVEN1_ELEMENTS_ON) || elements_effect_seen) {
         m->elements_effect_for = 0u;
     } else if (m->elements_effect_for < OVEN1_ELEMENTS_EFFECT_WITHIN) {
@@ -299,28 +304,34 @@ void oven1_step(struct oven1 *m, const struct oven1_in *in, struct oven1_out *ou
     } else {
         /* stays */
     }
+
     if ((m->elements != OVEN1_ELEMENTS_ON) ||
         elements_effect_seen ||
         (chamber_probe_counts < m->elements_effect_from)) {
         m->elements_effect_from = chamber_probe_counts;
     }
+
     if (m->elements_effect_for >= OVEN1_ELEMENTS_EFFECT_WITHIN) {
         /* on, and nothing follows: is the probe in its pocket? */
         m->elements_no_effect = true;
     }
+
     oven1_elements(m, elements_wanted);
     out->elements = m->elements == OVEN1_ELEMENTS_ON;
-    out->fault = 0u;
+
+    uint16_t fault = 0u;
+
     if (m->chamber_probe_state == OVEN1_CHAMBER_PROBE_STATE_FAULTY) {
-        out->fault = (uint16_t)(out->fault | OVEN1_FAULT_CHAMBER_PROBE);
+        fault = (uint16_t)(fault | OVEN1_FAULT_CHAMBER_PROBE);
     }
     if (m->elements_welded) {
-        out->fault = (uint16_t)(out->fault | OVEN1_FAULT_ELEMENTS_WELDED);
+        fault = (uint16_t)(fault | OVEN1_FAULT_ELEMENTS_WELDED);
     }
     if ((m->elements_apart_for >= OVEN1_ELEMENTS_CONTACT_SETTLES) && !in->elements_seen) {
-        out->fault = (uint16_t)(out->fault | OVEN1_FAULT_ELEMENTS_NOT_MADE);
+        fault = (uint16_t)(fault | OVEN1_FAULT_ELEMENTS_NOT_MADE);
     }
     if (m->elements_no_effect) {
-        out->fault = (uint16_t)(out->fault | OVEN1_FAULT_ELEMENTS_NO_EFFECT);
+        fault = (uint16_t)(fault | OVEN1_FAULT_ELEMENTS_NO_EFFECT);
     }
+    out->fault = fault;
 }

@@ -34,10 +34,15 @@
 #define OVEN1_STEP_MS 500u /* ms from one call of oven1_step to the next */
 
 /* Bits of fault in struct oven1_out; 0 means none. */
-#define OVEN1_FAULT_CHAMBER_PROBE 0x0001u /* sheathed thermocouple beside the old bulb: not believed */
-#define OVEN1_FAULT_ELEMENTS_WELDED 0x0002u /* 12 kW of top and bottom elements through a contactor: the contact did not open */
-#define OVEN1_FAULT_ELEMENTS_NOT_MADE 0x0004u /* 12 kW of top and bottom elements through a contactor: the contact did not make */
-#define OVEN1_FAULT_ELEMENTS_NO_EFFECT 0x0008u /* 12 kW of top and bottom elements through a contactor: on for long without effect on chamber_probe */
+/* sheathed thermocouple beside the old bulb: not believed */
+#define OVEN1_FAULT_CHAMBER_PROBE 0x0001u
+/* 12 kW of top and bottom elements through a contactor: the contact did not open */
+#define OVEN1_FAULT_ELEMENTS_WELDED 0x0002u
+/* 12 kW of top and bottom elements through a contactor: the contact did not make */
+#define OVEN1_FAULT_ELEMENTS_NOT_MADE 0x0004u
+/* 12 kW of top and bottom elements through a contactor: on for long without effect on chamber_probe
+ */
+#define OVEN1_FAULT_ELEMENTS_NO_EFFECT 0x0008u
 
 /* sheathed thermocouple beside the old bulb: is it believed? */
 enum oven1_chamber_probe_state {
@@ -67,15 +72,16 @@ struct oven1_in {
     bool elements_seen;
 };
 
-/* What the program wants. True means the load is on, or open. Which way the coil is driven follows
- * from what the load does with no supply:
+/* What the program wants. True means that the load is on, or open, whichever way its coil has to be
+ * driven for that: oven1_port.c does the rest.
  */
 struct oven1_out {
     bool elements; /* 12 kW of top and bottom elements through a contactor; rests off, safe off */
     uint16_t fault; /* 0: none; one bit for each fault */
 };
 
-/* What must survive a power cut. The check word tells a good record from blank or foreign memory.
+/* What must survive a power cut. The check word tells a good record from blank, torn or foreign
+ * memory.
  */
 struct oven1_remembered {
     uint16_t check; /* check word over the rest */

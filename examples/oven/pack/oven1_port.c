@@ -1,33 +1,42 @@
-/* oven1_port.c: main loop and board, to start from. This file is yours: it was written once and is
- * never overwritten. The functions of the board below do nothing yet; they leave every coil without
- * current. Fill in each of them, then take the line with OVEN1_BOARD_IS_FILLED_IN out.
+/* oven1_port.c: main loop and board, to start from.
+ *
+ * This file is yours: it was written once and is never overwritten. The functions of the board,
+ * below the loop, do nothing yet. As they stand no coil gets current, and the loop stops at its
+ * first turn, because there is no clock.
+ *
+ * Still to be supplied: every function marked YOURS, the start of clock, pins and converter before
+ * the loop, the watchdog's own setting, and what the C library of the board needs.
  */
 #include "oven1_port.h"
 
 #include <stddef.h>
 
-/* Coils without current: what the loads do with no supply. */
+/* No current anywhere: what the loads do with no supply. */
 static void rest(void)
 {
-    oven1_port_drive_elements(false);
+    oven1_port_drive_elements(false); /* elements then rests off */
 }
 
+/* From what the program wants to current in the coils. */
 static void drive(const struct oven1_out *out)
 {
-    /* 12 kW of top and bottom elements through a contactor: rests off. */
+    /* 12 kW of top and bottom elements through a contactor: rests off with no supply. Current where
+     * the program wants it.
+     */
     oven1_port_drive_elements(out->elements);
     oven1_port_show(out->fault);
 }
 
 static void sense(struct oven1_in *in)
 {
-    in->door_shut = oven1_port_door_shut();
-    in->chamber_probe = oven1_port_chamber_probe();
-    in->elements_seen = oven1_port_elements_seen();
+    in->door_shut = oven1_port_read_door_shut();
+    in->chamber_probe = oven1_port_read_chamber_probe();
+    in->elements_seen = oven1_port_read_elements_seen();
 }
 
-/* A step that comes late by one is made up for; more of them mean that the times of the program are
- * wrong, so the coils go without current and the watchdog is left to start the board anew.
+/* One step that comes late is made up for. More of them, or no clock, mean that the times of the
+ * program are wrong: the coils go without current, and the watchdog is left to start the board
+ * anew.
  */
 #define MOST_STEPS_AT_ONCE 2u
 
@@ -55,9 +64,10 @@ int main(void)
         while (due > 0u) {
             sense(&in);
             oven1_step(&m, &in, &out);
+            drive(&out);
             due--;
         }
-        drive(&out);
+        /* The loads first: a memory may take its time. */
         if (oven1_remember(&m, &kept)) {
             oven1_port_keep(&kept);
         }
@@ -66,54 +76,57 @@ int main(void)
 }
 
 /* The board. Nothing below is done yet. */
-#define OVEN1_BOARD_IS_FILLED_IN 0 /* 1 once every function below does its work */
 
 uint16_t oven1_port_wait(void)
 {
-    /* wait for a hardware timer of OVEN1_STEP_MS ms */
-    return (uint16_t)OVEN1_BOARD_IS_FILLED_IN;
+    /* YOURS: wait for a hardware timer of OVEN1_STEP_MS ms */
+    return 0u; /* no clock */
 }
 
-bool oven1_port_door_shut(void)
+bool oven1_port_read_door_shut(void)
 {
-    /* read the pin; which level a broken wire gives is said in the sheet */
+    /* YOURS: read the pin; which level a broken wire gives is said in the sheet */
     return false;
 }
 
-uint16_t oven1_port_chamber_probe(void)
+uint16_t oven1_port_read_chamber_probe(void)
 {
-    /* read the converter; 0 counts as a broken sensor */
+    /* YOURS: read the converter; 0 counts as a broken sensor */
     return 0u;
 }
 
-bool oven1_port_elements_seen(void)
+bool oven1_port_read_elements_seen(void)
 {
-    /* read the pin; which level a broken wire gives is said in the sheet */
+    /* YOURS: read the pin; which level a broken wire gives is said in the sheet */
     return false;
 }
 
-void oven1_port_drive_elements(bool driven)
+void oven1_port_drive_elements(bool current)
 {
-    (void)driven; /* set the pin */
+    /* YOURS: set the pin; it must be without current before the program starts, too */
+    (void)current;
 }
 
 void oven1_port_show(uint16_t fault)
 {
-    (void)fault; /* show it */
+    /* YOURS: show it */
+    (void)fault;
 }
 
 bool oven1_port_recall(struct oven1_remembered *r)
 {
-    (void)r; /* read it from the memory that survives */
+    /* YOURS: read it from the memory that survives */
+    (void)r;
     return false;
 }
 
 void oven1_port_keep(const struct oven1_remembered *r)
 {
-    (void)r; /* write it to the memory that survives */
+    /* YOURS: write it to the memory that survives */
+    (void)r;
 }
 
 void oven1_port_alive(void)
 {
-    /* toggle the pin of the external watchdog */
+    /* YOURS: toggle the pin of the external watchdog */
 }

@@ -31,30 +31,31 @@
 #include "oven1.h"
 
 /* Time. Returns once the next step is due, with the number of steps that have become due since the
- * last return: 1 when all is well, more when steps were missed.
+ * last return: 1 when all is well, more when steps were missed, 0 when there is no clock.
  */
 uint16_t oven1_port_wait(void);
 
 /* door switch */
-bool oven1_port_door_shut(void);
+bool oven1_port_read_door_shut(void);
 
 /* sheathed thermocouple beside the old bulb, raw counts, as the converter gives them */
-uint16_t oven1_port_chamber_probe(void);
+uint16_t oven1_port_read_chamber_probe(void);
 
 /* read-back contact of 12 kW of top and bottom elements through a contactor */
-bool oven1_port_elements_seen(void);
+bool oven1_port_read_elements_seen(void);
 
 /* Drives the coil or gate of 12 kW of top and bottom elements through a contactor: true puts
  * current into it.
  */
-void oven1_port_drive_elements(bool driven);
+void oven1_port_drive_elements(bool current);
 
 /* Shows the faults to somebody: a lamp, a display, a bus. Bits are named in oven1.h. */
 void oven1_port_show(uint16_t fault);
 
-/* The memory that survives a power cut. Reading returns false where there is none or it cannot be
- * read. A write must not be torn: write a second copy, or let the check word find the torn one,
- * which then comes up tripped.
+/* The memory that survives a power cut, for a record of 2 bytes (sizeof, where the compiler leaves
+ * gaps). Reading returns false where there is none or it cannot be read. A write that is torn is
+ * found by the check word and comes up tripped; keep two copies in turn to avoid that.
+ * This program has nothing to remember: both may do nothing.
  */
 bool oven1_port_recall(struct oven1_remembered *r);
 void oven1_port_keep(const struct oven1_remembered *r);
