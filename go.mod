@@ -30,4 +30,5 @@ require (
 	github.com/spf13/pflag v1.0.9 // indirect
 	golang.org/x/text v0.23.0 // indirect
 	golang.org/x/tools v0.30.0 // indirect
+	gonum.org/v1/gonum v0.17.0
 )
