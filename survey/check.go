@@ -2,7 +2,9 @@ package survey
 
 import (
 	"fmt"
+	"io/fs"
 	"math"
+	"path"
 	"strings"
 )
 
@@ -38,14 +40,17 @@ func (d *decoder) identities(s *Survey) map[string]string {
 	known := map[string]string{}
 	at := map[string]Source{}
 	add := func(f Field[string], what string) {
-		if !f.Set {
-			return
+		name := f.Text // also of an id that does not fit: what refers to it is not wrong as well
+		switch {
+		case !f.Written() || name == "":
+		case known[name] != "":
+			d.failAt(f.Source, "name given twice", quote(name), fmt.Sprintf("a name of its own; there is a %s of that name on line %d", known[name], at[name].Line))
+		default:
+			known[name], at[name] = what, f.Source
 		}
-		if known[f.V] != "" {
-			d.failAt(f.Source, "name given twice", quote(f.V), fmt.Sprintf("a name of its own; there is a %s of that name on line %d", known[f.V], at[f.V].Line))
-			return
-		}
-		known[f.V], at[f.V] = what, f.Source
+	}
+	if id := s.Equipment.ID; takenFiles[id.V] {
+		d.failAt(id.Source, "no name for a file", quote(id.V), "another id: the pack holds "+id.V+".h, which is a header of C or a device elsewhere")
 	}
 	for _, x := range s.Dangers {
 		add(x.ID, "danger")
@@ -77,25 +82,14 @@ func (d *decoder) identities(s *Survey) map[string]string {
 
 // refers checks a name of another part.
 func (d *decoder) refers(f Field[string], w *wiring, kinds ...string) {
-	if !f.Set || f.V == "" || contains(kinds, w.known[f.V]) {
+	if !f.Set || contains(kinds, w.known[f.V]) {
 		return
 	}
-	fits := "the id of a " + strings.Join(kinds, " or ") + "; " + didYouMean(f.V, w.names(kinds...))
+	fits := "the id of a " + strings.Join(kinds, " or ") + "; " + didYouMeanName(f.V, w.names(kinds...))
 	if len(w.names(kinds...)) == 0 {
 		fits = "the id of a " + strings.Join(kinds, " or ") + "; the sheet has none"
 	}
-	found := quote(f.V)
-	if k := w.known[f.V]; k != "" {
-		found += ", a " + k
-	}
-	d.failAt(f.Source, "no such part", found, fits)
-}
-
-// belongs reports keys that another kind of part has.
-func (d *decoder) belongs(s Source, set bool, fits bool, forWhat string) {
-	if set && s.Line > 0 && !fits {
-		d.failAt(s, "this key does not belong here", s.Text, "only for "+forWhat)
-	}
+	d.failAt(f.Source, "no such part", w.alsoSay(f.V), fits)
 }
 
 func (d *decoder) load(s *Survey, l *Load, w *wiring) {
@@ -112,16 +106,47 @@ func (d *decoder) load(s *Survey, l *Load, w *wiring) {
 	if !l.Rest.Set {
 		l.Rest = Field[State]{V: rest, Set: true, Source: Source{Path: join(l.Path, "rest"), Text: string(rest), Assumed: "common practice: most loads rest with no supply"}}
 	}
-	d.belongs(l.LitBy.Source, true, l.Kind.V == "gas_valve", "kind: gas_valve")
-	d.belongs(l.LowFire.Source, true, l.Kind.V == "gas_valve", "kind: gas_valve")
-	d.belongs(l.Follows.Source, true, l.Kind.V == "modulating_valve", "kind: modulating_valve")
-	d.belongs(l.Actuator.Source, true, l.Kind.V == "modulating_valve", "kind: modulating_valve")
 	d.refers(l.Follows, w, "control")
-	if !l.RunsWhen.Set && l.RunsWhen.Line == 0 && !l.Follows.Set && hasOutput(s, l.ID.V) {
-		d.failAt(l.Source, "key missing", "no runs_when", "runs_when: the old wiring of this load, for the new electronics switches it")
+	d.followed(s, l)
+	d.wired(s, l)
+	if l.Supply.Set && l.Supply.V <= 0 {
+		d.failAt(l.Supply.Source, "no supply at all", l.Supply.Text, "more than 0 V; supply_is says ac or dc")
 	}
 	if l.Current.Set && l.Inrush.Set && l.Inrush.V < l.Current.V {
 		d.failAt(l.Inrush.Source, "less than the running current", l.Inrush.Text, "the peak at switching on, at least "+l.Current.Text)
+	}
+}
+
+// wired wants to know when a load runs, unless hardware that stays decides it
+// alone.
+func (d *decoder) wired(s *Survey, l *Load) {
+	unknown := l.RunsWhen.Written() && l.RunsWhen.Text == "unknown"
+	switch {
+	case l.RunsWhen.Set || l.Follows.Set || l.RunsWhen.Written() && !unknown:
+	case hasOutput(s, l.ID.V) && unknown:
+		d.failAt(l.RunsWhen.Source, "the wiring has to be known", "unknown", "the old wiring of this load, for the new electronics switches it: follow the wires")
+	case hasOutput(s, l.ID.V):
+		d.failAt(l.Source, "key missing", "no runs_when", "runs_when: the old wiring of this load, for the new electronics switches it")
+	case !unknown && !isCut(s, l.ID.V):
+		d.failAt(l.Source, "key missing", "no runs_when, and no control that cuts "+l.ID.V, "runs_when: the old wiring of this load; or cuts on the part that switches it alone")
+	}
+}
+
+func isCut(s *Survey, load string) bool {
+	for _, c := range s.Controls {
+		if c.Cuts.Has(load) {
+			return true
+		}
+	}
+	return false
+}
+
+// followed wants a control that gives more than on and off.
+func (d *decoder) followed(s *Survey, l *Load) {
+	for _, c := range s.Controls {
+		if l.Follows.Set && c.ID.V == l.Follows.V && c.Action.Set && !c.Modulating() && (!c.Want.Set || c.Want.V == "two_position") {
+			d.failAt(l.Follows.Source, "nothing to follow", quote(l.Follows.V)+", action "+c.Action.Text, "a control with closes_on_rise or opens_on_rise, or one with want: proportional or pid")
+		}
 	}
 }
 
@@ -136,8 +161,8 @@ func hasOutput(s *Survey, load string) bool {
 
 func (d *decoder) timer(t *Timer, w *wiring) {
 	n := 0
-	for _, set := range []bool{t.Every.Set, t.After.Set, t.Starts.Set} {
-		if set {
+	for _, written := range []bool{t.Every.Written(), t.After.Written(), t.Starts.Written()} {
+		if written {
 			n++
 		}
 	}
@@ -153,6 +178,14 @@ func (d *decoder) timer(t *Timer, w *wiring) {
 		d.failAt(t.Lasts.Source, "no time at all", t.Lasts.Text, "longer than nothing")
 	}
 	w.read(&t.EndsOn)
+	for _, k := range []struct {
+		Source
+		set bool
+	}{{t.Every.Source, t.Every.Set}, {t.After.Source, t.After.Set}, {t.Starts.Source, t.Starts.Set}, {t.Lasts.Source, t.Lasts.Set}, {t.EndsOn.Source, t.EndsOn.Set}} {
+		if k.Written() && !k.set && k.Text == "unknown" {
+			d.failAt(k.Source, "the clock has to be known", "unknown", "what it is: the new electronics takes the clock over")
+		}
+	}
 }
 
 func (d *decoder) danger(x *Danger, w *wiring) {
@@ -172,6 +205,9 @@ func (d *decoder) process(s *Survey, w *wiring) {
 	p := &s.Process
 	for _, f := range p.DrivenBy {
 		d.refers(f, w, "load")
+	}
+	if l := p.Log; l.Set && (!fs.ValidPath(path.Clean(l.V)) || strings.ContainsAny(l.V, `\:`)) {
+		d.failAt(l.Source, "no file beside the sheet", quote(l.V), "the name of a file in the sheet's folder or below it, such as cal2-log.csv")
 	}
 	if p.TimeConstant.Set && p.TimeConstant.V <= 0 {
 		d.failAt(p.TimeConstant.Source, "no time at all", p.TimeConstant.Text, "longer than nothing")
@@ -209,6 +245,16 @@ func (d *decoder) electronics(s *Survey, w *wiring) {
 			d.failAt(o.Load.Source, "output given twice", quote(o.Load.V), fmt.Sprintf("one output a load; first on line %d", first))
 		}
 		seen[o.Load.V] = o.Load.Line
+		d.positive(o.RatedCurrent, o.RatedVoltage, o.Endurance, o.MechanicalLife, o.B10d, o.ThermalRes, o.Window, o.MinPulse)
+	}
+}
+
+// positive refuses nothing where something is needed.
+func (d *decoder) positive(fs ...Field[float64]) {
+	for _, f := range fs {
+		if f.Set && f.V <= 0 {
+			d.failAt(f.Source, "must be more than nothing", f.Text, "a positive value")
+		}
 	}
 }
 
@@ -224,11 +270,11 @@ func (d *decoder) circles(s *Survey) {
 		where[t.ID.V] = t.Source
 	}
 	done := map[string]bool{}
-	var visit func(id string, path []string)
-	visit = func(id string, path []string) {
-		for i, p := range path {
+	var visit func(id string, chain []string)
+	visit = func(id string, chain []string) {
+		for i, p := range chain {
 			if p == id {
-				d.failAt(where[path[i]], "a circle", strings.Join(append(path[i:], id), " → "), "a load or timer that does not wait for itself")
+				d.failAt(where[chain[i]], "a circle", strings.Join(append(chain[i:], id), " → "), "a load or timer that does not wait for itself")
 				return
 			}
 		}
@@ -237,7 +283,7 @@ func (d *decoder) circles(s *Survey) {
 		}
 		for _, n := range next[id] {
 			if _, ok := next[n]; ok {
-				visit(n, append(path[:len(path):len(path)], id))
+				visit(n, append(chain[:len(chain):len(chain)], id))
 			}
 		}
 		done[id] = true

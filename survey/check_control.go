@@ -13,10 +13,16 @@ func (d *decoder) control(s *Survey, c *Control, w *wiring) {
 	d.refers(c.Sensor, w, "sensor")
 	d.refers(c.ReadBy, w, "signal")
 	d.refers(c.SamePartAs, w, "control")
+	if c.SamePartAs.Set && c.SamePartAs.V == c.ID.V {
+		d.failAt(c.SamePartAs.Source, "the same part as itself", quote(c.SamePartAs.V), "the id of the other contact")
+	}
 	for _, f := range c.Cuts {
 		d.refers(f, w, "load")
 	}
-	d.controlKeys(c)
+	// Harmless where it only says what is so of every part without a manual reset.
+	if c.TripFree.Set && !c.TripFree.V && c.Reset.V != ResetManual {
+		d.failAt(c.TripFree.Source, notHere, quote(c.TripFree.Text), "only for reset: manual")
+	}
 	if c.Switching() {
 		d.thresholds(s, c)
 	}
@@ -41,85 +47,81 @@ func canonical(a Action) Action {
 	return a
 }
 
-func (d *decoder) controlKeys(c *Control) {
-	if !c.Action.Set {
-		return
-	}
-	switching, modulating := c.Switching(), c.Modulating()
-	only := func(s Source, fits bool, forWhat string) { d.belongs(s, true, fits, forWhat) }
-	only(c.SetPoint.Source, switching || modulating, "controls with thresholds")
-	only(c.Marks.Source, switching, "switching controls")
-	only(c.Differential.Source, switching, "switching controls")
-	only(c.BreaksAt.Source, switching, "switching controls")
-	only(c.MakesAt.Source, switching, "switching controls")
-	only(c.MinOn.Source, switching, "switching controls")
-	only(c.MinOff.Source, switching, "switching controls")
-	only(c.StartsAt.Source, modulating, "closes_on_rise and opens_on_rise")
-	only(c.FullAt.Source, modulating, "closes_on_rise and opens_on_rise")
-	only(c.Hysteresis.Source, modulating, "closes_on_rise and opens_on_rise")
-	only(c.Stroke.Source, modulating, "closes_on_rise and opens_on_rise")
-	pulses, holds := c.Action.V == Pulses, c.Action.V == HoldsWhileHot
-	for _, k := range []Source{c.Rate.Source, c.OnShare.Source, c.Period.Source, c.DialShares.Source, c.Lamps.Source, c.FirstOnWithin.Source, c.RoadVehicle.Source} {
-		only(k, pulses, "action: pulses")
-	}
-	for _, k := range []Source{c.Supervises.Source, c.HoldsFrom.Source, c.ReleasesAt.Source, c.HoldsWithin.Source, c.ShutsWithin.Source} {
-		only(k, holds, "action: holds_while_hot")
-	}
-	only(c.Anticipator.Source, switching, "switching controls")
-	only(c.RatedCurrent.Source, c.Element.V == "heated_bimetal", "element: heated_bimetal")
-	only(c.TripsAfter.Source, c.Element.V == "heated_bimetal", "element: heated_bimetal")
-	// Harmless where it only says what is so of every part without a manual reset.
-	only(c.TripFree.Source, c.Reset.V == ResetManual || c.TripFree.V, "reset: manual")
-}
-
 // thresholds makes sure that both edges of a switching control are known, or
 // known to be unknown. However they were given, BreaksAt and MakesAt hold them
 // afterwards.
 func (d *decoder) thresholds(s *Survey, c *Control) {
-	fromDial := c.SetPoint.Set && c.Marks.Set && c.Differential.Set
-	some := c.SetPoint.Written() || c.Marks.Written() || c.Differential.Written()
-	if some && !fromDial && !(c.BreaksAt.Set && c.MakesAt.Set) {
-		for _, k := range []struct {
-			s   Source
-			set bool
-			n   string
-		}{{c.SetPoint.Source, c.SetPoint.Set, "set_point"}, {c.Marks.Source, c.Marks.Set, "marks"}, {c.Differential.Source, c.Differential.Set, "differential"}} {
-			if !k.set && k.s.Line == 0 {
-				d.failAt(c.Source, "key missing", "no "+k.n, "set_point, marks and differential together, or breaks_at and makes_at")
-			}
-		}
-	}
 	if c.Differential.Set && c.Differential.V <= 0 {
 		d.failAt(c.Differential.Source, "no differential at all", c.Differential.Text, "more than 0 K: a contact that makes and breaks at one temperature cannot be")
 		return
 	}
-	if fromDial {
+	if c.SetPoint.Set && c.Marks.Set && c.Differential.Set {
 		d.fromDial(c)
 	}
-	oneEdge := c.Reset.V == ResetOneShot && (c.BreaksAt.Set || c.MakesAt.Set)
-	if !c.BreaksAt.Set || !c.MakesAt.Set {
-		if unread(c.BreaksAt) || unread(c.MakesAt) || unread(c.SetPoint) || unread(c.Differential) {
-			return // has been said
-		}
-		unknown := c.BreaksAt.Written() || c.MakesAt.Written() || c.SetPoint.Written()
-		if !some && !unknown && !oneEdge {
-			d.failAt(c.Source, "where does it make and break?", "neither breaks_at and makes_at nor set_point, marks and differential", "breaks_at and makes_at, as measured; `unknown` is an answer for a part that stays")
-		} else if c.Plan.V == Replace && !oneEdge && !some {
-			d.failAt(c.Source, "a part to be replaced needs both edges", "breaks_at "+stated(c.BreaksAt)+", makes_at "+stated(c.MakesAt), "measure them on the bench, or keep the part")
-		}
-		return
+	switch {
+	case c.BreaksAt.Set && c.MakesAt.Set:
+		d.edgesInOrder(c)
+	case unread(c.BreaksAt), unread(c.MakesAt), unread(c.SetPoint), unread(c.Differential), unread(c.Marks):
+		return // has been said
+	default:
+		d.missingEdges(c)
 	}
+	d.inSensorsRange(s, c)
+}
+
+func (d *decoder) edgesInOrder(c *Control) {
 	if c.Action.V == BreaksOnRise && c.BreaksAt.V <= c.MakesAt.V {
 		d.failAt(c.BreaksAt.Source, "breaks below its make", c.BreaksAt.Text, "above makes_at ("+c.MakesAt.Text+"), for it breaks on rise; or action: makes_on_rise")
 	}
 	if c.Action.V == MakesOnRise && c.BreaksAt.V >= c.MakesAt.V {
 		d.failAt(c.MakesAt.Source, "makes below its break", c.MakesAt.Text, "above breaks_at ("+c.BreaksAt.Text+"), for it makes on rise; or action: breaks_on_rise")
 	}
-	d.inSensorsRange(s, c)
+}
+
+// missingEdges says what is missing where not both edges are known. A part that
+// stays may have unknown ones: the sheet then has to say so.
+func (d *decoder) missingEdges(c *Control) {
+	const both = "set_point, marks and differential together, or breaks_at and makes_at"
+	replaced := c.Plan.V == Replace
+	edge := c.BreaksAt.Written() || c.MakesAt.Written()
+	dial := []struct {
+		Source
+		set  bool
+		name string
+	}{{c.SetPoint.Source, c.SetPoint.Set, "set_point"}, {c.Marks.Source, c.Marks.Set, "marks"}, {c.Differential.Source, c.Differential.Set, "differential"}}
+	onDial, unknown := false, false
+	for _, k := range dial {
+		onDial = onDial || k.Written()
+		unknown = unknown || k.Written() && !k.set
+	}
+	switch {
+	case c.Reset.V == ResetOneShot && (c.BreaksAt.Set || c.MakesAt.Set):
+		// it never comes back
+	case !edge && !onDial:
+		d.failAt(c.Source, "where does it make and break?", "neither breaks_at and makes_at nor set_point, marks and differential", "breaks_at and makes_at, as measured; `unknown` is an answer for a part that stays")
+	case edge && replaced:
+		d.failAt(c.Source, "a part to be replaced needs both edges", "breaks_at "+stated(c.BreaksAt)+", makes_at "+stated(c.MakesAt), "measure them on the bench, or keep the part")
+	case edge, unknown && !replaced:
+		// a part that stays: what is not known becomes a finding
+	default:
+		for _, k := range dial {
+			switch {
+			case !k.Written():
+				d.failAt(c.Source, "key missing", "no "+k.name, both)
+			case !k.set:
+				d.failAt(k.Source, "a part to be replaced needs both edges", k.name+" unknown", "measure them on the bench, or keep the part")
+			}
+		}
+	}
 }
 
 // unread reports a value that was written and could not be read.
-func unread(f Field[float64]) bool { return f.Written() && !f.Set && f.Text != "unknown" }
+func unread[T any](f Field[T]) bool {
+	return f.Written() && !f.Set && f.Text != "unknown" && f.Text != ""
+}
+
+// given reports a value that the sheet gives, be it one that could not be read.
+func given[T any](f Field[T]) bool { return f.Set || unread(f) }
 
 func stated(f Field[float64]) string {
 	if f.Written() {
@@ -164,8 +166,12 @@ func (d *decoder) fromDial(c *Control) {
 func (d *decoder) controlPlan(c *Control) {
 	switch c.Plan.V {
 	case Replace, Monitor:
-		needs := c.Switching() || c.Modulating() || c.Action.V == Indicates
-		if needs && !c.Sensor.Set && !(c.Plan.V == Monitor && c.ReadBy.Set) {
+		needs := c.Switching() || c.Modulating() || c.Action.V == Indicates || c.Action.V == HoldsWhileHot
+		switch {
+		case !needs || given(c.Sensor) || c.Plan.V == Monitor && given(c.ReadBy):
+		case c.Sensor.Written():
+			d.failAt(c.Sensor.Source, "the new sensor has to be known", "unknown", "the id of the sensor that takes over from this part")
+		default:
 			d.failAt(c.Source, "key missing", "no sensor", "sensor: the new sensor that takes over from this part")
 		}
 	}
@@ -184,15 +190,30 @@ func (d *decoder) controlRanges(c *Control) {
 	if o.High.Set && o.Low.Set && o.High.V <= o.Low.V {
 		d.failAt(o.High.Source, "highest not above the lowest", o.High.Text, "above low ("+o.Low.Text+")")
 	}
-	for _, f := range []Field[float64]{o.On, o.Off} {
-		if f.Set && f.V <= 0 {
-			d.failAt(f.Source, "no time at all", f.Text, "longer than nothing")
-		}
+	d.positive(o.On, o.Off, c.Rate, c.Period, c.Lamps.Each, c.Lamps.OutRate, c.RatedCurrent, c.HoldsFrom, c.Anticipator.Rise, c.Stroke)
+	if v := c.Lamps.Supply; v.Set && (v.V[0] <= 0 || v.V[0] > v.V[1]) {
+		d.failAt(v.Source, "no range of supply", v.Text, "two voltages above 0 V, the lower first")
+	}
+	d.inRows(c.TripsAfter, "multiples above 0 rising, times above 0 s falling", func(a, b [2]float64) bool { return b[0] > a[0] && b[1] < a[1] })
+	d.inRows(c.DialShares, "dial marks rising", func(a, b [2]float64) bool { return b[0] > a[0] })
+	if n := c.Lamps.Count; n.Set && n.V == 0 {
+		d.failAt(n.Source, "no lamp at all", n.Text, "one or more")
 	}
 	if c.Modulating() && c.StartsAt.Set && c.FullAt.Set && c.StartsAt.V == c.FullAt.V {
 		d.failAt(c.FullAt.Source, "no band at all", c.FullAt.Text, "other than starts_at")
 	}
 	if c.HoldsFrom.Set && c.ReleasesAt.Set && c.HoldsFrom.V <= c.ReleasesAt.V {
 		d.failAt(c.HoldsFrom.Source, "holds below its release", c.HoldsFrom.Text, "above releases_at ("+c.ReleasesAt.Text+")")
+	}
+}
+
+// inRows wants each row of a table to follow the one before it as it should, and
+// nothing in it below zero.
+func (d *decoder) inRows(f Field[[][2]float64], fits string, follows func(a, b [2]float64) bool) {
+	for i, row := range f.V {
+		if row[0] < 0 || row[1] < 0 || i > 0 && !follows(f.V[i-1], row) {
+			d.failAt(f.Source, "rows that do not follow each other", fmt.Sprintf("row %d of %s", i+1, f.Text), fits)
+			return
+		}
 	}
 }

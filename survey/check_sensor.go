@@ -21,71 +21,54 @@ var ownRange = map[SensorKind]struct {
 	"digital": {-55, 125, "common practice"},
 }
 
-// sensorKeys says which keys belong to which kinds.
-var sensorKeys = map[string]string{
-	"r25": "ntc", "r25_tolerance": "ntc", "beta": "ntc", "beta_tolerance": "ntc", "steinhart_hart": "ntc", "table": "ntc",
-	"pull_up": "ntc pt100 pt1000", "pull_down": "ntc pt100 pt1000", "pull_up_tolerance": "ntc pt100 pt1000",
-	"excitation": "ntc pt100 pt1000", "excitation_tolerance": "ntc pt100 pt1000", "self_heating": "ntc pt100 pt1000",
-	"class": "pt100 pt1000 type_k type_j type_t", "wires": "pt100 pt1000", "lead": "ntc pt100 pt1000",
-	"current": "pt100 pt1000", "gain": "pt100 pt1000 type_k type_j type_t millivolt",
-	"offset":        "type_k type_j type_t",
-	"cold_junction": "type_k type_j type_t", "cold_junction_error": "type_k type_j type_t", "open_reads": "type_k type_j type_t",
-	"at": "linear", "error": "linear diode digital millivolt current", "at_25": "diode", "slope": "diode",
-	"counts_per_kelvin": "digital", "stale_after": "digital", "full_scale": "millivolt current",
-}
-
-func (s *Sensor) sources() map[string]Source {
-	return map[string]Source{
-		"r25": s.R25.Source, "r25_tolerance": s.R25Tolerance.Source, "beta": s.Beta.Source, "beta_tolerance": s.BetaTolerance.Source,
-		"steinhart_hart": s.SteinhartHart.Source, "table": s.Table.Source, "pull_up": s.PullUp.Source, "pull_down": s.PullDown.Source,
-		"pull_up_tolerance": s.PullTolerance.Source, "excitation": s.Excitation.Source, "excitation_tolerance": s.ExcitationTol.Source,
-		"self_heating": s.SelfHeating.Source, "class": s.Class.Source, "wires": s.Wires.Source, "lead": s.Lead.Source,
-		"current": s.Current.Source, "gain": s.Gain.Source, "offset": s.Offset.Source, "cold_junction": s.ColdJunction.Source,
-		"cold_junction_error": s.ColdJunctionError.Source, "open_reads": s.OpenReads.Source, "at": s.At.Source, "error": s.Error.Source,
-		"at_25": s.At25.Source, "slope": s.Slope.Source, "counts_per_kelvin": s.CountsPerKelvin.Source, "stale_after": s.StaleAfter.Source,
-		"full_scale": s.FullScale.Source,
-	}
-}
-
 func (d *decoder) sensor(s *Survey, x *Sensor, w *wiring) {
 	if !x.Kind.Set {
 		return
 	}
-	kind := string(x.Kind.V)
-	sources := x.sources()
-	for _, k := range sortedKeys(sensorKeys) {
-		kinds := strings.Fields(sensorKeys[k])
-		d.belongs(sources[k], true, contains(kinds, kind), "kind: "+strings.Join(kinds, ", "))
-	}
 	d.refers(x.ColdJunction, w, "sensor")
+	d.coldJunction(s, x)
+	if x.Excitation.Written() && !x.Excitation.Set && x.Excitation.Text == "unknown" {
+		d.failAt(x.Excitation.Source, "the divider's supply has to be known", "unknown", "a voltage; or leave the key out where the divider hangs on the converter's reference")
+	}
 	need := func(ok bool, what, fits string) {
 		if !ok {
 			d.failAt(x.Source, "key missing", "no "+what, fits)
 		}
 	}
-	divider := count(x.PullUp.Set, x.PullDown.Set)
+	one := func(fits string, set ...bool) {
+		switch n := count(set...); n {
+		case 0:
+			d.failAt(x.Source, "key missing", "none of "+fits, "exactly one of "+fits)
+		case 1:
+		default:
+			d.failAt(x.Source, "too many keys", fmt.Sprintf("%d of %s", n, fits), "exactly one of "+fits)
+		}
+	}
 	switch x.Kind.V {
 	case "ntc":
-		need(x.R25.Set || x.SteinhartHart.Set || x.Table.Set, "r25", "r25: resistance at 25 degC")
-		need(count(x.Beta.Set, x.SteinhartHart.Set, x.Table.Set) == 1, "curve, or more than one", "exactly one of beta, steinhart_hart, table")
-		need(divider == 1, "divider, or two", "exactly one of pull_up and pull_down")
+		need(given(x.R25) || given(x.SteinhartHart) || given(x.Table), "r25", "r25: resistance at 25 degC")
+		one("beta, steinhart_hart, table", given(x.Beta), given(x.SteinhartHart), given(x.Table))
+		one("pull_up, pull_down", given(x.PullUp), given(x.PullDown))
 	case "pt100", "pt1000":
-		need(divider == 1 || x.Current.Set, "front end", "pull_up, pull_down, or current with gain")
-		need(!x.Current.Set || x.Gain.Set, "gain", "gain of the amplifier behind the current source")
+		one("pull_up, pull_down, current", given(x.PullUp), given(x.PullDown), given(x.Current))
+		need(!given(x.Current) || given(x.Gain), "gain", "gain of the amplifier behind the current source")
 		d.classOf(x, "AA", "A", "B", "C")
 	case "type_k", "type_j", "type_t":
-		need(x.Gain.Set, "gain", "gain: of the amplifier, so that the range fits the converter")
+		need(given(x.Gain), "gain", "gain: of the amplifier, so that the range fits the converter")
 		d.classOf(x, "1", "2")
 	case "linear":
-		need(x.At.Set, "at", "at: [[0 degC, 0.4 V], [100 degC, 2.0 V]]")
+		need(given(x.At), "at", "at: [[0 degC, 0.4 V], [100 degC, 2.0 V]]")
 	case "diode":
-		need(x.At25.Set && x.Slope.Set, "at_25 and slope", "at_25: 0.6 V, slope: -2 mV/K")
+		need(given(x.At25) && given(x.Slope), "at_25 and slope", "at_25: 0.6 V, slope: -2 mV/K")
 	case "digital":
-		need(x.CountsPerKelvin.Set && x.CountsPerKelvin.V > 0, "counts_per_kelvin", "counts_per_kelvin: 16")
+		need(given(x.CountsPerKelvin), "counts_per_kelvin", "counts_per_kelvin: 16")
 	case "millivolt", "current":
-		need(x.FullScale.Set && x.FullScale.V > 0, "full_scale", "full_scale: 30 mV")
+		need(given(x.FullScale), "full_scale", "full_scale: 30 mV")
 	}
-	d.positive(x)
+	d.positive(x.R25, x.Beta, x.PullUp, x.PullDown, x.Excitation, x.Current, x.Gain, x.CountsPerKelvin, x.FullScale)
+	if x.Slope.Set && x.Slope.V == 0 {
+		d.failAt(x.Slope.Source, "does not change with temperature", x.Slope.Text, "such as -2 mV/K")
+	}
 	d.points(x)
 	if x.Valid.Set && x.Valid.V[0] >= x.Valid.V[1] {
 		d.failAt(x.Valid.Source, "lowest and highest change places", x.Valid.Text, "the lower temperature first")
@@ -94,21 +77,21 @@ func (d *decoder) sensor(s *Survey, x *Sensor, w *wiring) {
 	}
 }
 
-func (d *decoder) classOf(x *Sensor, words ...string) {
-	if x.Class.Set && !contains(words, x.Class.V) {
-		d.failAt(x.Class.Source, "no tolerance class of this kind", quote(x.Class.V), oneOf(x.Class.V, words))
+// coldJunction wants a sensor that needs no cold junction itself.
+func (d *decoder) coldJunction(s *Survey, x *Sensor) {
+	for _, other := range s.Electronics.Sensors {
+		if x.ColdJunction.Set && other.ID.V == x.ColdJunction.V && other.Kind.Set && !contains(ambientKinds, string(other.Kind.V)) {
+			d.failAt(x.ColdJunction.Source, "no sensor for a cold junction", quote(x.ColdJunction.V)+", kind "+string(other.Kind.V), "a sensor of kind "+strings.Join(ambientKinds, ", "))
+		}
 	}
 }
 
-// positive refuses zero where nothing would be left to measure.
-func (d *decoder) positive(x *Sensor) {
-	for _, f := range []Field[float64]{x.R25, x.Beta, x.PullUp, x.PullDown, x.Excitation, x.Current, x.Gain} {
-		if f.Set && f.V <= 0 {
-			d.failAt(f.Source, "must be more than nothing", f.Text, "a positive value")
-		}
-	}
-	if x.Slope.Set && x.Slope.V == 0 {
-		d.failAt(x.Slope.Source, "does not change with temperature", x.Slope.Text, "such as -2 mV/K")
+// ambientKinds are the kinds that measure a temperature without another sensor.
+var ambientKinds = []string{"ntc", "pt100", "pt1000", "linear", "diode", "digital"}
+
+func (d *decoder) classOf(x *Sensor, words ...string) {
+	if x.Class.Set && !contains(words, x.Class.V) {
+		d.failAt(x.Class.Source, "no tolerance class of this kind", quote(x.Class.V), oneOf(x.Class.V, words))
 	}
 }
 

@@ -2,7 +2,6 @@ package survey
 
 import (
 	"fmt"
-	"math"
 	"reflect"
 	"regexp"
 	"sort"
@@ -67,25 +66,45 @@ func (d *decoder) section(v reflect.Value, n *yaml.Node, path string) {
 	for _, k := range keys {
 		d.field(v.Field(k.index), k, given[k.name], n, join(path, k.name))
 	}
+	for _, k := range keys {
+		if n := given[k.name]; n != nil && !applies(v, keys, k) {
+			c, _ := conditionOf(k.tag)
+			d.fail(n, join(path, k.name), notHere, kindOf(n), "only for "+c.String())
+		}
+	}
 }
 
 func (d *decoder) entries(n *yaml.Node, keys []key, path string) map[string]*yaml.Node {
 	given := map[string]*yaml.Node{}
+	first := map[string]int{}
 	for i := 0; i+1 < len(n.Content); i += 2 {
 		k, value := n.Content[i], n.Content[i+1]
+		at := join(path, clip(k.Value, 40))
 		switch {
 		case k.Kind != yaml.ScalarNode:
 			d.fail(k, path, "a key is a word", kindOf(k), nameKeys(keys))
-		case given[k.Value] != nil:
-			d.fail(k, join(path, k.Value), "key given twice", quote(k.Value), fmt.Sprintf("once only; first on line %d", given[k.Value].Line))
-		case !knows(keys, k.Value):
-			d.fail(k, join(path, printable(k.Value)), "unknown key", quote(k.Value), didYouMean(k.Value, keyNames(keys)))
-		default:
+			continue
+		case first[k.Value] > 0:
+			d.fail(k, at, "key given twice", quote(k.Value), fmt.Sprintf("once only; first on line %d", first[k.Value]))
+		case knows(keys, k.Value):
 			given[k.Value] = value
+		case k.Value == "<<":
+			d.fail(k, at, "no merging in a sheet", quote(k.Value), "write the values where they belong")
+		case n.Style&yaml.FlowStyle != 0 && isNull(value) && startsWithDigit(k.Value):
+			d.fail(k, at, "a comma ends the value here", quote(","+k.Value), "a decimal point instead of the comma")
+		default:
+			fits := "a key of this section"
+			if len(d.diags) <= mostDiagnostics { // nobody reads further suggestions
+				fits = didYouMean(k.Value, keys)
+			}
+			d.fail(k, at, "unknown key", quote(k.Value), fits)
 		}
+		first[k.Value] = k.Line
 	}
 	return given
 }
+
+func startsWithDigit(s string) bool { return s != "" && isDigit(s[0]) }
 
 func (d *decoder) place(v reflect.Value, n *yaml.Node, path string) {
 	if f := v.FieldByName("Source"); f.IsValid() {
@@ -116,12 +135,16 @@ func (d *decoder) field(v reflect.Value, k key, n, parent *yaml.Node, path strin
 		}
 		d.section(v, n, path)
 	case v.Kind() == reflect.Slice:
-		d.sections(v, n, path)
+		d.sections(v, n, path, k.required)
 	}
 }
 
 // sections reads a list of sections.
-func (d *decoder) sections(v reflect.Value, n *yaml.Node, path string) {
+func (d *decoder) sections(v reflect.Value, n *yaml.Node, path string, required bool) {
+	if n != nil && required && (isNull(n) || n.Kind == yaml.SequenceNode && len(n.Content) == 0) {
+		d.fail(n, path, "nothing in this list", "no entry", "one entry or more, each beginning with a dash")
+		return
+	}
 	if n == nil || isNull(n) {
 		return // an empty list, perhaps with all of its entries commented out
 	}
@@ -141,6 +164,9 @@ func (d *decoder) list(v reflect.Value, k key, n *yaml.Node, path string) {
 	if n == nil {
 		return
 	}
+	if isUnknown(n, k.tag) && k.typ == reflect.TypeFor[Names]() {
+		return // nothing is named, so nothing counts on it
+	}
 	items := []*yaml.Node{n}
 	if n.Kind == yaml.SequenceNode {
 		items = n.Content
@@ -149,6 +175,10 @@ func (d *decoder) list(v reflect.Value, k key, n *yaml.Node, path string) {
 		p := path
 		if n.Kind == yaml.SequenceNode {
 			p = fmt.Sprintf("%s[%d]", path, i)
+		}
+		if isUnknown(item, k.tag) {
+			d.fail(item, p, "does not fit", quote(item.Value), "those that are known, or leave the key out")
+			continue
 		}
 		e := reflect.New(v.Type().Elem()).Elem()
 		d.value(e, k.tag, item, p)
@@ -162,27 +192,19 @@ func isField(t reflect.Type) bool {
 	return t.Kind() == reflect.Struct && strings.HasPrefix(t.Name(), "Field[")
 }
 
-// value reads one Field. Without a node it takes the usual value, if any.
+// value reads one Field. Without a node, or where the sheet says that the value
+// is unknown, it takes the usual value, if there is one, and says so: an unknown
+// tolerance must not be better than an unstated one.
 func (d *decoder) value(f reflect.Value, tag reflect.StructTag, n *yaml.Node, path string) {
-	src := Source{Path: path}
 	if n == nil {
-		text, why, ok := strings.Cut(tag.Get("usual"), "|")
-		if ok {
-			src.Assumed, src.Text = why, text
-			v, m := scalar(text, f.FieldByName("V").Type(), tag)
-			if m == nil {
-				f.FieldByName("V").Set(v)
-				f.FieldByName("Set").SetBool(true)
-			}
-		}
-		f.FieldByName("Source").Set(reflect.ValueOf(src))
+		usual(f, tag, Source{Path: path}, "")
 		return
 	}
-	src.Line, src.Col = n.Line, n.Column
-	src.Text = textOf(n)
+	src := Source{Path: path, Line: n.Line, Col: n.Column, Text: textOf(n)}
 	f.FieldByName("Source").Set(reflect.ValueOf(src))
-	if n.Kind == yaml.ScalarNode && n.Value == "unknown" && !hasWord(tag, "unknown") && tag.Get("unit") != "identifier" && f.FieldByName("V").Kind() != reflect.String {
-		return // written as unknown: known to be unknown
+	if isUnknown(n, tag) && mayBeUnknown(f.FieldByName("V").Type(), tag) {
+		usual(f, tag, src, "the sheet says unknown")
+		return
 	}
 	v, bad, m := d.read(n, f.FieldByName("V").Type(), tag)
 	if m != nil {
@@ -191,6 +213,51 @@ func (d *decoder) value(f reflect.Value, tag reflect.StructTag, n *yaml.Node, pa
 	}
 	f.FieldByName("V").Set(v)
 	f.FieldByName("Set").SetBool(true)
+}
+
+// usual gives a Field the value that its tag assumes.
+func usual(f reflect.Value, tag reflect.StructTag, src Source, because string) {
+	if text, why, ok := strings.Cut(tag.Get("usual"), "|"); ok {
+		if v, m := scalar(text, f.FieldByName("V").Type(), tag); m == nil {
+			src.Text, src.Assumed = text, reason(because, why)
+			f.FieldByName("V").Set(v)
+			f.FieldByName("Set").SetBool(true)
+		}
+	}
+	f.FieldByName("Source").Set(reflect.ValueOf(src))
+}
+
+// notStated is the reason of a default that has no other.
+const notStated = "not stated"
+
+func reason(because, why string) string {
+	switch {
+	case because == "":
+		return why
+	case why == notStated:
+		return because
+	}
+	return because + "; " + why
+}
+
+// isUnknown reports whether a node says that nothing is known. The empty text
+// says so of a reference.
+func isUnknown(n *yaml.Node, tag reflect.StructTag) bool {
+	return n.Kind == yaml.ScalarNode && (n.Value == "unknown" || n.Value == "" && tag.Get("unit") == "name")
+}
+
+// mayBeUnknown reports whether a key may be answered with `unknown` where that
+// is not one of its words. A free text may say what it likes, and without an
+// identifier, the format or a required word nothing can be made of a sheet.
+func mayBeUnknown(t reflect.Type, tag reflect.StructTag) bool {
+	words, isText := tag.Get("oneof"), t.Kind() == reflect.String
+	switch {
+	case hasWord(tag, "unknown"), isText && words == "" && (tag.Get("unit") == "" || tag.Get("unit") == "identifier"):
+		return false
+	case strings.HasSuffix(tag.Get("sheet"), ",required"):
+		return words == "" && !isText && t != reflect.TypeFor[Expression]()
+	}
+	return true
 }
 
 // read reads a node as a value of the given type; bad is the node at fault.
@@ -250,30 +317,14 @@ func (d *decoder) rows(n *yaml.Node, t reflect.Type, unit string) (reflect.Value
 	return v, nil, nil
 }
 
-func numberIn(text, unit string) (float64, *misfit) {
-	switch unit {
-	case "":
-		return plain(text)
-	case "multiple":
-		return plain(strings.TrimSuffix(text, "x"))
-	}
-	return quantity(text, unit)
-}
-
-func plain(text string) (float64, *misfit) {
-	v, err := strconv.ParseFloat(text, 64)
-	if err != nil || math.IsNaN(v) || math.IsInf(v, 0) || math.Abs(v) > 1e15 {
-		return 0, &misfit{quote(text), "a plain number"}
-	}
-	return v, nil
-}
-
 // longestText is how long a free text may be.
 const longestText = 2000
 
 var (
 	identifierForm = regexp.MustCompile(`^[a-z][a-z0-9_]{0,23}$`)
-	wholeForm      = regexp.MustCompile(`^(0|[1-9][0-9]{0,8})$`)
+	wholeForm      = regexp.MustCompile(`^` + wholePattern + `$`)
+	plainForm      = regexp.MustCompile(`^[+-]?` + plainPattern + `$`)
+	numberForm     = regexp.MustCompile(`^[+-]?` + numberPattern)
 )
 
 // scalar reads the text of one value.
@@ -309,8 +360,8 @@ func scalar(text string, t reflect.Type, tag reflect.StructTag) (reflect.Value, 
 		}
 		v.SetString(text)
 	case reflect.Struct: // Expression: parsed once all names are known
-		if len(text) > longestExpression {
-			return v, &misfit{fmt.Sprintf("%d characters", len(text)), fmt.Sprintf("at most %d", longestExpression)}
+		if n := utf8.RuneCountInString(text); n > longestExpression {
+			return v, &misfit{fmt.Sprintf("%d characters", n), fmt.Sprintf("at most %d", longestExpression)}
 		}
 		v.FieldByName("Text").SetString(text)
 	}
@@ -319,12 +370,12 @@ func scalar(text string, t reflect.Type, tag reflect.StructTag) (reflect.Value, 
 
 func wording(text, unit string) *misfit {
 	switch {
-	case len(text) > longestText:
-		return &misfit{fmt.Sprintf("%d characters", len(text)), fmt.Sprintf("at most %d", longestText)}
-	case text != printable(text):
-		return &misfit{quote(printable(text)), "text without control characters or characters that turn the direction of writing"}
+	case utf8.RuneCountInString(text) > longestText:
+		return &misfit{fmt.Sprintf("%d characters", utf8.RuneCountInString(text)), fmt.Sprintf("at most %d", longestText)}
+	case strings.IndexFunc(text, invisible) >= 0:
+		return &misfit{quote(text), "text without control characters or characters that turn the direction of writing"}
 	case unit == "identifier" && !identifierForm.MatchString(text):
-		return &misfit{quote(text), "a lower-case letter, then at most 23 of a-z, 0-9 and _"}
+		return &misfit{quote(text), "a lower-case letter, then at most 23 of a-z, 0-9 and _" + asIdentifier(text)}
 	case unit == "identifier" && reserved[text]:
 		return &misfit{quote(text), "a name that is no word of C, C++ or the expression language"}
 	case unit == "date":
@@ -335,18 +386,21 @@ func wording(text, unit string) *misfit {
 	return nil
 }
 
-// printable replaces what must not reach a file or a terminal as it is.
-func printable(s string) string {
-	return strings.Map(func(r rune) rune {
+// asIdentifier suggests an identifier that is near to a text.
+func asIdentifier(text string) string {
+	id := strings.Trim(strings.Map(func(r rune) rune {
 		switch {
-		case r == '\n' || r == '\t':
+		case r >= 'a' && r <= 'z', r >= '0' && r <= '9':
 			return r
-		case r < 0x20, r >= 0x7f && r < 0xa0, r == 0x61c, r >= 0x200b && r <= 0x200f,
-			r >= 0x2028 && r <= 0x202e, r >= 0x2060 && r <= 0x206f, r == 0xfeff, r == utf8.RuneError:
-			return '?'
+		case r >= 'A' && r <= 'Z':
+			return r - 'A' + 'a'
 		}
-		return r
-	}, s)
+		return '_'
+	}, clip(text, 23)), "_0123456789")
+	if !identifierForm.MatchString(id) || reserved[id] {
+		return ""
+	}
+	return ", such as " + id
 }
 
 func textOf(n *yaml.Node) string {
@@ -423,67 +477,4 @@ func sortedKeys[V any](m map[string]V) []string {
 	}
 	sort.Strings(ks)
 	return ks
-}
-
-func oneOf(found string, words []string) string {
-	if len(words) == 1 {
-		return words[0]
-	}
-	s := "one of " + strings.Join(words, ", ")
-	if near := nearest(found, words); near != "" {
-		s += "; did you mean " + near + "?"
-	}
-	return s
-}
-
-// readable is how many words a person looks through in a message.
-const readable = 16
-
-func didYouMean(found string, words []string) string {
-	if near := nearest(found, words); near != "" {
-		return "did you mean " + near + "?"
-	}
-	if len(words) > readable {
-		return "a key of this section; `makebreak survey schema` lists them"
-	}
-	return "one of " + strings.Join(words, ", ")
-}
-
-// nearest gives the word that is at most a third of its length away.
-func nearest(found string, words []string) string {
-	best, least := "", 1<<30
-	for _, w := range words {
-		if n := distance(found, w); n < least {
-			best, least = w, n
-		}
-	}
-	if best == "" || least > (len(best)+2)/3 {
-		return ""
-	}
-	return best
-}
-
-// distance is the number of single-character changes between two words
-// (Levenshtein, 1965).
-func distance(a, b string) int {
-	if len(a) > 64 || len(b) > 64 {
-		return 1 << 20
-	}
-	row := make([]int, len(b)+1)
-	for j := range row {
-		row[j] = j
-	}
-	for i := 1; i <= len(a); i++ {
-		diagonal := row[0]
-		row[0] = i
-		for j := 1; j <= len(b); j++ {
-			cost := diagonal
-			if a[i-1] != b[j-1] {
-				cost++
-			}
-			diagonal = row[j]
-			row[j] = min(row[j]+1, row[j-1]+1, cost)
-		}
-	}
-	return row[len(b)]
 }

@@ -3,7 +3,6 @@ package survey
 import (
 	"bytes"
 	"crypto/sha256"
-	"encoding/hex"
 	"errors"
 	"fmt"
 	"reflect"
@@ -27,13 +26,14 @@ const (
 // used where the diagnostics hold no error. Nothing in here reads a file: the
 // name is only for the messages.
 func Read(file string, data []byte) (*Survey, Diagnostics) {
-	sum := sha256.Sum256(data)
-	s := &Survey{File: file, Hash: hex.EncodeToString(sum[:])}
-	d := &decoder{file: file, lines: strings.Split(string(data), "\n")}
+	s := &Survey{File: file}
+	d := &decoder{file: file}
 	root, ok := d.tree(data)
 	if !ok {
-		return s, d.diags
+		return s, d.sorted()
 	}
+	s.Hash = fmt.Sprintf("%x", sha256.Sum256(data))
+	d.lines = strings.Split(string(data), "\n")
 	d.section(reflect.ValueOf(s).Elem(), root, "")
 	d.check(s)
 	return s, d.sorted()
@@ -63,7 +63,7 @@ func (d *decoder) tree(data []byte) (*yaml.Node, bool) {
 		return nil, false
 	}
 	if len(data) > longestSheet {
-		return refuse(1, 1, "too large for a sheet", fmt.Sprintf("%d bytes", len(data)), fmt.Sprintf("at most %d", longestSheet))
+		return refuse(1, 1, "too large for a sheet", fmt.Sprintf("%d bytes", len(data)), fmt.Sprintf("at most %d bytes", longestSheet))
 	}
 	if i := bytes.IndexByte(data, 0); i >= 0 {
 		line, col := placeOf(data, i)
@@ -73,13 +73,16 @@ func (d *decoder) tree(data []byte) (*yaml.Node, bool) {
 		line, col := placeOf(data, i)
 		return refuse(line, col, "not UTF-8", fmt.Sprintf("the byte 0x%02X", data[i]), "a text file in UTF-8")
 	}
+	if d.misleading(data); len(d.diags) > 0 {
+		return nil, false
+	}
 	if line, col, depth := bracketDepth(data); depth > deepest {
 		return refuse(line, col, "nested too deeply", fmt.Sprintf("%d open brackets", depth), fmt.Sprintf("at most %d levels", deepest))
 	}
 	var docs []yaml.Node
 	if err := yaml.Load(data, &docs, yaml.WithAllDocuments()); err != nil {
 		line, col, text := yamlError(err)
-		return refuse(line, col, "not readable as YAML", text, "one YAML document; `makebreak survey new` writes one to start from")
+		return refuse(line, col, "not readable as YAML", text, yamlFix(text, lineOf(data, line)))
 	}
 	if len(docs) > 1 {
 		return refuse(max(docs[1].Line, 1), max(docs[1].Column, 1), "more than one document", fmt.Sprintf("%d documents", len(docs)), "one sheet a file, without a line of three dashes inside")
@@ -93,6 +96,23 @@ func (d *decoder) tree(data []byte) (*yaml.Node, bool) {
 		return nil, false
 	}
 	return doc.Content[0], true
+}
+
+// misleading reports characters that hide what a sheet says, wherever they stand.
+func (d *decoder) misleading(data []byte) {
+	text := string(bytes.TrimPrefix(data, []byte("\ufeff")))
+	if strings.IndexFunc(text, misleading) < 0 {
+		return
+	}
+	for i, line := range strings.Split(text, "\n") {
+		at := strings.IndexFunc(line, misleading)
+		if at < 0 {
+			continue
+		}
+		r, _ := utf8.DecodeRuneInString(line[at:])
+		d.diags = append(d.diags, Diagnostic{Error, d.file, i + 1, utf8.RuneCountInString(line[:at]) + 1, "",
+			"a character that hides what the sheet says", fmt.Sprintf("U+%04X", r), "text without control characters and without characters that turn the direction of writing"})
+	}
 }
 
 // plainTree refuses anchors, aliases, merges, tags and depth.
@@ -149,6 +169,14 @@ func placeOf(data []byte, at int) (line, col int) {
 	return line, utf8.RuneCount(before[bytes.LastIndexByte(before, '\n')+1:]) + 1
 }
 
+func lineOf(data []byte, line int) string {
+	lines := bytes.Split(data, []byte("\n"))
+	if line > len(lines) {
+		return ""
+	}
+	return string(lines[line-1])
+}
+
 func invalidUTF8(data []byte) int {
 	for i := 0; i < len(data); {
 		r, n := utf8.DecodeRune(data[i:])
@@ -160,7 +188,7 @@ func invalidUTF8(data []byte) int {
 	return -1
 }
 
-// yamlError takes place and text out of the reader's error.
+// yamlError takes place and text out of the YAML reader's error.
 func yamlError(err error) (line, col int, text string) {
 	var one *yaml.LoadError
 	var many *yaml.LoadErrors
@@ -169,9 +197,36 @@ func yamlError(err error) (line, col int, text string) {
 		one = many.Errors[0]
 	case errors.As(err, &one):
 	default:
-		return 1, 1, printable(err.Error())
+		return 1, 1, oneLine(clip(err.Error(), 200))
 	}
-	return max(one.Mark.Line, 1), max(one.Mark.Column, 1), printable(one.Message)
+	text = strings.NewReplacer("found ", "", "did not find expected ", "no ", "could not find expected ", "no ").Replace(one.Message)
+	return max(one.Mark.Line, 1), max(one.Mark.Column, 1), oneLine(clip(text, 200))
+}
+
+// yamlFixes are the usual slips behind the YAML reader's messages.
+var yamlFixes = []struct{ message, fix string }{
+	{"tab", "spaces in front of a line, never a tab"},
+	{"cannot start any token", "quotes around a text that begins with @, ` or %"},
+	{"mapping values are not allowed", "one key a line, all of a section equally far in, and quotes around a text that holds a colon"},
+	{"no ',' or", "a closing bracket or brace, a comma between entries, and quotes around a text that holds , : # [ ] { or }"},
+	{"no key", "all keys of a section equally far in"},
+	{"no ':'", "key: value, with a space behind the colon"},
+	{"unexpected end of stream", "a closing quote"},
+	{"escape character", "single quotes around a text with backslashes"},
+	{"anchor", "the value itself: there are no anchors and aliases in a sheet"},
+	{"max depth", fmt.Sprintf("at most %d levels", deepest)},
+}
+
+func yamlFix(message, line string) string {
+	if indent := line[:len(line)-len(strings.TrimLeft(line, " \t"))]; strings.Contains(indent, "\t") {
+		return yamlFixes[0].fix
+	}
+	for _, f := range yamlFixes {
+		if strings.Contains(message, f.message) {
+			return f.fix
+		}
+	}
+	return "one YAML document; `makebreak survey new` writes one to start from"
 }
 
 // String gives the diagnostic as one line: place, key, what is wrong, what was
@@ -192,5 +247,5 @@ func (d Diagnostic) String() string {
 	if d.Fits != "" {
 		fmt.Fprintf(&b, "; fits %s", d.Fits)
 	}
-	return strings.ReplaceAll(strings.ReplaceAll(printable(b.String()), "\n", " "), "\t", " ")
+	return oneLine(b.String())
 }

@@ -35,7 +35,33 @@ func schemaOf(t reflect.Type) object {
 	if required != nil {
 		o["required"] = required
 	}
+	if rules := conditional(t); rules != nil {
+		o["allOf"] = rules
+	}
 	return o
+}
+
+// conditional refuses the keys of other kinds of part.
+func conditional(t reflect.Type) []any {
+	refused := map[string]object{}
+	conditions := map[string]condition{}
+	for _, k := range keysOf(t) {
+		if c, ok := conditionOf(k.tag); ok {
+			if refused[c.String()] == nil {
+				refused[c.String()], conditions[c.String()] = object{}, c
+			}
+			refused[c.String()][k.name] = false
+		}
+	}
+	var rules []any
+	for _, name := range sortedKeys(refused) {
+		c := conditions[name]
+		rules = append(rules, object{
+			"if":   object{"properties": object{c.key: object{"not": object{"enum": c.words}}}, "required": []string{c.key}},
+			"then": object{"properties": refused[name]},
+		})
+	}
+	return rules
 }
 
 func describeUsual(about string, tag reflect.StructTag) string {
@@ -49,42 +75,54 @@ func schemaFor(k key) object {
 	switch {
 	case isField(k.typ):
 		f, _ := k.typ.FieldByName("V")
-		return valueSchema(f.Type, k.tag)
+		return fieldSchema(f.Type, k.tag)
 	case k.typ == reflect.TypeFor[Names](), k.typ == reflect.TypeFor[Words]():
 		one := valueSchema(reflect.TypeFor[string](), k.tag)
 		return object{"anyOf": []any{one, object{"type": "array", "items": one}}}
+	case k.typ.Kind() == reflect.Slice && k.required:
+		return object{"type": "array", "minItems": 1, "items": schemaOf(k.typ.Elem().Elem())}
 	case k.typ.Kind() == reflect.Slice:
-		return object{"type": "array", "items": schemaOf(k.typ.Elem().Elem())}
+		return object{"type": []string{"array", "null"}, "items": schemaOf(k.typ.Elem().Elem())}
 	}
 	return schemaOf(k.typ)
 }
 
-// number is the beginning of every quantity's pattern.
-const numberPattern = `[+-]?[0-9.]+([eE][+-]?[0-9]+)?`
+// fieldSchema is what one key takes: its values, and `unknown` where that is an answer.
+func fieldSchema(t reflect.Type, tag reflect.StructTag) object {
+	s := valueSchema(t, tag)
+	if !mayBeUnknown(t, tag) {
+		return s
+	}
+	if words, ok := s["enum"].([]any); ok {
+		return object{"enum": append(words, "unknown")}
+	}
+	answers := []any{s, object{"const": "unknown"}}
+	if tag.Get("unit") == "name" {
+		answers = append(answers, object{"const": ""})
+	}
+	return object{"anyOf": answers}
+}
 
 func valueSchema(t reflect.Type, tag reflect.StructTag) object {
 	unit := tag.Get("unit")
 	if words := strings.Fields(tag.Get("oneof")); len(words) > 0 {
-		return enumSchema(t, words)
+		return enumSchema(words)
 	}
 	switch t.Kind() {
 	case reflect.Bool:
-		return object{"type": "boolean"}
+		return enumSchema([]string{"true", "false"})
 	case reflect.Int:
-		return orUnknown(object{"type": "integer", "minimum": 0})
+		return numberSchema("integer", wholePattern)
 	case reflect.Float64:
-		if unit == "" {
-			return orUnknown(object{"type": "number", "minimum": 0})
-		}
-		return orUnknown(quantitySchema(unit))
+		return quantitySchema(unit)
 	case reflect.Array:
-		return orUnknown(object{"type": "array", "minItems": t.Len(), "maxItems": t.Len(), "items": quantitySchema(unit)})
+		return object{"type": "array", "minItems": t.Len(), "maxItems": t.Len(), "items": columnSchema(unit)}
 	case reflect.Slice:
-		return orUnknown(rowsSchema(rowUnits[unit]))
+		return rowsSchema(rowUnits[unit])
 	}
 	switch unit {
-	case "identifier":
-		return object{"type": "string", "pattern": identifierForm.String()}
+	case "identifier", "name":
+		return object{"type": "string", "pattern": identifierForm.String(), "not": object{"enum": sortedKeys(reserved)}}
 	case "date":
 		return object{"type": "string", "pattern": `^[0-9]{4}-[0-9]{2}-[0-9]{2}$`}
 	case "expression":
@@ -95,7 +133,7 @@ func valueSchema(t reflect.Type, tag reflect.StructTag) object {
 
 // enumSchema allows the words; those that YAML reads as numbers or truth values
 // are allowed as such too.
-func enumSchema(t reflect.Type, words []string) object {
+func enumSchema(words []string) object {
 	var list []any
 	for _, w := range words {
 		switch {
@@ -110,39 +148,53 @@ func enumSchema(t reflect.Type, words []string) object {
 	return object{"enum": list}
 }
 
-func orUnknown(s object) object { return object{"anyOf": []any{s, object{"const": "unknown"}}} }
+// numberSchema is a plain number that is not negative, in quotes or not.
+func numberSchema(kind, pattern string) object {
+	return object{"anyOf": []any{
+		object{"type": kind, "minimum": 0},
+		object{"type": "string", "pattern": `^\+?` + pattern + "$"},
+	}}
+}
 
 func quantitySchema(unit string) object {
-	if unit == "" || unit == "multiple" {
-		return object{"type": []string{"number", "string"}}
+	if unit == "" {
+		return numberSchema("number", plainPattern)
 	}
-	return object{"type": "string", "pattern": "^" + numberPattern + ` ?(` + strings.Join(unitsOf(unit), "|") + ")" + more(unit) + "$"}
+	return object{"type": "string", "pattern": quantityPattern(unit)}
 }
 
-// more allows a time to have several parts.
-func more(unit string) string {
-	if unit != "time" {
-		return ""
+// quantityPattern is the form of a quantity: a number and a unit, several of
+// them for a time.
+func quantityPattern(dim string) string {
+	sign, units := `\+?`, dimensions[dim].unitNames()
+	if dim == "volt_or_ampere" {
+		units = append(dimensions["voltage"].unitNames(), dimensions["current"].unitNames()...)
 	}
-	return "( " + numberPattern + " ?(" + strings.Join(unitsOf(unit), "|") + "))*"
+	if dimensions[dim].signed || dim == "volt_or_ampere" {
+		sign = "[+-]?"
+	}
+	one := sign + numberPattern + " *(" + strings.Join(units, "|") + ")"
+	if dim == "time" {
+		return "^ *" + one + "( +" + one + ")* *$"
+	}
+	return "^ *" + one + " *$"
 }
 
-func unitsOf(unit string) []string {
-	var units []string
+// columnSchema is one column of a row: a quantity, a plain number of either
+// sign, or a multiple such as 2x.
+func columnSchema(unit string) object {
 	switch unit {
-	case "temperature":
-		units = []string{"degC", "°C", "degF", "°F", "K"}
-	case "volt_or_ampere":
-		units = append(sortedKeys(dimensions["voltage"].units), sortedKeys(dimensions["current"].units)...)
-	default:
-		units = sortedKeys(dimensions[unit].units)
+	case "":
+		return object{"anyOf": []any{object{"type": "number"}, object{"type": "string", "pattern": "^[+-]?" + plainPattern + "$"}}}
+	case "multiple":
+		return object{"anyOf": []any{object{"type": "number"}, object{"type": "string", "pattern": "^[+-]?" + plainPattern + "x?$"}}}
 	}
-	return units
+	return quantitySchema(unit)
 }
 
 func rowsSchema(units []string) object {
 	return object{"type": "array", "minItems": 1, "items": object{
 		"type": "array", "minItems": 2, "maxItems": 2,
-		"prefixItems": []any{quantitySchema(units[0]), quantitySchema(units[1])},
+		"prefixItems": []any{columnSchema(units[0]), columnSchema(units[1])},
 	}}
 }

@@ -1,8 +1,10 @@
 package survey
 
 import (
-	"fmt"
+	"encoding/json"
 	"reflect"
+	"regexp"
+	"strconv"
 	"strings"
 )
 
@@ -12,7 +14,8 @@ type Entry struct {
 	Key     string // with a dash in front where a list entry begins
 	Value   string // empty for a section
 	Assumed string // why the value is what it is although the sheet does not give it
-	Path    string
+	From    string // how the value was worked out of other keys
+	Path    string // key path of the value, or of what it was worked out of
 }
 
 // Entries lists every key of a survey that has a value, written or assumed, in
@@ -23,14 +26,18 @@ func (s *Survey) Entries() []Entry {
 	return l.entries
 }
 
-// String prints an entry as a line that reads like the sheet.
+// String prints an entry as a line of a sheet: the lines of all entries read as
+// one.
 func (e Entry) String() string {
 	line := strings.Repeat("  ", e.Depth) + e.Key + ":"
 	if e.Value != "" {
 		line += " " + e.Value
 	}
 	if e.Assumed != "" {
-		line += "   # assumed: " + e.Assumed
+		line += "   # assumed: " + oneLine(e.Assumed)
+	}
+	if e.From != "" {
+		line += "   # worked out of " + oneLine(e.From)
 	}
 	return line
 }
@@ -38,10 +45,12 @@ func (e Entry) String() string {
 type lister struct{ entries []Entry }
 
 func (l *lister) section(v reflect.Value, depth int, dash string) {
-	for _, k := range keysOf(v.Type()) {
+	keys := keysOf(v.Type())
+	for _, k := range keys {
 		f := v.Field(k.index)
 		before := len(l.entries)
 		switch {
+		case !applies(v, keys, k):
 		case isField(f.Type()):
 			l.value(f, k.name, depth)
 		case f.Kind() == reflect.Struct:
@@ -85,12 +94,32 @@ func (l *lister) list(v reflect.Value, name string, depth int) {
 
 func (l *lister) value(f reflect.Value, name string, depth int) {
 	src := f.FieldByName("Source").Interface().(Source)
-	if !f.FieldByName("Set").Bool() && !src.Written() {
+	set := f.FieldByName("Set").Bool()
+	if !set && !src.Written() {
 		return
 	}
-	text := src.Text
-	if text == "" {
-		text = fmt.Sprint(f.FieldByName("V").Interface())
+	e := Entry{Depth: depth, Key: name, Value: src.Text, Assumed: src.Assumed, Path: src.Path}
+	if set && f.FieldByName("V").Kind() == reflect.Float64 && !strings.HasSuffix("."+src.Path, "."+name) { // an edge out of set point, mark and differential
+		e.Value, e.From = strconv.FormatFloat(f.FieldByName("V").Float(), 'g', 6, 64)+" degC", "set_point "+src.Text
+	} else if f.FieldByName("V").Kind() != reflect.Array && f.FieldByName("V").Kind() != reflect.Slice {
+		e.Value = asYAML(e.Value)
 	}
-	l.entries = append(l.entries, Entry{Depth: depth, Key: name, Value: text, Assumed: src.Assumed, Path: src.Path})
+	l.entries = append(l.entries, e)
+}
+
+// plainText matches texts that YAML reads as they are.
+var plainText = regexp.MustCompile(`^[0-9\pL+./°(-]([0-9\pL_.,;+/°()<>=% -]*[0-9\pL_.;+/°()%-])?$`)
+
+// asYAML puts a text in quotes where YAML would read it otherwise.
+func asYAML(text string) string {
+	if plainText.MatchString(text) && text != "null" && text != "-" && !strings.HasPrefix(text, "- ") && !strings.HasPrefix(text, "---") && !strings.HasPrefix(text, "...") {
+		return text
+	}
+	var b strings.Builder
+	enc := json.NewEncoder(&b) // a JSON string is a double-quoted text of YAML
+	enc.SetEscapeHTML(false)
+	if err := enc.Encode(text); err != nil {
+		return strconv.Quote(text)
+	}
+	return strings.TrimSpace(b.String())
 }

@@ -13,11 +13,15 @@
 //	unit:"temperature"       what a quantity measures (see units.go); the stored
 //	                         value is in the SI-based unit named there
 //	oneof:"a b c"            the words that are allowed
+//	for:"kind=a,b"           only where the key kind of the same section says a
+//	                         or b; also for:"switching", for:"modulating"
 //	usual:"value|source"     what is assumed when the key is absent, and why
 //	about:"…"                one line for the schema and `survey show`
 package survey
 
-// Field is one value of a sheet together with its origin.
+// Field is one value of a sheet together with its origin. Where the sheet says
+// `unknown`, a usual value is assumed if the key has one; otherwise Set is false
+// while Written is true.
 type Field[T any] struct {
 	V   T    // the value, in the unit that the key's tag names
 	Set bool // V may be used: it was written, or a stated default was assumed
@@ -95,7 +99,7 @@ func (s State) Energised() bool { return s == On || s == Open }
 // temperature differences in K, times in s, the rest in SI base units
 // (V, A, ohm, W, m), shares and tolerances as fractions of one.
 type Survey struct {
-	File        string      `json:"-"` // name of the sheet as given to Load
+	File        string      `json:"-"` // name of the sheet as given to Read
 	Hash        string      `json:"-"` // SHA-256 of the sheet's bytes, hex
 	Format      Field[int]  `sheet:"format,required" oneof:"1" about:"format of this sheet"`
 	Equipment   Equipment   `sheet:"equipment,required" about:"the piece of plant"`
@@ -200,13 +204,13 @@ type Load struct {
 	Rest      Field[State]      `sheet:"rest" oneof:"off on closed open" about:"what the load does with no supply to the new output"`
 	RunsWhen  Field[Expression] `sheet:"runs_when" unit:"expression" about:"the old wiring: series contacts are and, parallel ones or"`
 	Area      Field[string]     `sheet:"area" oneof:"non_hazardous zone_0 zone_1 zone_2 zone_20 zone_21 zone_22 unknown" usual:"unknown|not stated" about:"hazardous area classification at the load"`
-	LitBy     Field[string]     `sheet:"lit_by" oneof:"standing_pilot each_start none unknown" usual:"unknown|not stated" about:"gas_valve: what lights the flame"`
-	LowFire   Field[float64]    `sheet:"low_fire" unit:"share" usual:"0 %|no by-pass flame stated" about:"gas_valve: the by-pass flame that the old part left burning"`
-	Follows   Field[string]     `sheet:"follows" unit:"name" about:"modulating_valve: the control it follows"`
-	Actuator  Actuator          `sheet:"actuator" about:"modulating_valve: the new actuator"`
+	LitBy     Field[string]     `sheet:"lit_by" for:"kind=gas_valve" oneof:"standing_pilot each_start none unknown" usual:"unknown|not stated" about:"gas_valve: what lights the flame"`
+	LowFire   Field[float64]    `sheet:"low_fire" for:"kind=gas_valve" unit:"share" usual:"0 %|no by-pass flame stated" about:"gas_valve: the by-pass flame that the old part left burning"`
+	Follows   Field[string]     `sheet:"follows" for:"kind=modulating_valve" unit:"name" about:"modulating_valve: the control it follows"`
+	Actuator  Actuator          `sheet:"actuator" for:"kind=modulating_valve" about:"modulating_valve: the new actuator"`
 }
 
-// Gives reports whether the load is one that opens and closes (a valve or a
+// Opens reports whether the load is one that opens and closes (a valve or a
 // damper) rather than one that goes on and off.
 func (k LoadKind) Opens() bool {
 	switch k {
@@ -232,19 +236,19 @@ type Control struct {
 	Element          Field[string]     `sheet:"element,required" oneof:"bimetal_disc bimetal_strip bimetal_coil_mercury bimetal_coil rod_tube liquid_bulb vapour_bulb gas_bulb wax heated_bimetal fusible_link thermocouple_valve curie_magnet" about:"the sensing element, as in the catalogue"`
 	Action           Field[Action]     `sheet:"action,required" oneof:"breaks_on_rise makes_on_fall makes_on_rise breaks_on_fall closes_on_rise opens_on_rise pulses holds_while_hot indicates" about:"what it does as the element warms"`
 	Senses           Field[string]     `sheet:"senses" oneof:"point average coldest warmest" usual:"point|the element is taken as one point" about:"what the element feels"`
-	SetPoint         Field[float64]    `sheet:"set_point" unit:"temperature" about:"what the dial says"`
-	Marks            Field[string]     `sheet:"marks" oneof:"break make middle" about:"which edge the dial marks"`
-	Differential     Field[float64]    `sheet:"differential" unit:"interval" about:"between make and break"`
-	BreaksAt         Field[float64]    `sheet:"breaks_at" unit:"temperature" about:"contact opens, as measured"`
-	MakesAt          Field[float64]    `sheet:"makes_at" unit:"temperature" about:"contact closes, as measured; with a manual reset: from here the button works"`
+	SetPoint         Field[float64]    `sheet:"set_point" for:"switching modulating" unit:"temperature" about:"what the dial says"`
+	Marks            Field[string]     `sheet:"marks" for:"switching" oneof:"break make middle" about:"which edge the dial marks"`
+	Differential     Field[float64]    `sheet:"differential" for:"switching" unit:"interval" about:"between make and break"`
+	BreaksAt         Field[float64]    `sheet:"breaks_at" for:"switching" unit:"temperature" about:"contact opens, as measured"`
+	MakesAt          Field[float64]    `sheet:"makes_at" for:"switching" unit:"temperature" about:"contact closes, as measured; with a manual reset: from here the button works"`
 	Tolerance        Field[float64]    `sheet:"tolerance" unit:"interval" about:"plus or minus"`
 	Dial             Field[[2]float64] `sheet:"dial" unit:"temperature" about:"stops of a dial that the user keeps"`
 	Reset            Field[Reset]      `sheet:"reset" oneof:"automatic manual at_power_off one_shot" usual:"automatic|not stated" about:"how it becomes ready again"`
 	TripFree         Field[bool]       `sheet:"trip_free" about:"manual reset: it cannot be held in"`
 	OnElementFailure Field[string]     `sheet:"on_element_failure" oneof:"breaks makes opens closes stays unknown" usual:"unknown|not stated" about:"what the contact or valve does when the element fails"`
 	Lag              Field[float64]    `sheet:"lag" unit:"time" about:"sensing lag of the old element"`
-	MinOn            Field[float64]    `sheet:"min_on" unit:"time" usual:"0 s|the old part had none" about:"least time on"`
-	MinOff           Field[float64]    `sheet:"min_off" unit:"time" usual:"0 s|the old part had none" about:"least time off"`
+	MinOn            Field[float64]    `sheet:"min_on" for:"switching" unit:"time" usual:"0 s|the old part had none" about:"least time on"`
+	MinOff           Field[float64]    `sheet:"min_off" for:"switching" unit:"time" usual:"0 s|the old part had none" about:"least time off"`
 	Observed         Observed          `sheet:"observed" about:"the old part's cycle by stopwatch and thermometer"`
 	Match            Field[string]     `sheet:"match" oneof:"thresholds swing cycle_rate" usual:"thresholds|like for like" about:"what the new control keeps"`
 	Plan             Field[Plan]       `sheet:"plan,required" oneof:"replace keep monitor renew add" about:"what becomes of the part"`
@@ -259,30 +263,30 @@ type Control struct {
 	Want             Field[string]     `sheet:"want" oneof:"two_position proportional pid" about:"kind of control wanted; two-position or like for like otherwise"`
 
 	// Modulating valves.
-	StartsAt   Field[float64] `sheet:"starts_at" unit:"temperature" about:"where movement begins"`
-	FullAt     Field[float64] `sheet:"full_at" unit:"temperature" about:"where movement is complete"`
-	Hysteresis Field[float64] `sheet:"hysteresis" unit:"interval" about:"between opening and closing curve"`
-	Stroke     Field[float64] `sheet:"stroke" unit:"length" about:"travel of the valve"`
+	StartsAt   Field[float64] `sheet:"starts_at" for:"modulating" unit:"temperature" about:"where movement begins"`
+	FullAt     Field[float64] `sheet:"full_at" for:"modulating" unit:"temperature" about:"where movement is complete"`
+	Hysteresis Field[float64] `sheet:"hysteresis" for:"modulating" unit:"interval" about:"between opening and closing curve"`
+	Stroke     Field[float64] `sheet:"stroke" for:"modulating" unit:"length" about:"travel of the valve"`
 
 	// Pulsing devices.
-	Rate          Field[float64]      `sheet:"rate" unit:"rate" about:"flashes or cycles, stored per second"`
-	OnShare       Field[float64]      `sheet:"on_share" unit:"share" about:"share of the period that is on"`
-	Period        Field[float64]      `sheet:"period" unit:"time" about:"energy regulator: period"`
-	DialShares    Field[[][2]float64] `sheet:"dial_shares" unit:"dial_share" about:"energy regulator: dial mark and share on"`
-	Lamps         Lamps               `sheet:"lamps" about:"flasher: the lamps it drives"`
-	FirstOnWithin Field[float64]      `sheet:"first_on_within" unit:"time" about:"flasher: first light"`
-	RoadVehicle   Field[bool]         `sheet:"road_vehicle" usual:"false|not stated" about:"flasher of a road vehicle"`
+	Rate          Field[float64]      `sheet:"rate" for:"action=pulses" unit:"rate" about:"flashes or cycles, stored per second"`
+	OnShare       Field[float64]      `sheet:"on_share" for:"action=pulses" unit:"share" about:"share of the period that is on"`
+	Period        Field[float64]      `sheet:"period" for:"action=pulses" unit:"time" about:"energy regulator: period"`
+	DialShares    Field[[][2]float64] `sheet:"dial_shares" for:"action=pulses" unit:"dial_share" about:"energy regulator: dial mark and share on"`
+	Lamps         Lamps               `sheet:"lamps" for:"action=pulses" about:"flasher: the lamps it drives"`
+	FirstOnWithin Field[float64]      `sheet:"first_on_within" for:"action=pulses" unit:"time" about:"flasher: first light"`
+	RoadVehicle   Field[bool]         `sheet:"road_vehicle" for:"action=pulses" usual:"false|not stated" about:"flasher of a road vehicle"`
 
 	// Flame supervision.
-	Supervises  Field[string]  `sheet:"supervises" oneof:"pilot main" about:"which flame"`
-	HoldsFrom   Field[float64] `sheet:"holds_from" unit:"voltage" about:"thermocouple voltage from which it holds"`
-	ReleasesAt  Field[float64] `sheet:"releases_at" unit:"voltage" about:"voltage at which it lets go"`
-	HoldsWithin Field[float64] `sheet:"holds_within" unit:"time" about:"holds this long after lighting"`
-	ShutsWithin Field[float64] `sheet:"shuts_within" unit:"time" about:"shuts this long after the flame is lost"`
+	Supervises  Field[string]  `sheet:"supervises" for:"action=holds_while_hot" oneof:"pilot main" about:"which flame"`
+	HoldsFrom   Field[float64] `sheet:"holds_from" for:"action=holds_while_hot" unit:"voltage" about:"thermocouple voltage from which it holds"`
+	ReleasesAt  Field[float64] `sheet:"releases_at" for:"action=holds_while_hot" unit:"voltage" about:"voltage at which it lets go"`
+	HoldsWithin Field[float64] `sheet:"holds_within" for:"action=holds_while_hot" unit:"time" about:"holds this long after lighting"`
+	ShutsWithin Field[float64] `sheet:"shuts_within" for:"action=holds_while_hot" unit:"time" about:"shuts this long after the flame is lost"`
 
-	Anticipator  Anticipator         `sheet:"anticipator" about:"heater that warms the element while the load is on"`
-	RatedCurrent Field[float64]      `sheet:"rated_current" unit:"current" about:"motor protector: rated current"`
-	TripsAfter   Field[[][2]float64] `sheet:"trips_after" unit:"multiple_time" about:"motor protector: multiple of rated current and time to trip"`
+	Anticipator  Anticipator         `sheet:"anticipator" for:"switching" about:"heater that warms the element while the load is on"`
+	RatedCurrent Field[float64]      `sheet:"rated_current" for:"element=heated_bimetal" unit:"current" about:"motor protector: rated current"`
+	TripsAfter   Field[[][2]float64] `sheet:"trips_after" for:"element=heated_bimetal" unit:"multiple_time" about:"motor protector: multiple of rated current and time to trip"`
 }
 
 type Observed struct {
@@ -341,37 +345,37 @@ type Sensor struct {
 	ClearAfter Field[float64]    `sheet:"clear_after" unit:"time" usual:"10 s|common practice" about:"good for this long ends a fault"`
 	Insulation Field[string]     `sheet:"insulation" oneof:"reinforced basic earthed none unknown" usual:"unknown|not stated" about:"what keeps the probe's circuit from the mains"`
 
-	R25           Field[float64]      `sheet:"r25" unit:"resistance" about:"ntc: resistance at 25 degC"`
-	R25Tolerance  Field[float64]      `sheet:"r25_tolerance" unit:"share" usual:"5 %|common practice where none is stated" about:"plus or minus"`
-	Beta          Field[float64]      `sheet:"beta" unit:"interval" about:"ntc: beta"`
-	BetaTolerance Field[float64]      `sheet:"beta_tolerance" unit:"share" usual:"3 %|common practice where none is stated" about:"plus or minus"`
-	SteinhartHart Field[[3]float64]   `sheet:"steinhart_hart" about:"ntc: A, B, C of 1/T = A + B ln R + C (ln R)^3"`
-	Table         Field[[][2]float64] `sheet:"table" unit:"temperature_resistance" about:"ntc: pairs of temperature and resistance"`
-	PullUp        Field[float64]      `sheet:"pull_up" unit:"resistance" about:"resistor to the reference, sensor to ground"`
-	PullDown      Field[float64]      `sheet:"pull_down" unit:"resistance" about:"sensor to the reference, resistor to ground"`
-	PullTolerance Field[float64]      `sheet:"pull_up_tolerance" unit:"share" usual:"1 %|common practice where none is stated" about:"tolerance of the divider's resistor"`
-	Excitation    Field[float64]      `sheet:"excitation" unit:"voltage" about:"supply of the divider where it is not the converter's reference"`
-	ExcitationTol Field[float64]      `sheet:"excitation_tolerance" unit:"share" usual:"2 %|common practice where none is stated" about:"plus or minus"`
-	SelfHeating   Field[float64]      `sheet:"self_heating" unit:"dissipation" about:"dissipation constant, W/K"`
+	R25           Field[float64]      `sheet:"r25" for:"kind=ntc" unit:"resistance" about:"ntc: resistance at 25 degC"`
+	R25Tolerance  Field[float64]      `sheet:"r25_tolerance" for:"kind=ntc" unit:"share" usual:"5 %|common practice where none is stated" about:"plus or minus"`
+	Beta          Field[float64]      `sheet:"beta" for:"kind=ntc" unit:"interval" about:"ntc: beta"`
+	BetaTolerance Field[float64]      `sheet:"beta_tolerance" for:"kind=ntc" unit:"share" usual:"3 %|common practice where none is stated" about:"plus or minus"`
+	SteinhartHart Field[[3]float64]   `sheet:"steinhart_hart" for:"kind=ntc" about:"ntc: A, B, C of 1/T = A + B ln R + C (ln R)^3"`
+	Table         Field[[][2]float64] `sheet:"table" for:"kind=ntc" unit:"temperature_resistance" about:"ntc: pairs of temperature and resistance"`
+	PullUp        Field[float64]      `sheet:"pull_up" for:"kind=ntc,pt100,pt1000" unit:"resistance" about:"resistor to the reference, sensor to ground"`
+	PullDown      Field[float64]      `sheet:"pull_down" for:"kind=ntc,pt100,pt1000" unit:"resistance" about:"sensor to the reference, resistor to ground"`
+	PullTolerance Field[float64]      `sheet:"pull_up_tolerance" for:"kind=ntc,pt100,pt1000" unit:"share" usual:"1 %|common practice where none is stated" about:"tolerance of the divider's resistor"`
+	Excitation    Field[float64]      `sheet:"excitation" for:"kind=ntc,pt100,pt1000" unit:"voltage" about:"supply of the divider where it is not the converter's reference"`
+	ExcitationTol Field[float64]      `sheet:"excitation_tolerance" for:"kind=ntc,pt100,pt1000" unit:"share" usual:"2 %|common practice where none is stated" about:"plus or minus"`
+	SelfHeating   Field[float64]      `sheet:"self_heating" for:"kind=ntc,pt100,pt1000" unit:"dissipation" about:"dissipation constant, W/K"`
 
-	Class   Field[string]  `sheet:"class" oneof:"AA A B C 1 2" about:"tolerance class: AA A B C (IEC 60751) or 1 2 (IEC 60584-1)"`
-	Wires   Field[int]     `sheet:"wires" oneof:"2 3 4" about:"pt100, pt1000: wires to the sensor"`
-	Lead    Field[float64] `sheet:"lead" unit:"resistance" usual:"0 ohm|not stated" about:"resistance of one lead"`
-	Current Field[float64] `sheet:"current" unit:"current" about:"pt100, pt1000: measuring current"`
-	Gain    Field[float64] `sheet:"gain" about:"gain of the amplifier"`
+	Class   Field[string]  `sheet:"class" for:"kind=pt100,pt1000,type_k,type_j,type_t" oneof:"AA A B C 1 2" about:"tolerance class: AA A B C (IEC 60751) or 1 2 (IEC 60584-1)"`
+	Wires   Field[int]     `sheet:"wires" for:"kind=pt100,pt1000" oneof:"2 3 4" about:"pt100, pt1000: wires to the sensor"`
+	Lead    Field[float64] `sheet:"lead" for:"kind=ntc,pt100,pt1000" unit:"resistance" usual:"0 ohm|not stated" about:"resistance of one lead"`
+	Current Field[float64] `sheet:"current" for:"kind=pt100,pt1000" unit:"current" about:"pt100, pt1000: measuring current"`
+	Gain    Field[float64] `sheet:"gain" for:"kind=pt100,pt1000,type_k,type_j,type_t,millivolt" about:"gain of the amplifier"`
 
-	Offset            Field[float64] `sheet:"offset" unit:"voltage" usual:"0 V|not stated" about:"output of the amplifier at no input"`
-	ColdJunction      Field[string]  `sheet:"cold_junction" unit:"name" about:"thermocouple: sensor at the cold junction"`
-	ColdJunctionError Field[float64] `sheet:"cold_junction_error" unit:"interval" usual:"2 K|common practice where none is stated" about:"plus or minus"`
-	OpenReads         Field[string]  `sheet:"open_reads" oneof:"high low floats unknown" usual:"unknown|not stated" about:"thermocouple: what an open circuit reads"`
+	Offset            Field[float64] `sheet:"offset" for:"kind=type_k,type_j,type_t" unit:"voltage" usual:"0 V|not stated" about:"output of the amplifier at no input"`
+	ColdJunction      Field[string]  `sheet:"cold_junction" for:"kind=type_k,type_j,type_t" unit:"name" about:"thermocouple: sensor at the cold junction"`
+	ColdJunctionError Field[float64] `sheet:"cold_junction_error" for:"kind=type_k,type_j,type_t" unit:"interval" usual:"2 K|common practice where none is stated" about:"plus or minus"`
+	OpenReads         Field[string]  `sheet:"open_reads" for:"kind=type_k,type_j,type_t" oneof:"high low floats unknown" usual:"unknown|not stated" about:"thermocouple: what an open circuit reads"`
 
-	At              Field[[][2]float64] `sheet:"at" unit:"temperature_voltage" about:"linear: pairs of temperature and voltage"`
-	Error           Field[float64]      `sheet:"error" unit:"interval" about:"linear, diode, digital: error of the sensor"`
-	At25            Field[float64]      `sheet:"at_25" unit:"voltage" about:"diode: voltage at 25 degC"`
-	Slope           Field[float64]      `sheet:"slope" unit:"voltage_per_kelvin" about:"diode: change with temperature"`
-	CountsPerKelvin Field[float64]      `sheet:"counts_per_kelvin" about:"digital: counts for one kelvin"`
-	StaleAfter      Field[float64]      `sheet:"stale_after" unit:"time" about:"digital: no new reading for this long is a fault"`
-	FullScale       Field[float64]      `sheet:"full_scale" unit:"volt_or_ampere" about:"millivolt, current: input at the highest count"`
+	At              Field[[][2]float64] `sheet:"at" for:"kind=linear" unit:"temperature_voltage" about:"linear: pairs of temperature and voltage"`
+	Error           Field[float64]      `sheet:"error" for:"kind=linear,diode,digital,millivolt,current" unit:"interval" about:"linear, diode, digital: error of the sensor"`
+	At25            Field[float64]      `sheet:"at_25" for:"kind=diode" unit:"voltage" about:"diode: voltage at 25 degC"`
+	Slope           Field[float64]      `sheet:"slope" for:"kind=diode" unit:"voltage_per_kelvin" about:"diode: change with temperature"`
+	CountsPerKelvin Field[float64]      `sheet:"counts_per_kelvin" for:"kind=digital" about:"digital: counts for one kelvin"`
+	StaleAfter      Field[float64]      `sheet:"stale_after" for:"kind=digital" unit:"time" about:"digital: no new reading for this long is a fault"`
+	FullScale       Field[float64]      `sheet:"full_scale" for:"kind=millivolt,current" unit:"volt_or_ampere" about:"millivolt, current: input at the highest count"`
 }
 
 type Output struct {

@@ -3,7 +3,9 @@ package survey
 import (
 	"errors"
 	"fmt"
+	"regexp"
 	"strings"
+	"unicode/utf8"
 
 	"github.com/expr-lang/expr/ast"
 	"github.com/expr-lang/expr/file"
@@ -35,6 +37,11 @@ func (w *wiring) read(f *Field[Expression]) {
 		f.Set = false
 		return
 	}
+	if offset := comment(text); offset >= 0 {
+		w.failAt(at(offset), "not part of a line of wiring", quote("/"), "no comments and no division here; a comment stands behind a # of the sheet")
+		f.Set = false
+		return
+	}
 	tree, err := parser.Parse(text)
 	if err != nil {
 		offset, message := 0, err.Error()
@@ -42,7 +49,7 @@ func (w *wiring) read(f *Field[Expression]) {
 		if errors.As(err, &fe) {
 			offset, message = fe.From, fe.Message
 		}
-		w.failAt(at(offset), "the expression does not read", printable(message), "names joined by and, or, not; such as: tank_stat and flow_proven")
+		w.failAt(at(offset), "the expression does not read", plainMessage(message), "names joined by and, or, not; such as: tank_stat and flow_proven")
 		f.Set = false
 		return
 	}
@@ -53,6 +60,14 @@ func (w *wiring) read(f *Field[Expression]) {
 		return
 	}
 	f.V.Tree = c
+}
+
+var unexpected = regexp.MustCompile(`unexpected token \w+\((".*")\)`)
+
+// plainMessage puts the parser's words into those of a sheet.
+func plainMessage(message string) string {
+	message = strings.ReplaceAll(message, "unexpected token EOF", "an end where a name is wanted")
+	return oneLine(clip(unexpected.ReplaceAllString(message, "$1 at the wrong place"), 120))
 }
 
 // within gives the place of a character of an expression in the sheet, or the
@@ -75,7 +90,7 @@ func (w *wiring) within(s Source, text string, offset int) Source {
 func (w *wiring) cond(n ast.Node, at func(int) Source) *Cond {
 	here := func() Source { return at(n.Location().From) }
 	refuse := func(found string) *Cond {
-		w.failAt(here(), "not part of a line of wiring", found, "names, and, or, not, brackets, and a sensor compared with a quoted temperature")
+		w.failAt(here(), "not part of a line of wiring", found, allowed)
 		return nil
 	}
 	switch n := n.(type) {
@@ -106,8 +121,25 @@ func (w *wiring) cond(n ast.Node, at func(int) Source) *Cond {
 	case *ast.IntegerNode, *ast.FloatNode:
 		return refuse("a bare number")
 	}
-	return refuse("something else (" + quote(clip(n.String(), 30)) + ")")
+	w.failAt(at(begins(n)), "not part of a line of wiring", quote(clip(n.String(), 40)), allowed)
+	return nil
 }
+
+// begins gives the offset of the first part of a node: the place of some nodes
+// is where they end.
+func begins(n ast.Node) int {
+	first := leftmost(n.Location().From)
+	ast.Walk(&n, &first)
+	return int(first)
+}
+
+type leftmost int
+
+// Visit is called for every part of a node.
+func (l *leftmost) Visit(n *ast.Node) { *l = min(*l, leftmost((*n).Location().From)) }
+
+// allowed is all that a line of wiring may say.
+const allowed = "names, and, or, not, brackets, and a sensor compared with a quoted temperature"
 
 func (w *wiring) pair(op CondOp, n *ast.BinaryNode, at func(int) Source) *Cond {
 	left, right := w.cond(n.Left, at), w.cond(n.Right, at)
@@ -132,15 +164,23 @@ func (w *wiring) name(name string, at Source) *Cond {
 	case "sensor":
 		w.failAt(at, "a sensor is neither true nor false", name, name+` > "60 degC", or the control that it serves`)
 	default:
-		w.failAt(at, "no such part", quote(name), didYouMean(name, w.names("control", "signal", "timer", "load")))
+		w.failAt(at, "no such part", w.alsoSay(name), didYouMeanName(name, w.names("control", "signal", "timer", "load")))
 	}
 	return nil
+}
+
+// alsoSay quotes a name, with what it stands for where that is something else.
+func (w *wiring) alsoSay(name string) string {
+	if what := w.known[name]; what != "" {
+		return quote(name) + ", a " + what
+	}
+	return quote(name)
 }
 
 func (w *wiring) names(kinds ...string) []string {
 	var names []string
 	for _, n := range sortedKeys(w.known) {
-		if contains(kinds, w.known[n]) {
+		if contains(kinds, w.known[n]) && identifierForm.MatchString(n) && !reserved[n] {
 			names = append(names, n)
 		}
 	}
@@ -161,15 +201,24 @@ func (w *wiring) compare(n *ast.BinaryNode, at func(int) Source) *Cond {
 		w.failAt(at(n.Location().From), "not a comparison of a sensor with a temperature", quote(clip(n.String(), 40)), `a sensor and a quoted temperature, such as tank_probe > "60 degC"`)
 		return nil
 	case w.known[id.Value] != "sensor":
-		w.failAt(at(id.Location().From), "no such sensor", quote(id.Value), didYouMean(id.Value, w.names("sensor")))
+		w.failAt(at(id.Location().From), "no such sensor", w.alsoSay(id.Value), didYouMeanName(id.Value, w.names("sensor")))
 		return nil
 	}
-	v, m := temperature(limit.Value)
+	v, m := quantity(limit.Value, "temperature")
 	if m != nil {
 		w.failAt(at(limit.Location().From), "not a temperature", m.found, m.fits)
 		return nil
 	}
 	return &Cond{Op: CondCompare, Name: id.Value, Cmp: op, Limit: v, LimitText: limit.Value}
+}
+
+// comment finds the sign with which the expression language begins a comment.
+// What a comment swallows would look like wiring to a reader.
+func comment(text string) int {
+	if i := strings.IndexByte(text, '/'); i >= 0 {
+		return utf8.RuneCountInString(text[:i])
+	}
+	return -1
 }
 
 func brackets(text string) (deepest, offset int) {
@@ -185,11 +234,4 @@ func brackets(text string) (deepest, offset int) {
 		}
 	}
 	return deepest, offset
-}
-
-func clip(s string, n int) string {
-	if r := []rune(s); len(r) > n {
-		return string(r[:n]) + "…"
-	}
-	return s
 }
