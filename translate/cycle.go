@@ -111,7 +111,10 @@ func (b *builder) contactLife(c *survey.Control, l *survey.Load, cycle thermal.C
 	if o == nil || o.Kind.V != "relay" {
 		return // nothing wears in a semiconductor by switching
 	}
-	kind := l.SupplyIs.V
+	kind := "" // the derating holds for resistive loads only
+	if l.Kind.V == "heater" {
+		kind = l.SupplyIs.V
+	}
 	life := switching.Life(known(o.Endurance), known(o.RatedCurrent), known(l.Current), known(o.MechanicalLife), kind)
 	note("years_to_endurance", switching.Years(life, year), o.Endurance.Path)
 	mttfd, t10d := switching.MTTFd(known(o.B10d), year)

@@ -1,6 +1,7 @@
 package sensing
 
 import (
+	"fmt"
 	"math"
 	"sort"
 )
@@ -34,7 +35,7 @@ func E96(ohm float64) float64 {
 // own resistance q there, whichever side the sensor is on. The value is the
 // nearest of the E96 series. ok is false where there is no divider.
 func (c *Chain) BestPull(t float64) (ohm float64, ok bool) {
-	if !c.Sensor.PullUp.Set && !c.Sensor.PullDown.Set {
+	if !c.hasDivider() {
 		return 0, false
 	}
 	q, err := c.Curve.At(t)
@@ -44,11 +45,13 @@ func (c *Chain) BestPull(t float64) (ohm float64, ok bool) {
 	return E96(q), true
 }
 
+func (c *Chain) hasDivider() bool { return c.Sensor.PullUp.Set || c.Sensor.PullDown.Set }
+
 // FewestBits is how many bits a converter needs at least, 8 to 16, for one count
 // to be no more than a tenth of the differential in K at t degC (common
 // practice), with the front end as it is. ok is false where 16 are not enough.
 func (c *Chain) FewestBits(t, differential float64) (bits int, ok bool) {
-	if c.digital {
+	if c.Signed() {
 		return 0, false
 	}
 	width := c.CountWidth(t) * c.full() // K for the whole range, were it one count
@@ -58,4 +61,74 @@ func (c *Chain) FewestBits(t, differential float64) (bits int, ok bool) {
 		}
 	}
 	return 0, false
+}
+
+// DividerAdvice compares the divider that is there with the one advised.
+type DividerAdvice struct {
+	At           float64 // degC
+	Present      float64 // ohm
+	Advised      float64 // ohm, of the E96 series
+	WidthPresent float64 // K a count at At
+	WidthAdvised float64
+	PowerPresent float64 // W in the sensor
+	PowerAdvised float64
+	Working      string
+}
+
+// Divider advises on the divider's resistor for a set point of t degC. ok is
+// false where there is no divider or t lies outside the curve.
+func (c *Chain) Divider(t float64) (a DividerAdvice, ok bool) {
+	best, ok := c.BestPull(t)
+	if !ok {
+		return a, false
+	}
+	other := *c.Sensor
+	field := &other.PullUp
+	if other.PullDown.Set {
+		field = &other.PullDown
+	}
+	a.At, a.Present, a.Advised = t, field.V, best
+	field.V = best
+	changed, err := newChain(&other, c.ADC, c.Box)
+	if err != nil {
+		return a, false
+	}
+	q := c.Curve.at(t)
+	a.WidthPresent, a.WidthAdvised = c.CountWidth(t), changed.CountWidth(t)
+	a.PowerPresent, a.PowerAdvised = c.Power(q), changed.Power(q)
+	a.Working = fmt.Sprintf("the sensor has %.4g ohm at %.4g degC, nearest of E96 %.4g ohm: one count %.3g K, %.3g mW in the sensor; kept at %.4g ohm: %.3g K, %.3g mW",
+		q, t, best, a.WidthAdvised, 1000*a.PowerAdvised, a.Present, a.WidthPresent, 1000*a.PowerPresent)
+	return a, true
+}
+
+// BitsAdvice compares the converter that is there with the least one that would do.
+type BitsAdvice struct {
+	Present int
+	Fewest  int     // 8 to 16; 0 where 16 are not enough
+	Enough  bool    // the present one will do
+	Width   float64 // K a count as it is
+	Wanted  float64 // K a count at most
+	Working string
+}
+
+// Bits advises on the converter for a differential in K at a set point of t
+// degC: one count is to be at most a tenth of it (common practice). ok is false
+// for a digital sensor.
+func (c *Chain) Bits(t, differential float64) (a BitsAdvice, ok bool) {
+	if c.Signed() || !(differential > 0) {
+		return a, false
+	}
+	a = BitsAdvice{Present: c.ADC.Bits.V, Width: c.CountWidth(t), Wanted: differential / 10}
+	a.Fewest, _ = c.FewestBits(t, differential)
+	a.Enough = a.Width <= a.Wanted
+	need := fmt.Sprintf("%d bits are the fewest that do", a.Fewest)
+	if a.Fewest == 0 {
+		need = "not even 16 bits do with this front end"
+	}
+	keep := "the present one does"
+	if !a.Enough {
+		keep = fmt.Sprintf("kept, one count is 1/%.3g of the differential", differential/a.Width)
+	}
+	a.Working = fmt.Sprintf("one count at most %.3g K, a tenth of %.4g K (common practice): %s; with %d bits it is %.3g K, %s", a.Wanted, differential, need, a.Present, a.Width, keep)
+	return a, true
 }

@@ -30,25 +30,41 @@ const resistorDrift = 50e-6 // /K
 // three-wire connection are taken to differ; common practice.
 const leadMismatch = 0.05
 
-// Budget adds up every cause of error at t degC.
+// tally is a budget being drawn up.
+type tally struct {
+	Budget
+	q     float64 // quantity of the sensor
+	slope float64 // its change with temperature, without sign, per K
+	width float64 // K a count
+}
+
+func (b *tally) add(name string, kelvin float64, format string, args ...any) {
+	if kelvin > 0 {
+		b.Lines = append(b.Lines, Contribution{Name: name, Kelvin: kelvin, Working: fmt.Sprintf(format, args...)})
+	}
+}
+
+// Budget adds up every cause of error at t degC, to the first order: each is
+// brought to K by the slope of the curve, or the width of a count, there. The
+// error is a RangeError where t is outside the curve.
 func (c *Chain) Budget(t float64) (Budget, error) {
 	q, err := c.Curve.At(t)
 	if err != nil {
 		return Budget{}, err
 	}
-	b := Budget{At: t}
-	add := func(name string, k float64, format string, args ...any) {
-		if k > 0 {
-			b.Lines = append(b.Lines, Contribution{Name: name, Kelvin: k, Working: fmt.Sprintf(format, args...)})
-		}
-	}
-	c.sensorError(t, q, add, &b)
-	c.frontError(t, q, add)
-	if !c.digital {
-		c.converterError(t, add)
-	} else {
-		add("half a count", 0.5*c.CountWidth(t), "half of %.3g K", c.CountWidth(t))
-	}
+	b := &tally{Budget: Budget{At: t}, q: q, slope: math.Abs(c.Curve.slope(t)), width: c.CountWidth(t)}
+	c.sensorError(b)
+	c.selfHeating(b)
+	c.junctionError(b)
+	c.dividerError(b)
+	c.leadError(b)
+	c.supplyError(b)
+	c.converterError(b)
+	b.sum()
+	return b.Budget, nil
+}
+
+func (b *tally) sum() {
 	squares := 0.0
 	for _, l := range b.Lines {
 		b.WorstCase += l.Kelvin
@@ -58,131 +74,137 @@ func (c *Chain) Budget(t float64) (Budget, error) {
 	for i := range b.Lines {
 		b.Lines[i].Share = b.Lines[i].Kelvin / b.WorstCase
 	}
-	return b, nil
 }
 
-type adder func(name string, kelvin float64, format string, args ...any)
-
-// platinumClass gives a and b of ±(a + b·|t|) K (IEC 60751).
-var platinumClass = map[string][2]float64{"AA": {0.10, 0.0017}, "A": {0.15, 0.002}, "B": {0.30, 0.005}, "C": {0.60, 0.01}}
-
-// thermocoupleClass gives the larger of K and fraction·|t| (IEC 60584-1:2013).
-var thermocoupleClass = map[string]map[string][2]float64{
-	"type_k": {"1": {1.5, 0.004}, "2": {2.5, 0.0075}},
-	"type_j": {"1": {1.5, 0.004}, "2": {2.5, 0.0075}},
-	"type_t": {"1": {0.5, 0.004}, "2": {1.0, 0.0075}},
-}
-
-// Tolerance is the tolerance in K of a class at t degC: AA, A, B, C of
-// IEC 60751 for pt100 and pt1000, 1 and 2 of IEC 60584-1 for thermocouples.
-func Tolerance(kind, class string, t float64) (float64, bool) {
-	switch kind {
-	case "pt100", "pt1000":
-		ab, ok := platinumClass[class]
-		return ab[0] + ab[1]*math.Abs(t), ok
-	}
-	kf, ok := thermocoupleClass[kind][class]
-	return math.Max(kf[0], kf[1]*math.Abs(t)), ok
-}
-
-func (c *Chain) sensorError(t, q float64, add adder, b *Budget) {
-	s, slope := c.Sensor, math.Abs(c.Curve.slope(t))
-	kind := string(s.Kind.V)
-	switch kind {
-	case "ntc":
-		add("sensor: resistance at 25 degC", s.R25Tolerance.V*q/slope, "%.3g %% of %.4g ohm over %.4g ohm/K", 100*s.R25Tolerance.V, q, slope)
-		if s.Beta.Set {
-			d := s.Beta.V * s.BetaTolerance.V * math.Abs(1/(t+Kelvin)-1/298.15) * q
-			add("sensor: beta", d/slope, "%.3g %% of beta, away from 25 degC: %.4g ohm over %.4g ohm/K", 100*s.BetaTolerance.V, d, slope)
-		} else {
-			b.Missing = append(b.Missing, "tolerance of the thermistor's curve away from 25 degC")
+func (c *Chain) sensorError(b *tally) {
+	s := c.Sensor
+	switch kind := s.Kind.V; {
+	case kind == "ntc":
+		b.add("sensor: resistance at 25 degC", s.R25Tolerance.V*b.q/b.slope, "%.3g %% of %.4g ohm over %.4g ohm/K", 100*s.R25Tolerance.V, b.q, b.slope)
+		if !s.Beta.Set {
+			b.missing("tolerance of the thermistor's curve away from 25 degC")
+			return
 		}
-	case "pt100", "pt1000", "type_k", "type_j", "type_t":
-		class, assumed := s.Class.V, ""
-		if !s.Class.Set {
-			class, assumed = map[bool]string{true: "B", false: "2"}[kind == "pt100" || kind == "pt1000"], ", assumed for want of one"
-		}
-		tol, ok := Tolerance(kind, class, t)
-		if ok {
-			add("sensor: tolerance class", tol, "class %s at %.4g degC%s", class, t, assumed)
-		}
+		d := s.Beta.V * s.BetaTolerance.V * math.Abs(1/(b.At+Kelvin)-1/298.15) * b.q
+		b.add("sensor: beta", d/b.slope, "%.3g %% of beta, away from 25 degC: %.4g ohm over %.4g ohm/K", 100*s.BetaTolerance.V, d, b.slope)
+	case isPlatinum(kind), isThermocouple(kind):
+		b.byClass(string(kind), s.Class.V, s.Class.Set)
+	case s.Error.Set:
+		b.add("sensor: stated error", s.Error.V, "as stated")
 	default:
-		if s.Error.Set {
-			add("sensor: stated error", s.Error.V, "as stated")
-		} else {
-			b.Missing = append(b.Missing, "error of the sensor")
-		}
-	}
-	if s.SelfHeating.Set && s.SelfHeating.V > 0 {
-		power := c.power(q)
-		add("self-heating", power/s.SelfHeating.V, "%.3g mW over %.3g mW/K", 1000*power, 1000*s.SelfHeating.V)
-	}
-	if kind == "type_k" || kind == "type_j" || kind == "type_t" {
-		at25 := c.Curve.slope(25)
-		add("cold junction", s.ColdJunctionError.V*at25/slope, "%.3g K at the junction × %.3g µV/K there over %.3g µV/K here", s.ColdJunctionError.V, 1e6*at25, 1e6*slope)
+		b.missing("error of the sensor")
 	}
 }
 
-// power is what the sensor dissipates, in W.
-func (c *Chain) power(q float64) float64 {
+// selfHeating is what the measuring current warms the sensor by: I²R over the
+// dissipation constant.
+func (c *Chain) selfHeating(b *tally) {
+	s := c.Sensor
+	power := c.Power(b.q)
+	switch {
+	case power == 0:
+	case s.SelfHeating.Set && s.SelfHeating.V > 0:
+		b.add("self-heating", power/s.SelfHeating.V, "%.3g mW over %.3g mW/K", 1000*power, 1000*s.SelfHeating.V)
+	default:
+		b.missing("self-heating by %.2g mW (no dissipation constant)", 1000*power)
+	}
+}
+
+// Power is what a sensor of q ohm dissipates in its circuit, W; 0 for a sensor
+// that is no resistor.
+func (c *Chain) Power(q float64) float64 {
 	s := c.Sensor
 	supply := c.ADC.Reference.V
 	if s.Excitation.Set {
 		supply = s.Excitation.V
 	}
+	i := 0.0
 	switch {
 	case s.PullUp.Set:
-		i := supply / (q + s.PullUp.V)
-		return i * i * q
+		i = supply / (q + s.PullUp.V)
 	case s.PullDown.Set:
-		i := supply / (q + s.PullDown.V)
-		return i * i * q
-	case s.Current.Set:
-		return s.Current.V * s.Current.V * q
+		i = supply / (q + s.PullDown.V)
+	case isPlatinum(s.Kind.V):
+		i = s.Current.V
 	}
-	return 0
+	return i * i * q
 }
 
-func (c *Chain) frontError(t, q float64, add adder) {
-	s, slope, full, width := c.Sensor, math.Abs(c.Curve.slope(t)), c.full(), c.CountWidth(t)
-	share := c.front(q)
+// junctionError is the error of the cold junction: E(Tcj) is added before the
+// curve is read, so it counts by the slopes there and here.
+func (c *Chain) junctionError(b *tally) {
+	s := c.Sensor
+	if !isThermocouple(s.Kind.V) {
+		return
+	}
+	at25 := c.Curve.slope(25)
+	b.add("cold junction", s.ColdJunctionError.V*at25/b.slope, "%.3g K at the junction × %.3g µV/K there over %.3g µV/K here", s.ColdJunctionError.V, 1e6*at25, 1e6*b.slope)
+}
+
+// dividerError is that of the divider's resistor: one wrong by a part p looks
+// like a sensor wrong by the same part.
+func (c *Chain) dividerError(b *tally) {
+	s := c.Sensor
 	pull := s.PullUp.V
 	if s.PullDown.Set {
 		pull = s.PullDown.V
 	}
-	if pull > 0 {
-		// A resistor wrong by a part p looks like a sensor wrong by the same part.
-		add("divider resistor", s.PullTolerance.V*q/slope, "%.3g %% of the ratio to %.4g ohm", 100*s.PullTolerance.V, pull)
-		if r := c.Box.Temperature; r.Set {
-			away := math.Max(math.Abs(r.V[1]-25), math.Abs(r.V[0]-25))
-			add("divider resistor: drift", resistorDrift*away*q/slope, "50 ppm/K (common practice) over %.3g K of enclosure", away)
-		}
-	}
-	if s.Lead.V > 0 {
-		switch s.Wires.V {
-		case 3:
-			add("leads", leadMismatch*s.Lead.V/slope, "three wires: 5 %% of %.3g ohm (common practice) over %.4g ohm/K", s.Lead.V, slope)
-		case 4:
-		default:
-			add("leads", 2*s.Lead.V/slope, "two wires of %.3g ohm over %.4g ohm/K", s.Lead.V, slope)
-		}
-	}
-	if c.digital {
+	if pull == 0 {
 		return
 	}
-	if !c.Ratiometric() {
-		add("reference", share*c.ADC.ReferenceTolerance.V*full*width, "%.3g %% of %.4g counts; it does not cancel", 100*c.ADC.ReferenceTolerance.V, share*full)
+	b.add("divider resistor", s.PullTolerance.V*b.q/b.slope, "%.3g %% of the ratio to %.4g ohm", 100*s.PullTolerance.V, pull)
+	r := c.Box.Temperature
+	if !r.Set {
+		b.missing("drift of the divider's resistor (temperatures of the enclosure not stated)")
+		return
 	}
-	if s.Excitation.Set {
-		add("excitation", share*s.ExcitationTol.V*full*width, "%.3g %% of %.4g counts", 100*s.ExcitationTol.V, share*full)
+	away := math.Max(math.Abs(r.V[1]-25), math.Abs(r.V[0]-25))
+	b.add("divider resistor: drift", resistorDrift*away*b.q/b.slope, "50 ppm/K (common practice) over %.3g K of enclosure", away)
+}
+
+// leadError is that of the leads of a resistance sensor: both with two wires,
+// what they differ by with three, nothing with four.
+func (c *Chain) leadError(b *tally) {
+	s := c.Sensor
+	if s.Lead.V <= 0 || s.Wires.V == 4 {
+		return
+	}
+	if s.Wires.V == 3 {
+		b.add("leads", leadMismatch*s.Lead.V/b.slope, "three wires: 5 %% of %.3g ohm (common practice) over %.4g ohm/K", s.Lead.V, b.slope)
+		return
+	}
+	b.add("leads", 2*s.Lead.V/b.slope, "two wires of %.3g ohm over %.4g ohm/K", s.Lead.V, b.slope)
+}
+
+// supplyError is that of reference, excitation, measuring current and
+// amplifier. A ratiometric divider has none: its supply is the reference.
+func (c *Chain) supplyError(b *tally) {
+	s := c.Sensor
+	if s.Gain.Set && isThermometer(s.Kind.V) {
+		b.missing("gain and offset errors of the amplifier")
+	}
+	if c.Signed() || c.Ratiometric() {
+		return
+	}
+	counts := c.front.share(b.q) * c.full()
+	b.add("reference", math.Abs(counts)*c.ADC.ReferenceTolerance.V*b.width, "%.3g %% of %.4g counts; it does not cancel", 100*c.ADC.ReferenceTolerance.V, counts)
+	switch {
+	case s.Excitation.Set:
+		b.add("excitation", counts*s.ExcitationTol.V*b.width, "%.3g %% of %.4g counts", 100*s.ExcitationTol.V, counts)
+	case isPlatinum(s.Kind.V):
+		b.missing("error of the measuring current")
 	}
 }
 
-func (c *Chain) converterError(t float64, add adder) {
-	a, width := c.ADC, c.CountWidth(t)
-	counts := c.coordinate(t)
-	add("converter: offset", a.Offset.V*width, "%.3g counts of %.3g K", a.Offset.V, width)
-	add("converter: gain", a.Gain.V*counts*width, "%.3g %% of %.4g counts", 100*a.Gain.V, counts)
-	add("converter: non-linearity", a.INL.V*width, "%.3g counts of %.3g K", a.INL.V, width)
-	add("converter: half a count", 0.5*width, "half of %.3g K", width)
+func (c *Chain) converterError(b *tally) {
+	if c.Signed() {
+		b.add("half a count", 0.5*b.width, "half of %.3g K", b.width)
+		return
+	}
+	a, counts := c.ADC, c.coordinate(b.At)
+	offset, gain, inl := math.Abs(a.Offset.V), math.Abs(a.Gain.V), math.Abs(a.INL.V)
+	b.add("converter: offset", offset*b.width, "%.3g counts of %.3g K", offset, b.width)
+	b.add("converter: gain", gain*math.Abs(counts)*b.width, "%.3g %% of %.4g counts", 100*gain, counts)
+	b.add("converter: non-linearity", inl*b.width, "%.3g counts of %.3g K", inl, b.width)
+	b.add("converter: half a count", 0.5*b.width, "half of %.3g K", b.width)
 }

@@ -10,10 +10,11 @@ import (
 // Chain is a sensor with its front end and converter: temperature in, count out.
 //
 // An ideal converter of N bits reads floor(2^N · ratio), at most 2^N − 1, of
-// its input as a share of its reference. A digital sensor reads the nearest
-// count. Either way the count changes at an edge: coordinate(t) is the
-// temperature expressed in counts such that count ≥ k begins where the
-// coordinate reaches k.
+// its input as a share of its reference. So `count <= c` changes at the ratio
+// (c + 1)/2^N. A digital sensor gives a signed 16-bit count, the whole number
+// nearest to temperature in degC times counts_per_kelvin, which changes half a
+// count below that number. For the kinds millivolt and current, read V or A
+// wherever this package says degC or K.
 type Chain struct {
 	Sensor *survey.Sensor
 	ADC    survey.ADC
@@ -21,9 +22,8 @@ type Chain struct {
 	Box    survey.Enclosure // where resistors and reference drift
 
 	low, high float64 // believable temperatures, degC
-	lowWhy    string
-	front     func(q float64) float64 // quantity → share of the reference
-	digital   bool
+	rising    bool    // the count rises with temperature
+	front     frontEnd
 }
 
 // ErrNotFixed says that a count does not stand for one temperature.
@@ -32,28 +32,67 @@ type ErrNotFixed struct{ Why string }
 func (e ErrNotFixed) Error() string { return "no fixed count for a temperature: " + e.Why }
 
 // New builds the chain of a sensor. The errors name what is missing or does
-// not work together.
+// not work together; ErrNotFixed is returned for a thermocouple whose cold
+// junction another sensor measures: see NewJunction.
 func New(s *survey.Sensor, adc survey.ADC, box survey.Enclosure) (*Chain, error) {
+	if s.ColdJunction.Set && isThermocouple(s.Kind.V) {
+		return nil, ErrNotFixed{"the cold junction is measured by " + s.ColdJunction.V + ", so the count moves with it; let the amplifier compensate"}
+	}
+	return newChain(s, adc, box)
+}
+
+func newChain(s *survey.Sensor, adc survey.ADC, box survey.Enclosure) (*Chain, error) {
+	if err := positive(s, adc); err != nil {
+		return nil, err
+	}
 	c := &Chain{Sensor: s, ADC: adc, Box: box}
-	if err := c.curve(); err != nil {
+	var err error
+	if c.Curve, err = curveOf(s); err != nil {
 		return nil, err
 	}
-	if err := c.frontEnd(); err != nil {
+	if c.front, err = newFrontEnd(s, adc.Reference.V); err != nil {
 		return nil, err
 	}
+	c.rising = c.coordinate(c.Curve.High) > c.coordinate(c.Curve.Low)
 	c.low, c.high = c.Curve.Low, c.Curve.High
-	c.lowWhy = "the range of the curve"
 	if own, ok := usual[s.Kind.V]; ok {
 		c.low, c.high = math.Max(c.low, own[0]), math.Min(c.high, own[1])
 	}
 	if s.Valid.Set {
 		c.low, c.high = math.Max(s.Valid.V[0], c.Curve.Low), math.Min(s.Valid.V[1], c.Curve.High)
 	}
-	lo, hi := c.Believable()
-	if lo >= hi {
+	if !(c.low < c.high) {
+		return nil, RangeError{c.Curve.Name, fmt.Sprintf("the believable range %.6g to %.6g", c.low, c.high), c.Curve.Low, c.Curve.High, "degC"}
+	}
+	if lo, hi := c.Believable(); lo >= hi {
 		return nil, fmt.Errorf("between %.4g and %.4g degC the converter reads only %d to %d counts", c.low, c.high, lo, hi)
 	}
 	return c, nil
+}
+
+// positive refuses what would divide by nothing.
+func positive(s *survey.Sensor, adc survey.ADC) error {
+	for _, x := range []struct {
+		name string
+		f    survey.Field[float64]
+	}{
+		{"reference", adc.Reference}, {"r25", s.R25}, {"beta", s.Beta}, {"pull_up", s.PullUp}, {"pull_down", s.PullDown},
+		{"excitation", s.Excitation}, {"current", s.Current}, {"gain", s.Gain}, {"full_scale", s.FullScale}, {"counts_per_kelvin", s.CountsPerKelvin},
+	} {
+		if x.f.Set && !(x.f.V > 0 && x.f.V <= math.MaxFloat64) {
+			return fmt.Errorf("%s is %g: it must be more than nothing", x.name, x.f.V)
+		}
+	}
+	if s.Kind.V == "digital" {
+		return nil
+	}
+	if adc.Bits.V < 8 || adc.Bits.V > 16 {
+		return fmt.Errorf("a converter of %d bits: 8 to 16 can be used", adc.Bits.V)
+	}
+	if !adc.Reference.Set {
+		return fmt.Errorf("the reference of the converter is not stated")
+	}
+	return nil
 }
 
 // usual is the believable range of kinds whose curve reaches further than what
@@ -64,132 +103,66 @@ var usual = map[survey.SensorKind][2]float64{
 	"digital": {-55, 125},
 }
 
-func (c *Chain) curve() error {
-	s := c.Sensor
-	switch s.Kind.V {
-	case "ntc":
-		switch {
-		case s.Beta.Set:
-			c.Curve = Beta(s.R25.V, s.Beta.V)
-		case s.SteinhartHart.Set:
-			k := s.SteinhartHart.V
-			if k[2] <= 0 || k[1] <= 0 {
-				return fmt.Errorf("steinhart_hart: B and C must be positive")
-			}
-			c.Curve = SteinhartHart(k[0], k[1], k[2])
-		case s.Table.Set:
-			c.Curve = Points("thermistor (table)", "ohm", s.Table.V, true)
-		default:
-			return fmt.Errorf("no curve: beta, steinhart_hart or table")
-		}
-	case "pt100":
-		c.Curve = Platinum(100)
-	case "pt1000":
-		c.Curve = Platinum(1000)
-	case "type_k", "type_j", "type_t":
-		c.Curve, _ = Thermocouple(s.Kind.V[len(s.Kind.V)-1])
-	case "linear":
-		c.Curve = Points("linear transmitter", "V", s.At.V, false)
-	case "diode":
-		c.Curve = Straight("diode", "V", s.At25.V-25*s.Slope.V, s.Slope.V, -55, 150)
-	case "digital":
-		top := 32767 / s.CountsPerKelvin.V
-		c.Curve = Straight("digital", "counts", 0, s.CountsPerKelvin.V, math.Max(-top, -273), math.Min(top, 1000))
-		c.digital = true
-	case "millivolt":
-		c.Curve = Straight("millivolt input", "V", 0, 1, 0, s.FullScale.V)
-	case "current":
-		c.Curve = Straight("current input", "A", 0, 1, 0, s.FullScale.V)
-	default:
-		return fmt.Errorf("kind %q is not known", s.Kind.V)
-	}
-	return nil
-}
-
-func (c *Chain) frontEnd() error {
-	s, ref := c.Sensor, c.ADC.Reference.V
-	supply := ref
-	if s.Excitation.Set {
-		supply = s.Excitation.V
-	}
-	switch {
-	case c.digital:
-		c.front = func(q float64) float64 { return q }
-	case s.PullUp.Set:
-		c.front = func(q float64) float64 { return supply / ref * q / (q + s.PullUp.V) }
-	case s.PullDown.Set:
-		c.front = func(q float64) float64 { return supply / ref * s.PullDown.V / (q + s.PullDown.V) }
-	case s.Current.Set:
-		c.front = func(q float64) float64 { return s.Current.V * q * s.Gain.V / ref }
-	case s.Kind.V == "type_k" || s.Kind.V == "type_j" || s.Kind.V == "type_t":
-		if s.ColdJunction.Set {
-			return ErrNotFixed{"the cold junction is measured by " + s.ColdJunction.V + ", so the count moves with it; let the amplifier compensate"}
-		}
-		c.front = func(q float64) float64 { return (s.Offset.V + s.Gain.V*q) / ref }
-	case s.Kind.V == "millivolt" || s.Kind.V == "current":
-		c.front = func(q float64) float64 { return q / s.FullScale.V }
-	default:
-		c.front = func(q float64) float64 { return q / ref }
-	}
-	return nil
-}
-
 // Signed reports whether the program receives the count as int16_t.
-func (c *Chain) Signed() bool { return c.digital }
+func (c *Chain) Signed() bool { return c.front.signed }
 
 // Ratiometric reports whether the reference cancels.
-func (c *Chain) Ratiometric() bool {
-	return (c.Sensor.PullUp.Set || c.Sensor.PullDown.Set) && !c.Sensor.Excitation.Set
-}
+func (c *Chain) Ratiometric() bool { return c.front.ratiometric }
 
 // full is the number of counts of the converter.
 func (c *Chain) full() float64 { return math.Ldexp(1, c.ADC.Bits.V) }
 
 // Rising reports whether the count rises with temperature.
-func (c *Chain) Rising() bool {
-	return c.coordinate(c.Curve.High) > c.coordinate(c.Curve.Low)
-}
+func (c *Chain) Rising() bool { return c.rising }
 
-// coordinate is the temperature in counts, not yet cut off.
-func (c *Chain) coordinate(t float64) float64 {
-	share := c.front(c.Curve.at(t))
-	if c.digital {
+// coordinate is the temperature expressed in counts, not yet cut off, such that
+// count ≥ k begins where the coordinate reaches k.
+func (c *Chain) coordinate(t float64) float64 { return c.counts(c.Curve.at(t)) }
+
+// counts is a quantity of the sensor in counts.
+func (c *Chain) counts(q float64) float64 {
+	share := c.front.share(q)
+	if c.Signed() {
 		return share + 0.5
 	}
 	return share * c.full()
 }
 
-// Count is what the converter reads at t degC.
-func (c *Chain) Count(t float64) (int64, error) {
-	if _, err := c.Curve.At(t); err != nil {
+// Ratio is the converter's input as a share of its reference at t degC, not cut
+// off at 0 and 1; for a digital sensor it is the count before rounding.
+func (c *Chain) Ratio(t float64) (float64, error) {
+	q, err := c.Curve.At(t)
+	if err != nil {
 		return 0, err
 	}
-	n := int64(math.Floor(c.coordinate(t) + 1e-9))
-	if c.digital {
-		return n, nil
-	}
-	return max(0, min(n, int64(c.full())-1)), nil
+	return c.front.share(q), nil
 }
 
-// edgeAt is the temperature at which count ≥ k begins to hold, or ceases to.
-func (c *Chain) edgeAt(k int64) float64 {
-	a, b := c.Curve.Low, c.Curve.High
-	rising := c.Rising()
-	for b-a > 1e-9 {
-		m := (a + b) / 2
-		if m == a || m == b {
-			break
-		}
-		if (c.coordinate(m) < float64(k)) == rising {
-			a = m
-		} else {
-			b = m
-		}
+// Count is what the converter reads at t degC.
+func (c *Chain) Count(t float64) (int64, error) {
+	q, err := c.Curve.At(t)
+	if err != nil {
+		return 0, err
 	}
-	return (a + b) / 2
+	return c.reading(c.counts(q)), nil
 }
 
-// Temperature gives the temperatures in degC, lower first, that a count stands for.
+// reading is the count at a coordinate. One that is a whole number but for the
+// last bits of the arithmetic counts as that number.
+func (c *Chain) reading(x float64) int64 {
+	if c.Signed() {
+		return int64(math.Floor(x + 1e-9))
+	}
+	return c.cut(x + 1e-9)
+}
+
+// cut keeps a count within the converter.
+func (c *Chain) cut(n float64) int64 {
+	return int64(math.Max(0, math.Min(math.Floor(n), c.full()-1)))
+}
+
+// Temperature gives the temperatures in degC, lower first, that a count stands
+// for, as far as the curve goes.
 func (c *Chain) Temperature(count int64) (low, high float64) {
 	low, high = c.edgeAt(count), c.edgeAt(count+1)
 	return math.Min(low, high), math.Max(low, high)
@@ -199,16 +172,34 @@ func (c *Chain) Temperature(count int64) (low, high float64) {
 func (c *Chain) Valid() (low, high float64) { return c.low, c.high }
 
 // Believable gives the lowest and highest count that can be believed: the
-// counts of the believable range, and never the two at the rails, which an
-// open or shorted analogue circuit reads.
+// counts of the believable range, short of what the converter can make of an
+// open or shorted circuit with its own errors of offset, gain and linearity.
+// The counts 0 and 2^N − 1 are never believed of a thermometer. An input for V
+// or A reads 0 in ordinary service, so 0 is believed there.
 func (c *Chain) Believable() (low, high int64) {
 	a, _ := c.Count(c.low)
 	b, _ := c.Count(c.high)
 	low, high = min(a, b), max(a, b)
-	if c.digital {
+	if c.Signed() {
 		return max(low, -32767), min(high, 32766)
 	}
-	return max(low, 1), min(high, int64(c.full())-2)
+	bottom, top := c.rails()
+	return max(low, bottom), min(high, top)
+}
+
+// rails are the counts next to those that a failed circuit reads.
+func (c *Chain) rails() (bottom, top int64) {
+	dead := c.full() - 1 // what an open or shorted circuit reads at the upper end
+	if end := math.Max(c.front.open, c.front.short); end > 0 && end < 1 {
+		dead = float64(c.cut(end * c.full()))
+	}
+	slack := math.Abs(c.ADC.Offset.V) + math.Abs(c.ADC.INL.V)
+	bottom = 1 + int64(math.Ceil(slack))
+	top = int64(dead) - 1 - int64(math.Ceil(slack+math.Abs(c.ADC.Gain.V)*dead))
+	if !isThermometer(c.Sensor.Kind.V) {
+		bottom = 0
+	}
+	return bottom, top
 }
 
 // CountWidth is how many kelvins one count is at t degC.
@@ -216,4 +207,9 @@ func (c *Chain) CountWidth(t float64) float64 {
 	const h = 0.01
 	a, b := math.Max(t-h, c.Curve.Low), math.Min(t+h, c.Curve.High)
 	return math.Abs((b - a) / (c.coordinate(b) - c.coordinate(a)))
+}
+
+// edgeAt is the temperature at which count ≥ k begins to hold, or ceases to.
+func (c *Chain) edgeAt(k int64) float64 {
+	return c.whereIs(float64(k), c.Curve.Low, c.Curve.High)
 }

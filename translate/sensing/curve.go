@@ -41,15 +41,19 @@ func (c Curve) At(t float64) (float64, error) {
 	return c.at(t), nil
 }
 
+// tolerance is how closely a temperature is solved for: a million-millionth of
+// the curve's range.
+func (c Curve) tolerance() float64 { return 1e-12 * (c.High - c.Low) }
+
 // Inverse gives the temperature in degC at a quantity, by bisection of the
-// forward curve to within 1e-9 K.
+// forward curve. The error is a RangeError.
 func (c Curve) Inverse(q float64) (float64, error) {
 	a, b := c.Low, c.High
 	qa, qb := c.at(a), c.at(b)
 	if !(q >= math.Min(qa, qb) && q <= math.Max(qa, qb)) {
 		return 0, RangeError{c.Name, fmt.Sprintf("%.6g %s", q, c.Unit), math.Min(qa, qb), math.Max(qa, qb), c.Unit}
 	}
-	for b-a > 1e-9 {
+	for b-a > c.tolerance() {
 		m := (a + b) / 2
 		if m == a || m == b {
 			break
@@ -91,11 +95,24 @@ func SteinhartHart(a, b, c float64) Curve {
 }
 
 // Points is a sensor by a table of temperature in degC and quantity, rising in
-// temperature. Resistances of a thermistor are interpolated as ln R over 1/T,
-// which is exact for a beta curve; other quantities by straight lines.
-func Points(name, unit string, pts [][2]float64, thermistor bool) Curve {
+// temperature and strictly one way in the quantity. Resistances of a thermistor
+// are interpolated as ln R over 1/T, which is exact for a beta curve; other
+// quantities by straight lines. Nothing is said outside the table.
+func Points(name, unit string, pts [][2]float64, thermistor bool) (Curve, error) {
 	pts = append([][2]float64(nil), pts...)
 	n := len(pts)
+	if n < 2 {
+		return Curve{}, fmt.Errorf("no curve: two or more points are needed")
+	}
+	up := pts[1][1] > pts[0][1]
+	for i, p := range pts {
+		if thermistor && (p[1] <= 0 || up || p[0] <= -Kelvin) {
+			return Curve{}, fmt.Errorf("point %d: a thermistor's resistance is more than nothing and falls as it warms", i+1)
+		}
+		if i > 0 && !(p[0] > pts[i-1][0] && p[1] != pts[i-1][1] && (p[1] > pts[i-1][1]) == up) {
+			return Curve{}, fmt.Errorf("point %d: temperatures must rise and the other column go one way", i+1)
+		}
+	}
 	x := func(t float64) float64 { return t }
 	y := func(q float64) float64 { return q }
 	back := y
@@ -103,13 +120,13 @@ func Points(name, unit string, pts [][2]float64, thermistor bool) Curve {
 		x = func(t float64) float64 { return 1 / (t + Kelvin) }
 		y, back = math.Log, math.Exp
 	}
-	return Curve{Name: name, Unit: unit, Low: pts[0][0], High: pts[n-1][0], Rising: pts[n-1][1] > pts[0][1], at: func(t float64) float64 {
+	return Curve{Name: name, Unit: unit, Low: pts[0][0], High: pts[n-1][0], Rising: up, at: func(t float64) float64 {
 		i := sort.Search(n-1, func(i int) bool { return pts[i][0] >= t })
 		i = max(i, 1)
 		a, b := pts[i-1], pts[i]
 		f := (x(t) - x(a[0])) / (x(b[0]) - x(a[0]))
 		return back(y(a[1]) + f*(y(b[1])-y(a[1])))
-	}}
+	}}, nil
 }
 
 // Coefficients of IEC 60751: R(t) = R0·(1 + At + Bt²) for t ≥ 0, and

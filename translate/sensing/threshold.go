@@ -41,7 +41,17 @@ type Threshold struct {
 	ch   *Chain
 }
 
-// Threshold brings a temperature to counts.
+// Compare is the comparison of the raw count with Counts: ">=" or "<=".
+func (h Threshold) Compare() string {
+	if h.AtLeast {
+		return ">="
+	}
+	return "<="
+}
+
+// Threshold brings a temperature in degC to counts. The error is a RangeError
+// where t is outside the believable range; another one says that the count
+// would be outside the believable counts.
 func (c *Chain) Threshold(t float64, side Side, round Round) (Threshold, error) {
 	if !(t > c.low && t < c.high) {
 		return Threshold{}, RangeError{c.Sensor.ID.V, fmt.Sprintf("%.6g degC", t), c.low, c.high, "degC"}
@@ -103,14 +113,17 @@ func (h Threshold) moved(n int64, why string) (Threshold, error) {
 // that noise of one count does not make the load chatter.
 const leastApart = 2
 
-// Apart moves the upper of two thresholds warmer, or the lower colder where
-// keepUpper is set, until they are no less apart than asked for, and at least
-// two counts.
+// Apart moves the upper of two thresholds of one chain warmer, or the lower
+// colder where keepUpper is set, until they are no less apart than asked for,
+// and at least two counts. The error says that there is no room for it.
 func Apart(lower, upper Threshold, keepUpper bool) (Threshold, Threshold, error) {
 	asked := upper.Asked - lower.Asked
+	if lower.ch == nil || lower.ch != upper.ch || !(asked > 0) {
+		return lower, upper, fmt.Errorf("%.6g and %.6g degC are no lower and upper threshold of one sensor", lower.Asked, upper.Asked)
+	}
 	for {
 		apart := upper.edge - lower.edge
-		if apart < 0 {
+		if !lower.ch.Rising() {
 			apart = -apart
 		}
 		if upper.SwitchesAt-lower.SwitchesAt >= asked-1e-6 && apart >= leastApart {

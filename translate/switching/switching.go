@@ -7,6 +7,7 @@ package switching
 import (
 	"fmt"
 	"math"
+	"strings"
 )
 
 // Result is a value with its working, or the reason why it is not determined.
@@ -21,9 +22,14 @@ func found(v float64, unit, format string, args ...any) Result {
 	return Result{v, unit, true, fmt.Sprintf(format, args...)}
 }
 
+const notDetermined = "not determined: "
+
 func open(unit, format string, args ...any) Result {
-	return Result{Unit: unit, Working: "not determined: " + fmt.Sprintf(format, args...)}
+	return Result{Unit: unit, Working: notDetermined + fmt.Sprintf(format, args...)}
 }
+
+// reason is why a result is not determined.
+func (r Result) reason() string { return strings.TrimPrefix(r.Working, notDetermined) }
 
 // SecondsAYear is a year of 365 days, as ISO 13849-1 counts operating days.
 const SecondsAYear = 365 * 24 * 3600
@@ -36,6 +42,15 @@ func OperationsPerYear(period, share float64) Result {
 		return open("1/year", "the cycle is not known")
 	}
 	return found(share*SecondsAYear/period, "1/year", "%.4g of a year / %.4g s a cycle", share, period)
+}
+
+// OperationsByDays is n_op of ISO 13849-1 Annex C: days of operation a year
+// times hours a day times 3600 over the time of one cycle in s.
+func OperationsByDays(days, hours, cycle float64) Result {
+	if !(days > 0 && days <= 366) || !(hours > 0 && hours <= 24) || !(cycle > 0) {
+		return open("1/year", "days a year, hours a day or the cycle are not known")
+	}
+	return found(days*hours*3600/cycle, "1/year", "%.4g days × %.4g h × 3600 / %.4g s a cycle", days, hours, cycle)
 }
 
 // Current kinds for the exponent of contact life.
@@ -54,7 +69,9 @@ const mechanicalFactor = 10
 // Life is how many operations a contact lives at a current in A, rated for
 // endurance operations at rated A. The derating for a lower current is an
 // estimate, for resistive loads, and never goes past the mechanical life
-// (0: ten times the endurance). Above the rating nothing is determined.
+// (0: ten times the endurance). kind is AC or DC; any other word, as for a coil
+// or a motor, leaves the endurance as it is. Above the rating nothing is
+// determined.
 func Life(endurance, rated, current, mechanical float64, kind string) Result {
 	p, known := exponents[kind]
 	switch {
@@ -79,23 +96,24 @@ func Life(endurance, rated, current, mechanical float64, kind string) Result {
 func Years(life, perYear Result) Result {
 	switch {
 	case !life.Determined:
-		return open("years", "%s", life.Working)
+		return open("years", "%s", life.reason())
 	case !perYear.Determined:
-		return open("years", "%s", perYear.Working)
+		return open("years", "%s", perYear.reason())
 	}
 	return found(life.Value/perYear.Value, "years", "%.4g operations / %.4g a year", life.Value, perYear.Value)
 }
 
 // MTTFd is the mean time to dangerous failure, B10d/(0.1·nop), and T10d the
-// time after which the part is replaced, B10d/nop (ISO 13849-1, Annex C). Rated
-// endurance is not B10d: without a B10d nothing is determined.
+// time after which the part is replaced, B10d/nop (ISO 13849-1, Annex C; from a
+// second-hand copy). Rated endurance is not B10d: without a B10d nothing is
+// determined.
 func MTTFd(b10d float64, perYear Result) (mttfd, t10d Result) {
 	switch {
 	case !(b10d > 0):
 		r := open("years", "no B10d is stated; rated endurance is not B10d")
 		return r, r
 	case !perYear.Determined:
-		r := open("years", "%s", perYear.Working)
+		r := open("years", "%s", perYear.reason())
 		return r, r
 	}
 	n := perYear.Value
@@ -117,7 +135,7 @@ func Heat(drop, current float64) Result {
 func Hottest(heat Result, resistance, surroundings float64) Result {
 	switch {
 	case !heat.Determined:
-		return open("degC", "%s", heat.Working)
+		return open("degC", "%s", heat.reason())
 	case !(resistance > 0):
 		return open("degC", "the thermal resistance of the switch is not stated")
 	}
@@ -134,13 +152,4 @@ func Inrush(stated, current, multiple float64, source string) Result {
 		return found(current*multiple, "A", "%.4g A × %.4g, usual for this kind of load (%s)", current, multiple, source)
 	}
 	return open("A", "the current of the load is not stated")
-}
-
-// Flicker says what applies where a load is switched often on a public supply
-// in time-proportioning: a window in s and a current in A.
-func Flicker(window, current float64) string {
-	if current > 16 {
-		return "above 16 A: IEC 61000-3-11 or -3-12 applies, ask the network operator"
-	}
-	return fmt.Sprintf("IEC 61000-3-3 applies (up to 16 A): at one change in %.3g s the permitted dip depends on how often; switch at zero crossing and measure", window/2)
 }

@@ -36,10 +36,10 @@
  * range of its kind, short of both rails): thermistor (beta)
  */
 #define CAL2_TANK_PROBE_LOWEST 227u
-/* counts: highest believable count, about -54.5 degC (assumed for electronics.sensors[0].valid: the
+/* counts: highest believable count, about -50.6 degC (assumed for electronics.sensors[0].valid: the
  * range of its kind, short of both rails): thermistor (beta)
  */
-#define CAL2_TANK_PROBE_HIGHEST 4085u
+#define CAL2_TANK_PROBE_HIGHEST 4081u
 /* steps: not good for 2 s (assumed for electronics.sensors[0].fault_after: common practice): 2 s /
  * 250 ms a step, rounded up
  */
