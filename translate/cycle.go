@@ -1,7 +1,6 @@
 package translate
 
 import (
-	"errors"
 	"fmt"
 
 	"makebreak/survey"
@@ -31,21 +30,30 @@ func (b *builder) cycle(c *survey.Control) {
 		b.openCycle(c, l, "not determined: settles_on, settles_off and time_constant of the process are not all on the sheet")
 		return
 	}
-	p := thermal.Process{On: pr.SettlesOn.V, Off: pr.SettlesOff.V, Tau: pr.TimeConstant.V, Dead: pr.DeadTime.V}
+	loop := thermal.Loop{
+		Process:   thermal.Process{On: pr.SettlesOn.V, Off: pr.SettlesOff.V, Tau: pr.TimeConstant.V, Dead: pr.DeadTime.V},
+		Switching: thermal.Switching{Make: c.MakesAt.V, Break: c.BreaksAt.V},
+	}
 	if lag, from, ok := b.elementLag(c); ok {
-		b.cycleFigures(c, "old_", p, thermal.Switch{OnAt: c.MakesAt.V, OffAt: c.BreaksAt.V, Lag: lag}, from)
+		loop.Sensing.Lag = lag
+		if c.Anticipator.Rise.Set && c.Anticipator.Lag.Set {
+			loop.Sensing.Anticipator = thermal.Anticipator{Rise: c.Anticipator.Rise.V, Lag: c.Anticipator.Lag.V}
+		}
+		b.cycleFigures(c, "old_", loop, from)
 	}
 	t, ok := b.spec.Thresholds[c.ID.V]
 	if !ok {
 		return
 	}
 	s := b.sensor(c.Sensor.V)
-	cycle, err := b.cycleFigures(c, "", p, thermal.Switch{OnAt: t.Make.SwitchesAt, OffAt: t.Break.SwitchesAt, Lag: s.Lag.V}, s.Lag.Path)
+	loop.Sensing = thermal.Sensing{Lag: s.Lag.V}
+	loop.Switching = thermal.Switching{Make: t.Make.SwitchesAt, Break: t.Break.SwitchesAt, MinOn: c.MinOn.V, MinOff: c.MinOff.V}
+	figures, err := b.cycleFigures(c, "", loop, s.Lag.Path)
 	if err != nil {
 		b.openContact(l, "not determined: "+err.Error())
 		return
 	}
-	b.contactLife(c, l, cycle)
+	b.contactLife(c, l, figures.Cycle)
 }
 
 // driven is the load of the process that a control runs.
@@ -64,28 +72,35 @@ func (b *builder) driven(c *survey.Control) *survey.Load {
 }
 
 // cycleFigures notes on and off times, high, low and mean of the medium.
-func (b *builder) cycleFigures(c *survey.Control, prefix string, p thermal.Process, s thermal.Switch, lagFrom string) (thermal.Cycle, error) {
+func (b *builder) cycleFigures(c *survey.Control, prefix string, loop thermal.Loop, lagFrom string) (thermal.Figures, error) {
 	fs := &b.spec.Figures
-	working := fmt.Sprintf("steady cycle of a first-order process with dead time: settles at %s and %s, time constant %s, dead time %s; switches at %s and %s, lag %s (%s)",
-		Degrees(p.On), Degrees(p.Off), Span(p.Tau), Span(p.Dead), Degrees(s.OnAt), Degrees(s.OffAt), Span(s.Lag), describe(lagFrom, "none stated"))
-	cycle, err := thermal.Steady(p, s)
+	cycle, err := loop.Steady()
 	if err != nil {
-		why := err
-		var none thermal.ErrNoCycle
-		if errors.As(err, &none) {
-			why = none
-		}
 		for _, n := range []string{"on_s", "off_s", "high", "low", "mean"} {
-			fs.open(c.ID.V, prefix+n, "", "process", "not determined: "+why.Error())
+			fs.open(c.ID.V, prefix+n, "", "process", "not determined: "+err.Error())
 		}
 		return cycle, err
 	}
+	working := cycleText(loop, lagFrom)
 	fs.add(c.ID.V, prefix+"on_s", cycle.On, "s", "process", working)
 	fs.add(c.ID.V, prefix+"off_s", cycle.Off, "s", "process", working)
 	fs.add(c.ID.V, prefix+"high", cycle.High, "degC", "process", working)
 	fs.add(c.ID.V, prefix+"low", cycle.Low, "degC", "process", working)
 	fs.add(c.ID.V, prefix+"mean", cycle.Mean, "degC", "process", working)
 	return cycle, nil
+}
+
+func cycleText(l thermal.Loop, lagFrom string) string {
+	p, s, w := l.Process, l.Sensing, l.Switching
+	text := fmt.Sprintf("steady cycle of a first-order process with dead time: settles at %s and %s, time constant %s, dead time %s; makes at %s, breaks at %s, lag %s (%s)",
+		Degrees(p.On), Degrees(p.Off), Span(p.Tau), Span(p.Dead), Degrees(w.Make), Degrees(w.Break), Span(s.Lag), describe(lagFrom, "none stated"))
+	if a := s.Anticipator; a.Rise > 0 {
+		text += fmt.Sprintf(", anticipator %s in %s", Kelvins(a.Rise), Span(a.Lag))
+	}
+	if w.MinOn > 0 || w.MinOff > 0 {
+		text += fmt.Sprintf(", at least %s on and %s off", Span(w.MinOn), Span(w.MinOff))
+	}
+	return text
 }
 
 func (b *builder) openCycle(c *survey.Control, l *survey.Load, reason string) {
@@ -102,7 +117,6 @@ func (b *builder) openContact(l *survey.Load, reason string) {
 }
 
 // contactLife works out how long the new output's contact lives on a cycle.
-// Minimum times can only make the cycle longer, so the figure is not too good.
 func (b *builder) contactLife(c *survey.Control, l *survey.Load, cycle thermal.Cycle) {
 	note := func(name string, r switching.Result, from string) { b.result(l.ID.V, name, r, from) }
 	year := switching.OperationsPerYear(cycle.Period(), 1)

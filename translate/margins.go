@@ -6,6 +6,7 @@ import (
 
 	"makebreak/survey"
 	"makebreak/translate/logic"
+	"makebreak/translate/thermal"
 )
 
 // drive is the process at its worst: where it settles with the load on, and how fast.
@@ -35,38 +36,50 @@ func worstDrive(p survey.Process, from float64) (d drive, reason string) {
 func (d drive) slope(t float64) float64 { return (d.settles - t) / d.tau }
 
 // overshoot works out by how much the medium goes on after a hardware limit
-// has cut its load. The element lags a steady rise by slope × lag; after the
-// cut the load still works for the dead time. The slope is taken where the
-// limit acts and not allowed to fall, so the figure is on the safe side.
+// has cut its load: from where the process settles with the load off, on to the
+// trip behind the element's lag, and through the dead time (thermal.Cut).
 func (b *builder) overshoot(c *survey.Control) {
 	if c.Plan.V == survey.Replace || !c.Switching() || len(c.Cuts) == 0 {
 		return
 	}
 	const name = "overshoot_after_cut"
-	fs := &b.spec.Figures
-	at := c.BreaksAt
+	fs, pr, at := &b.spec.Figures, b.survey.Process, c.BreaksAt
+	open := func(path, reason string) { fs.open(c.ID.V, name, "K", path, "not determined: "+reason) }
 	if !at.Set {
-		fs.open(c.ID.V, name, "K", at.Path, "not determined: the temperature at which it acts is not on the sheet")
+		open(at.Path, "the temperature at which it acts is not on the sheet")
 		return
 	}
-	d, reason := worstDrive(b.survey.Process, at.V)
+	d, reason := worstDrive(pr, at.V)
 	if reason != "" {
 		fs.open(c.ID.V, name, "K", "process", reason)
 		return
 	}
-	lag, lagFrom, ok := b.elementLag(c)
-	if !ok {
-		fs.open(c.ID.V, name, "K", c.Lag.Path, "not determined: neither the sheet nor the catalogue gives the lag of "+c.Element.V)
-		return
-	}
-	toward := d.slope(at.V)
-	if (c.Action.V == survey.BreaksOnRise) != (toward > 0) {
+	if (c.Action.V == survey.BreaksOnRise) != (d.settles > at.V) {
 		fs.add(c.ID.V, name, 0, "K", d.from.Path, "the load does not drive beyond this limit: it settles at "+Degrees(d.settles))
 		return
 	}
-	value := math.Abs(toward) * (lag + d.dead)
-	fs.add(c.ID.V, name, value, "K", d.from.Path, fmt.Sprintf("(%s − %s) / %s × (lag %s, %s + dead time %s)",
-		Degrees(d.settles), Degrees(at.V), Span(d.tau), Span(lag), lagFrom, Span(d.dead)))
+	if !pr.SettlesOff.Set || (pr.SettlesOff.V < at.V) != (d.settles > at.V) {
+		open("process.settles_off", "where the process comes from is not on the sheet, or lies beyond the limit")
+		return
+	}
+	lag, lagFrom, ok := b.elementLag(c)
+	if !ok {
+		open(c.Lag.Path, "neither the sheet nor the catalogue gives the lag of "+c.Element.V)
+		return
+	}
+	o, err := thermal.Cut{
+		Process: thermal.Process{On: d.settles, Off: pr.SettlesOff.V, Tau: d.tau, Dead: d.dead},
+		Sensing: thermal.Sensing{Lag: lag}, Trip: at.V, From: pr.SettlesOff.V,
+	}.Overshoot()
+	switch {
+	case err != nil:
+		open(d.from.Path, err.Error())
+	case o.Outcome != thermal.Reached:
+		open(d.from.Path, o.Because)
+	default:
+		fs.add(c.ID.V, name, o.Beyond, "K", d.from.Path, fmt.Sprintf("load on for good, settling at %s, time constant %s; lag %s (%s): %s",
+			Degrees(d.settles), Span(d.tau), Span(lag), lagFrom, o.Because))
+	}
 }
 
 // elementLag is the sensing lag of an old element: as the sheet has it, else

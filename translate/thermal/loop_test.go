@@ -112,7 +112,7 @@ func TestLoopAgainstPlainIteration(t *testing.T) {
 		half := draw("half differential", 0.001, 0.04) * (on - off)
 		p := Process{on, off, draw("tau", 20, 20000), draw("dead", 0, 300)}
 		lag := draw("lag", 0.1, 300)
-		want, err := Steady(p, Switch{OnAt: middle - half, OffAt: middle + half, Lag: lag})
+		want, err := plainSteady(p, plainSwitch{OnAt: middle - half, OffAt: middle + half, Lag: lag})
 		if err != nil {
 			rt.Skip(err)
 		}
