@@ -4,26 +4,22 @@ import (
 	"fmt"
 	"strconv"
 	"strings"
+	"unicode"
 	"unicode/utf8"
 )
 
-// invisible reports whether a character shows nothing of its own, moves a
-// cursor, or turns the direction of writing (Unicode categories Cc and Cf, the
-// line and paragraph separators): in such a text a reader does not see what it
-// says (Boucher and Anderson, Trojan Source, 2021).
-func invisible(r rune) bool {
-	switch {
-	case r == '\n' || r == '\t':
-		return false
-	case r < 0x20, r >= 0x7f && r < 0xa0: // C0, delete, C1
-		return true
-	case r == 0xad, r == 0x61c, r == 0x180e, r == 0xfeff, r == utf8.RuneError:
-		return true
-	case r >= 0x200b && r <= 0x200f, r >= 0x2028 && r <= 0x202e, r >= 0x2060 && r <= 0x206f:
-		return true
-	}
-	return r >= 0xfff9 && r <= 0xfffb || r >= 0xe0000 && r <= 0xe0fff
+// Hidden reports whether a character shows nothing of its own, moves a cursor,
+// or turns the direction of writing (Unicode categories Cc and Cf, the line and
+// paragraph separators, the variation selectors), or is no character at all: in
+// such a text a reader does not see what it says (Boucher and Anderson, Trojan
+// Source, 2021). Every form that text of a sheet reaches asks this one question.
+func Hidden(r rune) bool {
+	return r == utf8.RuneError || unicode.In(r, unicode.Cc, unicode.Cf, unicode.Zl, unicode.Zp, unicode.Variation_Selector) ||
+		r >= 0xe0000 && r <= 0xe0fff // tags, assigned or not
 }
+
+// invisible is Hidden but for the breaks that a text of several lines has.
+func invisible(r rune) bool { return r != '\n' && r != '\t' && Hidden(r) }
 
 // misleading reports whether a character makes a sheet look other than a
 // YAML reader sees it, comments included: control characters, lines that only

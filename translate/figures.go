@@ -57,11 +57,13 @@ func (b *builder) switching(c *survey.Control, chain *sensing.Chain) {
 func (b *builder) advise(c *survey.Control, chain *sensing.Chain) {
 	fs, at := &b.spec.Figures, c.BreaksAt
 	differential := math.Abs(c.BreaksAt.V - c.MakesAt.V)
-	if ohm, ok := chain.BestPull(at.V); ok {
-		fs.add(c.ID.V, "divider_advised", ohm, "ohm", at.Path, fmt.Sprintf("nearest of the E96 series to the sensor's own resistance at %s, which gives the finest count there; one count is %.3g K as it stands", Degrees(at.V), chain.CountWidth(at.V)))
+	if a, ok := chain.Divider(at.V); ok {
+		fs.add(c.ID.V, "divider_advised", a.Advised, "ohm", at.Path, a.Working)
 	}
-	if bits, ok := chain.FewestBits(at.V, differential); ok {
-		fs.add(c.ID.V, "bits_needed", float64(bits), "bits", at.Path, fmt.Sprintf("fewest that keep one count within a tenth of %s with this front end (common practice); the converter has %d", Kelvins(differential), b.survey.Electronics.ADC.Bits.V))
+	if a, ok := chain.Bits(at.V, differential); ok && a.Fewest > 0 {
+		fs.add(c.ID.V, "bits_needed", float64(a.Fewest), "bits", at.Path, a.Working)
+	} else if ok {
+		fs.open(c.ID.V, "bits_needed", "bits", at.Path, a.Working)
 	}
 }
 

@@ -4,7 +4,8 @@ import (
 	"fmt"
 	"strings"
 	"unicode"
-	"unicode/utf8"
+
+	"makebreak/survey"
 )
 
 // Comment makes a text harmless inside a C comment: no comment mark, no line
@@ -40,7 +41,7 @@ func harmless(s string) string {
 		switch {
 		case r == '\n' || r == '\r' || r == '\t' || r == '\v' || r == '\f' || r == 0x85 || unicode.Is(unicode.Z, r):
 			return ' '
-		case r == utf8.RuneError || !unicode.IsPrint(r) || unicode.Is(unicode.Variation_Selector, r):
+		case survey.Hidden(r) || !unicode.IsPrint(r):
 			return '?'
 		}
 		return r

@@ -9,14 +9,9 @@ import (
 	"strings"
 	"unicode"
 	"unicode/utf8"
-)
 
-// hidden reports characters that a reader cannot see or that turn the
-// direction of writing (Unicode's Cc, Cf, Zl and Zp), and bytes that are no
-// character.
-func hidden(r rune) bool {
-	return r == utf8.RuneError || unicode.In(r, unicode.Cc, unicode.Cf, unicode.Zl, unicode.Zp)
-}
+	"makebreak/survey"
+)
 
 // Visible shows hidden characters as escapes, so that text cannot move a
 // terminal's cursor, change its colours or write backwards.
@@ -28,7 +23,7 @@ func Visible(s string) string {
 			b.WriteByte(' ')
 		case r == '\t':
 			b.WriteByte(' ')
-		case hidden(r):
+		case survey.Hidden(r):
 			fmt.Fprintf(&b, "<U+%04X>", r)
 		default:
 			b.WriteRune(r)
@@ -51,7 +46,7 @@ func Markdown(s string) string {
 			b.WriteString("<br>")
 		case r == '\t':
 			b.WriteByte(' ')
-		case hidden(r):
+		case survey.Hidden(r):
 			fmt.Fprintf(&b, "U+%04X", r)
 		case r == '<':
 			b.WriteString("&lt;")
@@ -98,7 +93,7 @@ func cell(s string) string {
 		s = "'" + s
 	}
 	s = strings.Map(func(r rune) rune {
-		if hidden(r) && r != '\n' {
+		if survey.Hidden(r) && r != '\n' {
 			return ' '
 		}
 		return r
@@ -117,7 +112,7 @@ func formula(s string) bool {
 	if s != "" && (s[0] == '\t' || s[0] == '\r') {
 		return true
 	}
-	s = strings.TrimLeftFunc(s, func(r rune) bool { return unicode.IsSpace(r) || hidden(r) })
+	s = strings.TrimLeftFunc(s, func(r rune) bool { return unicode.IsSpace(r) || survey.Hidden(r) })
 	first, _ := utf8.DecodeRuneInString(s)
 	return s != "" && strings.ContainsRune("=+-@＝＋－＠", first) && !numeric(s)
 }

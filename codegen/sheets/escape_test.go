@@ -7,6 +7,8 @@ import (
 	"testing"
 
 	"pgregory.net/rapid"
+
+	"makebreak/survey"
 )
 
 var hostile = []string{
@@ -61,7 +63,7 @@ func TestCSVRoundTrip(t *testing.T) {
 		}
 		for i, c := range row {
 			want := strings.Map(func(r rune) rune {
-				if hidden(r) && r != '\n' {
+				if survey.Hidden(r) && r != '\n' {
 					return ' '
 				}
 				return r
@@ -98,7 +100,7 @@ func TestNothingHiddenIsLeft(t *testing.T) {
 		s := rapid.String().Draw(rt, "text") + rapid.SampledFrom(hostile).Draw(rt, "hostile")
 		for name, got := range map[string]string{"terminal": Visible(s), "Markdown": Markdown(s)} {
 			for _, r := range got {
-				if hidden(r) {
+				if survey.Hidden(r) {
 					rt.Fatalf("%s: %q still holds %U", name, got, r)
 				}
 			}
@@ -119,7 +121,7 @@ func TestJSONRoundTrip(t *testing.T) {
 			rt.Fatal(err)
 		}
 		for _, r := range string(data) {
-			if r != '\n' && hidden(r) {
+			if r != '\n' && survey.Hidden(r) {
 				rt.Fatalf("%q holds %U", data, r)
 			}
 		}

@@ -5,6 +5,8 @@ import (
 	"encoding/json"
 	"fmt"
 	"unicode/utf16"
+
+	"makebreak/survey"
 )
 
 // JSON prints a value with two blanks of indent and its signs as they are.
@@ -27,7 +29,7 @@ func escapeHidden(s string) []byte {
 	var b bytes.Buffer
 	for _, r := range s {
 		switch {
-		case r == '\n' || !hidden(r):
+		case r == '\n' || !survey.Hidden(r):
 			b.WriteRune(r)
 		case r > 0xffff:
 			high, low := utf16.EncodeRune(r)

@@ -30,11 +30,11 @@ func E96(ohm float64) float64 {
 	return above * decade
 }
 
-// BestPull is the divider resistor that gives the finest count at t degC: the
+// bestPull is the divider resistor that gives the finest count at t degC: the
 // slope of q/(q+R) over temperature is greatest where R equals the sensor's
 // own resistance q there, whichever side the sensor is on. The value is the
 // nearest of the E96 series. ok is false where there is no divider.
-func (c *Chain) BestPull(t float64) (ohm float64, ok bool) {
+func (c *Chain) bestPull(t float64) (ohm float64, ok bool) {
 	if !c.hasDivider() {
 		return 0, false
 	}
@@ -47,10 +47,10 @@ func (c *Chain) BestPull(t float64) (ohm float64, ok bool) {
 
 func (c *Chain) hasDivider() bool { return c.Sensor.PullUp.Set || c.Sensor.PullDown.Set }
 
-// FewestBits is how many bits a converter needs at least, 8 to 16, for one count
+// fewestBits is how many bits a converter needs at least, 8 to 16, for one count
 // to be no more than a tenth of the differential in K at t degC (common
 // practice), with the front end as it is. ok is false where 16 are not enough.
-func (c *Chain) FewestBits(t, differential float64) (bits int, ok bool) {
+func (c *Chain) fewestBits(t, differential float64) (bits int, ok bool) {
 	if c.Signed() {
 		return 0, false
 	}
@@ -78,7 +78,7 @@ type DividerAdvice struct {
 // Divider advises on the divider's resistor for a set point of t degC. ok is
 // false where there is no divider or t lies outside the curve.
 func (c *Chain) Divider(t float64) (a DividerAdvice, ok bool) {
-	best, ok := c.BestPull(t)
+	best, ok := c.bestPull(t)
 	if !ok {
 		return a, false
 	}
@@ -119,7 +119,7 @@ func (c *Chain) Bits(t, differential float64) (a BitsAdvice, ok bool) {
 		return a, false
 	}
 	a = BitsAdvice{Present: c.ADC.Bits.V, Width: c.CountWidth(t), Wanted: differential / 10}
-	a.Fewest, _ = c.FewestBits(t, differential)
+	a.Fewest, _ = c.fewestBits(t, differential)
 	a.Enough = a.Width <= a.Wanted
 	need := fmt.Sprintf("%d bits are the fewest that do", a.Fewest)
 	if a.Fewest == 0 {

@@ -30,7 +30,7 @@ func TestBestPullIsBest(t *testing.T) {
 	for _, up := range []bool{true, false} {
 		for _, temp := range []float64{-10, 25, 60, 100} {
 			c := chain(t, thermistor(12, up), 12)
-			best, ok := c.BestPull(temp)
+			best, ok := c.bestPull(temp)
 			if !ok {
 				t.Fatal("no advice")
 			}
@@ -57,7 +57,7 @@ func TestBestPullIsBest(t *testing.T) {
 
 func TestFewestBits(t *testing.T) {
 	c := chain(t, thermistor(12, true), 12)
-	bits, ok := c.FewestBits(60, 6)
+	bits, ok := c.fewestBits(60, 6)
 	if !ok {
 		t.Fatal("no advice")
 	}
@@ -67,7 +67,7 @@ func TestFewestBits(t *testing.T) {
 	if w := chain(t, thermistor(bits-1, true), bits-1).CountWidth(60); bits > 8 && w <= 0.6 {
 		t.Errorf("%d bits would do", bits-1)
 	}
-	if _, ok := c.FewestBits(60, 1e-6); ok {
+	if _, ok := c.fewestBits(60, 1e-6); ok {
 		t.Error("16 bits cannot be enough")
 	}
 }
