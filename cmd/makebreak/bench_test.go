@@ -29,6 +29,10 @@ func BenchmarkStages(b *testing.B) {
 	if err != nil {
 		b.Fatal(err)
 	}
+	view, err := risk.NewView(s, w.computed())
+	if err != nil {
+		b.Fatal(err)
+	}
 	job := w.job()
 	files, err := codegen.Pack(job)
 	if err != nil {
@@ -45,7 +49,7 @@ func BenchmarkStages(b *testing.B) {
 	}{
 		{"read", func() error { survey.Read("sheet.yaml", data); return nil }},
 		{"translate", func() error { translate.Translate(s); return nil }},
-		{"faults", func() error { faults.Assess(spec); return nil }},
+		{"faults", func() error { faults.Assess(spec, view); return nil }},
 		{"risks", func() error {
 			v, err := risk.NewView(s, w.computed())
 			if err == nil {

@@ -109,9 +109,13 @@ func (o *options) assess(file string, errw io.Writer) (*work, error) {
 		return nil, err
 	}
 	w := &work{spec: spec}
+	before, err := risk.NewView(spec.Survey, w.computed())
+	if err != nil {
+		return nil, exit{exitWrong, err}
+	}
 	// The two long walks through the program only read it; they go side by side.
 	functions := make(chan []faults.Row)
-	go func() { functions <- faults.Assess(spec) }()
+	go func() { functions <- faults.Assess(spec, before) }()
 	if spec.Program != nil {
 		w.tour = prove.Visit(spec.Program, prove.Budget{Steps: tourSteps})
 	}

@@ -35,12 +35,18 @@ func compiler(t *testing.T, name string) string {
 	t.Helper()
 	path, err := exec.LookPath(name)
 	if err != nil {
-		if os.Getenv("CI") != "" {
-			t.Fatalf("%s is not here", name)
-		}
-		t.Skipf("SKIPPED: %s is not here", name)
+		without(t, name)
 	}
 	return path
+}
+
+// without skips aloud for want of a tool; where CI is set that is a failure.
+func without(t *testing.T, tool string) {
+	t.Helper()
+	if os.Getenv("CI") != "" {
+		t.Fatalf("%s is not here", tool)
+	}
+	t.Skipf("SKIPPED: %s is not here", tool)
 }
 
 func write(t *testing.T, dir string, files map[string]string) {
@@ -227,7 +233,7 @@ func TestProgramsWithOtherCompilers(t *testing.T) {
 			t.Parallel()
 			cc := compiler(t, c.cc)
 			if c.name == "gcc 32 bit" && !works(t, cc, "-m32") {
-				t.Skip("SKIPPED: gcc has no 32-bit library here")
+				without(t, "gcc's 32-bit library")
 			}
 			for _, src := range sources(t) {
 				id, dir := src.Program.ID, t.TempDir()

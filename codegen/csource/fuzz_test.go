@@ -388,7 +388,7 @@ func TestRandomPrograms(t *testing.T) {
 				compiler(t, tool.name)
 			}
 			if strings.Contains(strings.Join(tool.args, " "), "-m32") && !works(t, tool.name, "-m32") {
-				t.Skip("SKIPPED: gcc has no 32-bit library here")
+				without(t, "gcc's 32-bit library")
 			}
 			for seed := uint64(1); seed <= *programs; seed++ {
 				c := grow(seed, blocks)

@@ -7,12 +7,14 @@ import (
 	"makebreak/survey/catalogue"
 	"makebreak/translate"
 	"makebreak/translate/logic"
+	"makebreak/translate/risk"
 )
 
 // Assess works out every row of the function table. Without a program only
-// the hardware that stays is told of.
-func Assess(spec *translate.Specification) []Row {
-	a := &assessor{spec: spec, found: map[string]*bench{}}
+// the hardware that stays is told of. The view tells which hardware counts
+// against which danger.
+func Assess(spec *translate.Specification, view *risk.View) []Row {
+	a := &assessor{spec: spec, view: view, found: map[string]*bench{}}
 	if spec.Program != nil {
 		a.run = spec.Program.NewRun()
 		for _, l := range spec.Survey.Loads {
@@ -35,6 +37,7 @@ func Assess(spec *translate.Specification) []Row {
 
 type assessor struct {
 	spec  *translate.Specification
+	view  *risk.View
 	run   *logic.Run        // never stepped; forks of it are
 	found map[string]*bench // by load and state, nil where it was not found
 	rows  []Row
@@ -100,8 +103,8 @@ func (a *assessor) contact(l *translate.Switched, k *translate.Contact) {
 	}
 	for _, f := range sensorFaults(a.spec, k.Probe) {
 		now, how := a.inject(l, k, f)
-		with := withHardware(a.spec, l, now, false)
-		before := withHardware(a.spec, l, f.old(a, l, k), false)
+		with := a.withHardware(l, now, false)
+		before := a.withHardware(l, f.old(a, l, k), false)
 		a.add(function, c.ID.V, f.cause, before, now, with, how)
 	}
 	a.output(l, k, function)
@@ -184,13 +187,13 @@ func (a *assessor) output(l *translate.Switched, k *translate.Contact, function 
 			before = end{wrong, "one part with " + k.Control.SamePartAs.V + ": fails with it"}
 		}
 	}
-	a.add(function, id, "contact of the new output welds, or its switch shorts", withHardware(a.spec, l, before, true), weld, withHardware(a.spec, l, weld, true), "sheet: kind of output, read_back")
+	a.add(function, id, "contact of the new output welds, or its switch shorts", a.withHardware(l, before, true), weld, a.withHardware(l, weld, true), "sheet: kind of output, read_back")
 
 	stop := a.stopped(l)
-	a.add(function, id, "program stops with the output on", end{works, "there was no program to stop"}, stop, withHardware(a.spec, l, stop, false), "sheet: watchdog and drive of the output")
+	a.add(function, id, "program stops with the output on", end{works, "there was no program to stop"}, stop, a.withHardware(l, stop, false), "sheet: watchdog and drive of the output")
 
-	flip, how := a.flipped(l)
-	a.add(function, id, "a bit of the program's memory flips", end{works, "there was no memory to upset"}, flip, withHardware(a.spec, l, flip, false), how)
+	flip, how := a.flipped(l, k)
+	a.add(function, id, "a bit of the program's memory flips", end{works, "there was no memory to upset"}, flip, a.withHardware(l, flip, false), how)
 }
 
 func weldedEnd(l *translate.Switched, danger bool) end {
@@ -227,7 +230,7 @@ func (a *assessor) supply(l *translate.Switched) {
 	id := l.Load.ID.V
 	rests := l.Load.Rest.V.Energised()
 	now := staysIn(l, rests, ": what it rests in with no supply to the new output")
-	a.add("goes safe without supply: "+id, id, "supply of the electronics is lost", end{works, "the old control needed no supply of its own"}, now, withHardware(a.spec, l, now, false), "sheet: rest and safe_state")
+	a.add("goes safe without supply: "+id, id, "supply of the electronics is lost", end{works, "the old control needed no supply of its own"}, now, a.withHardware(l, now, false), "sheet: rest and safe_state")
 	if len(l.Probes) > 0 {
 		n, ok := a.restarts(l)
 		text := fmt.Sprintf("comes on by itself %s after the supply returned, where it is called for", translate.Span(a.seconds(n)))
@@ -289,18 +292,18 @@ func (a *assessor) signal(l *translate.Switched, g *survey.Signal) {
 	default:
 		now = end{unsure, "unknown: the sheet does not say what a broken wire reads as"}
 	}
-	a.add(function, g.ID.V, "its wire breaks", end{safe, "a broken wire in series opened the circuit"}, now, withHardware(a.spec, l, now, false), "program run with the input as the broken wire reads")
+	a.add(function, g.ID.V, "its wire breaks", end{safe, "a broken wire in series opened the circuit"}, now, a.withHardware(l, now, false), "program run with the input as the broken wire reads")
 
 	welded := end{wrong, id + " runs without it"}
 	if g.SeenOffBeforeStart.V {
 		welded = end{bounded, id + " runs on until it next goes off, and does not start again: the signal was not seen off"}
 	}
-	a.add(function, g.ID.V, "its contact welds or is bridged", withHardware(a.spec, l, end{wrong, id + " ran without it"}, false), welded, withHardware(a.spec, l, welded, false), "sheet: seen_off_before_start")
+	a.add(function, g.ID.V, "its contact welds or is bridged", a.withHardware(l, end{wrong, id + " ran without it"}, false), welded, a.withHardware(l, welded, false), "sheet: seen_off_before_start")
 
 	stop := a.stopped(l)
-	a.add(function, g.ID.V, "program stops with the output on", end{works, "the contact in series needed no program"}, stop, withHardware(a.spec, l, stop, false), "sheet: watchdog and drive of the output")
+	a.add(function, g.ID.V, "program stops with the output on", end{works, "the contact in series needed no program"}, stop, a.withHardware(l, stop, false), "sheet: watchdog and drive of the output")
 	weld := weldedEnd(l, !l.Load.SafeState.V.Energised())
-	a.add(function, g.ID.V, "contact of the new output welds, or its switch shorts", end{works, "the contact in series opened the circuit all the same"}, weld, withHardware(a.spec, l, weld, true), "sheet: kind of output")
+	a.add(function, g.ID.V, "contact of the new output welds, or its switch shorts", end{works, "the contact in series opened the circuit all the same"}, weld, a.withHardware(l, weld, true), "sheet: kind of output")
 	a.close()
 }
 
@@ -326,8 +329,14 @@ func (a *assessor) hardware(c *survey.Control) {
 	if c.BreaksAt.Set {
 		function += " at " + translate.Degrees(c.BreaksAt.V)
 	}
-	same := end{works, "as before: it stays hard-wired"}
-	a.add(function, c.ID.V, "any failure of the new electronics", same, same, same, "sheet: plan "+string(c.Plan.V))
+	before, same := end{works, "as before"}, end{works, "as before: it stays hard-wired"}
+	switch c.Plan.V {
+	case survey.Renew:
+		same = end{works, "a new approved part does it, hard-wired, once it has been proved"}
+	case survey.Add:
+		before, same = end{wrong, "there was no such part"}, end{works, "a part that is new does it, hard-wired, once it has been proved"}
+	}
+	a.add(function, c.ID.V, "any failure of the new electronics", before, same, same, "sheet: plan "+string(c.Plan.V))
 	for _, s := range c.Shares {
 		switch s.V {
 		case "sensor":

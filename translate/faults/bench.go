@@ -18,6 +18,7 @@ type bench struct {
 	was  bool           // the load was out of its safe state when a fault was put in
 
 	followers []follower
+	calling   []int64 // the inputs before a trip
 }
 
 func newBench(spec *translate.Specification, run *logic.Run) *bench {
@@ -85,7 +86,7 @@ func (b *bench) until(load string, want bool, n int) (int, bool) {
 
 // fork is a second bench in the same state.
 func (b *bench) fork() *bench {
-	return &bench{spec: b.spec, run: b.run.Fork(), in: append([]int64(nil), b.in...), at: b.at, followers: b.followers}
+	return &bench{spec: b.spec, run: b.run.Fork(), in: append([]int64(nil), b.in...), at: b.at, followers: b.followers, calling: b.calling}
 }
 
 // longest is how many steps a scenario may take.

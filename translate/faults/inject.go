@@ -23,25 +23,21 @@ const driftOf = 5.0
 // sensorFaults lists what can be wrong with the sensor of a control. What an
 // open or a short reads follows from the front end.
 func sensorFaults(spec *translate.Specification, p *translate.Probe) []sensorFault {
-	open, openKnown := rail(spec, p.Sensor, true)
-	short, shortKnown := rail(spec, p.Sensor, false)
-	ambient, ambientErr := spec.Chains[p.Sensor.ID.V].Count(surroundings(spec.Survey))
-	fixed := func(n int64, known bool) func(*bench, *translate.Probe, int, int64) (int64, bool) {
-		return func(*bench, *translate.Probe, int, int64) (int64, bool) { return n, known }
+	open, short, ambient := circuits(spec, p.Sensor)
+	fixed := func(c count) func(*bench, *translate.Probe, int, int64) (int64, bool) {
+		return func(*bench, *translate.Probe, int, int64) (int64, bool) { return c.value, c.known }
 	}
 	fs := []sensorFault{
-		{cause: "sensor open, or its wire broken (old: element fails)", reads: fixed(open, openKnown), old: (*assessor).oldElement},
-		{cause: "sensor shorted (old: element fails)", reads: fixed(short, shortKnown), old: (*assessor).oldElement},
+		{cause: "sensor open, or its wire broken (old: element fails)", reads: fixed(open), old: (*assessor).oldElement},
+		{cause: "sensor shorted (old: element fails)", reads: fixed(short), old: (*assessor).oldElement},
 		{cause: "sensor open in one sample of three (old: element fails)", reads: func(_ *bench, _ *translate.Probe, step int, truth int64) (int64, bool) {
 			if step%3 == 0 {
-				return open, openKnown
+				return open.value, open.known
 			}
 			return truth, true
 		}, old: (*assessor).oldElement},
 		{cause: "reading stands still (old: element sticks)", reads: func(_ *bench, _ *translate.Probe, _ int, truth int64) (int64, bool) { return truth, true }, old: oldStuck},
-		{cause: "out of its pocket: reads the surroundings (old: bulb out of its pocket)", reads: func(*bench, *translate.Probe, int, int64) (int64, bool) {
-			return ambient, ambientErr == nil
-		}, old: oldOutOfPocket},
+		{cause: "out of its pocket: reads the surroundings (old: bulb out of its pocket)", reads: fixed(ambient), old: oldOutOfPocket},
 	}
 	for _, k := range []float64{-driftOf, driftOf} {
 		fs = append(fs, sensorFault{cause: fmt.Sprintf("reads %s too %s (old: element drifts)", translate.Kelvins(driftOf), map[bool]string{true: "cold", false: "hot"}[k < 0]), drift: true, shift: k, old: oldDrift})
@@ -76,35 +72,36 @@ func surroundings(s *survey.Survey) float64 {
 	return 20
 }
 
-// rail is the count that an open or shorted sensor reads; known is false where
-// the sheet does not tell, or the reading lies inside the believable range.
-func rail(spec *translate.Specification, s *survey.Sensor, open bool) (int64, bool) {
-	top := int64(1)<<spec.Survey.Electronics.ADC.Bits.V - 1
-	switch s.Kind.V {
-	case "ntc", "pt100", "pt1000":
-		high := open == (s.PullUp.Set || s.Current.Set) // the sensor is the lower part, or fed
-		if high {
-			return top, true
+// count is a number that the converter reads; known is false where nobody can
+// say which.
+type count struct {
+	value int64
+	known bool
+}
+
+// circuits gives what the converter reads with the sensor open, shorted (a
+// transmitter: its wire off, joined to the supply) and at the temperature of
+// the surroundings, as package sensing has it.
+func circuits(spec *translate.Specification, s *survey.Sensor) (open, short, ambient count) {
+	chain := spec.Chains[s.ID.V]
+	for _, f := range chain.Failures() {
+		c := count{f.Count, f.Known}
+		switch f.What {
+		case "open", "wire off":
+			open = c
+		case "short", "short to the supply":
+			short = c
 		}
-		return 0, true
-	case "type_k", "type_j", "type_t":
-		if open {
-			switch s.OpenReads.V {
-			case "high":
-				return top, true
-			case "low":
-				return 0, true
-			}
-			return 0, false
-		}
-		n, err := spec.Chains[s.ID.V].Count(surroundings(spec.Survey)) // reads the place of the short
-		return n, err == nil
-	case "digital":
-		return -32768, true
-	case "linear":
-		return 0, true
 	}
-	return 0, false
+	n, err := chain.Count(surroundings(spec.Survey))
+	ambient = count{n, err == nil}
+	switch s.Kind.V {
+	case "type_k", "type_j", "type_t":
+		short = ambient // shorted in its cable it reads the place of the short
+	case "digital":
+		open = count{-32768, true} // the port says so where nothing new has come
+	}
+	return open, short, ambient
 }
 
 // inject puts a fault into the running program, once with the load on and once
