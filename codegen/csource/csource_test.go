@@ -216,7 +216,8 @@ func TestSheets(t *testing.T) {
 	}
 }
 
-// TestProgramsWithOtherCompilers compiles and runs with whatever else is here.
+// TestProgramsWithOtherCompilers compiles and runs the programs written for the
+// printer, and those of all sheets, with whatever else is here.
 func TestProgramsWithOtherCompilers(t *testing.T) {
 	for _, c := range []struct {
 		name, cc string
@@ -235,7 +236,11 @@ func TestProgramsWithOtherCompilers(t *testing.T) {
 			if c.name == "gcc 32 bit" && !works(t, cc, "-m32") {
 				without(t, "gcc's 32-bit library")
 			}
-			for _, src := range sources(t) {
+			all := sources(t)
+			for _, sheet := range sheets(t) {
+				all = append(all, sourceOf(t, sheet))
+			}
+			for _, src := range all {
 				id, dir := src.Program.ID, t.TempDir()
 				write(t, dir, pack(src, fewSteps))
 				for _, file := range []string{id, id + "_port"} {

@@ -115,6 +115,16 @@ func TestFlippedTripIsFound(t *testing.T) {
 	}
 }
 
+// A limit that the supply resets is ready after a power cut, and the load comes
+// back: the run has to call for it, or nothing would be seen.
+func TestPowerCutIsSeenWithTheLoadCalledFor(t *testing.T) {
+	spec := load(t, "dryer", "reset: manual\n    trip_free: true", "reset: at_power_off")
+	r := find(t, rows(t, spec), "cut_out", "power cut after a trip")
+	if r.Verdict != Kept || !strings.Contains(r.NewAlone, "ready again") {
+		t.Errorf("%+v", r)
+	}
+}
+
 // A limit that acts beyond the danger ends nothing in time, whatever it cuts; one
 // whose temperature nobody knows is unknown.
 func TestHardwareThatDoesNotCount(t *testing.T) {
