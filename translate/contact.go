@@ -23,6 +23,7 @@ type Contact struct {
 	Reset   *logic.Var  // the button; nil unless it latches and has one
 	Make    *edge
 	Break   *edge
+	Dial    *Dial // nil without one
 }
 
 // edge is a threshold of a contact, in counts.
@@ -98,8 +99,10 @@ func (b *builder) contact(c *survey.Control, p *Probe) *Contact {
 
 	// Towards the side that the contact protects, any reading will do and a
 	// failed probe forces it; away from it, only a good probe counts.
-	toMade := k.Make.reached(p)
-	toOpen := k.Break.reached(p)
+	k.Dial = b.dial(c, p)
+	at, rising := marked(c).V, c.Action.V == survey.BreaksOnRise
+	toMade := b.reached(c, p, k.Dial, k.Make, "make", c.MakesAt.V-at, !rising)
+	toOpen := b.reached(c, p, k.Dial, k.Break, "break", c.BreaksAt.V-at, rising)
 	whyMade, whyOpen := "temperature has reached the make", "temperature has reached the break"
 	if k.Acts {
 		toMade = logic.Or(p.failed(), toMade)

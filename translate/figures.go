@@ -18,6 +18,7 @@ func (b *builder) figures() {
 		}
 		b.overshoot(c)
 	}
+	b.conversions()
 	b.margins()
 	b.cycles()
 	b.outputs()
@@ -50,6 +51,7 @@ func (b *builder) switching(c *survey.Control, chain *sensing.Chain) {
 	b.edgeFigures(c, "make", c.MakesAt, t.Make, t.Why)
 	b.edgeFigures(c, "break", c.BreaksAt, t.Break, t.Why)
 	b.advise(c, chain)
+	b.dialFigures(c, chain)
 }
 
 // advise says which divider and which converter would suit the break best, for

@@ -51,8 +51,8 @@ func (b *builder) latch(c *survey.Control, p *Probe) *Contact {
 		At: []*logic.State{
 			{Is: latchTripped, Goes: back},
 			{Is: latchClosed, Goes: []*logic.Transition{
-				{To: latchTripped, When: logic.And(logic.Not(logic.Is(p.State, probeProving)), trip.reached(p)), Why: "temperature has reached the trip"},
-				{To: latchTripped, When: logic.Is(p.State, probeFaulty), Why: "the probe is not to be believed"},
+				{To: latchTripped, When: logic.And(logic.Not(p.proving()), trip.reached(p)), Why: "temperature has reached the trip"},
+				{To: latchTripped, When: p.faulty(), Why: "the probe is not to be believed"},
 				{To: latchTripped, When: logic.And(p.good(), logic.Not(logic.Prev(proven)), logic.Not(rearm.reached(p))),
 					Why: "the supply returned with the temperature not back beyond the reset threshold"},
 			}},

@@ -26,15 +26,36 @@ type Probe struct {
 	Value  *logic.Var // median of the last three believable samples
 	Low    int64      // lowest and highest believable count
 	High   int64
+
+	Cold    *Probe   // measures its cold junction, or nil
+	reading *Reading // its temperature, once something has asked for it
 }
 
 // good is true in a step in which the probe is believed.
-func (p *Probe) good() *logic.Expr { return logic.Is(p.State, probeGood) }
+func (p *Probe) good() *logic.Expr { return logic.And(p.each((*Probe).itsGood)...) }
+
+func (p *Probe) itsGood() *logic.Expr { return logic.Is(p.State, probeGood) }
+
+// each asks the probe, and the one at its cold junction.
+func (p *Probe) each(ask func(*Probe) *logic.Expr) []*logic.Expr {
+	if p.Cold == nil {
+		return []*logic.Expr{ask(p)}
+	}
+	return []*logic.Expr{ask(p), ask(p.Cold)}
+}
+
+func (p *Probe) proving() *logic.Expr {
+	return logic.Or(p.each(func(p *Probe) *logic.Expr { return logic.Is(p.State, probeProving) })...)
+}
+
+func (p *Probe) faulty() *logic.Expr {
+	return logic.Or(p.each(func(p *Probe) *logic.Expr { return logic.Is(p.State, probeFaulty) })...)
+}
 
 // failed is true where the safe state is called for: the probe has not proved
 // itself yet, or has been bad for too long.
 func (p *Probe) failed() *logic.Expr {
-	return logic.Or(logic.Is(p.State, probeProving), logic.Is(p.State, probeFaulty))
+	return logic.Or(p.proving(), p.faulty())
 }
 
 // shortestRun is the least number of good samples in a row that ends a doubt.
@@ -54,6 +75,10 @@ func (b *builder) probe(s *survey.Sensor) *Probe {
 	chain := b.spec.Chains[id]
 	p := &Probe{Sensor: s}
 	p.Low, p.High = chain.Believable()
+	junction := b.spec.Junctions[id]
+	if junction != nil {
+		p.Low, p.High = junction.low, junction.high
+	}
 	what := describe(s.What.V, "sensor "+id)
 
 	raw := logic.Var{Name: id, What: what + ", raw counts", Kind: logic.Int, Range: logic.Count}
@@ -109,6 +134,9 @@ func (b *builder) probe(s *survey.Sensor) *Probe {
 		},
 	})
 	p.Value = b.median(id, what, p)
+	if junction != nil {
+		b.compensate(p, junction)
+	}
 	return p
 }
 

@@ -27,6 +27,10 @@ type Specification struct {
 	// Thresholds of the translated controls, by control.
 	Thresholds map[string]Thresholds
 	Refused    []Refusal
+	// Conversions are the tables of the sensors of which a temperature is needed.
+	Conversions []*Conversion
+	// Junctions are the thermocouples whose cold junction is measured, by sensor.
+	Junctions map[string]*Junction
 }
 
 // ErrorBudget is the error of a sensor at one edge of one control.

@@ -106,6 +106,13 @@ func (b *builder) effect(s *Switched) (effect, bool) {
 // goes off, the temperature moves at (settles − edge)/τ (first-order process).
 func (b *builder) slowest(k *Contact, pr survey.Process) (effect, bool) {
 	edge, heats := k.Control.BreaksAt.V, k.Control.Action.V == survey.BreaksOnRise
+	if k.Dial != nil { // the stop where the load does least
+		low, high := dialEdges(k.Control)
+		edge = low
+		if heats {
+			edge = high
+		}
+	}
 	settles := pr.SettlesOn
 	if pr.Worst.SettlesOn.Set && (pr.Worst.SettlesOn.V < settles.V) == heats {
 		settles = pr.Worst.SettlesOn
@@ -121,8 +128,13 @@ func (b *builder) slowest(k *Contact, pr survey.Process) (effect, bool) {
 	e := effect{probe: k.Probe, from: settles.Source}
 	e.kelvin = effectShare * math.Abs(k.Control.BreaksAt.V-k.Control.MakesAt.V)
 	e.countsFall = chain.Rising() != heats
-	e.counts = max(int64(math.Floor(e.kelvin/chain.CountWidth(edge))), 2)
-	e.kelvin = float64(e.counts) * chain.CountWidth(edge)
+	width := chain.CountWidth(edge)
+	if k.Dial != nil {
+		low, high := dialEdges(k.Control)
+		width = math.Max(chain.CountWidth(low), chain.CountWidth(high))
+	}
+	e.counts = max(int64(math.Floor(e.kelvin/width)), 2)
+	e.kelvin = float64(e.counts) * width
 	// Through the last e.kelvin before the edge, where the drive is least.
 	answer := pr.TimeConstant.V * math.Log((drive+e.kelvin)/drive)
 	delay := pr.DeadTime.V + k.Probe.Sensor.Lag.V

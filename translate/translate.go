@@ -14,7 +14,7 @@ import (
 // it goes. Program is nil where any diagnostic is an error, or where nothing
 // in the sheet is to be replaced.
 func Translate(s *survey.Survey) (*Specification, survey.Diagnostics) {
-	spec := &Specification{Survey: s, Chains: map[string]*sensing.Chain{}, Thresholds: map[string]Thresholds{}}
+	spec := &Specification{Survey: s, Chains: map[string]*sensing.Chain{}, Thresholds: map[string]Thresholds{}, Junctions: map[string]*Junction{}}
 	b := newBuilder(spec)
 	cat, err := catalogue.Load()
 	if err != nil {
@@ -36,6 +36,9 @@ func Translate(s *survey.Survey) (*Specification, survey.Diagnostics) {
 func (b *builder) chains() {
 	e := b.survey.Electronics
 	for _, s := range e.Sensors {
+		if s.ColdJunction.Set {
+			continue
+		}
 		chain, err := sensing.New(s, e.ADC, b.survey.Equipment.Enclosure)
 		if err != nil {
 			b.fail(s.Source, "the measuring chain of "+s.ID.V+" does not work", err.Error(), "another front end or another sensor")
@@ -43,6 +46,7 @@ func (b *builder) chains() {
 		}
 		b.spec.Chains[s.ID.V] = chain
 	}
+	b.junctions()
 }
 
 // translated reports whether a control becomes part of the program.
@@ -166,8 +170,11 @@ func (b *builder) prune() {
 
 // probes builds the sensors that the program needs.
 func (b *builder) probes() {
-	for _, s := range b.survey.Electronics.Sensors {
-		if b.needed(s.ID.V) {
+	for _, measured := range []bool{false, true} { // a couple comes after the sensor of its cold junction
+		for _, s := range b.survey.Electronics.Sensors {
+			if s.ColdJunction.Set != measured || !b.needed(s.ID.V) {
+				continue
+			}
 			p := b.probe(s)
 			b.plan.Sensors[s.ID.V] = p
 			b.flag(s.ID.V, describe(s.What.V, "sensor "+s.ID.V)+": not believed", logic.Is(p.State, probeFaulty))
@@ -178,6 +185,11 @@ func (b *builder) probes() {
 // needed reports whether a sensor is read by a translated control or compared
 // in an expression.
 func (b *builder) needed(sensor string) bool {
+	for _, s := range b.survey.Electronics.Sensors {
+		if s.ColdJunction.V == sensor && b.needed(s.ID.V) {
+			return true
+		}
+	}
 	for _, c := range b.survey.Controls {
 		if translated(c) && c.Sensor.V == sensor {
 			return true

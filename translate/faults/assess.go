@@ -107,6 +107,9 @@ func (a *assessor) contact(l *translate.Switched, k *translate.Contact) {
 		before := a.withHardware(l, f.old(a, l, k), false)
 		a.add(function, c.ID.V, f.cause, before, now, with, how)
 	}
+	if k.Dial != nil {
+		a.dial(l, k, function)
+	}
 	a.output(l, k, function)
 	if k.Latches {
 		a.memory(l, k, function)

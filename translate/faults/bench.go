@@ -31,6 +31,11 @@ func newBench(spec *translate.Specification, run *logic.Run) *bench {
 			b.followers = append(b.followers, follower{b.at[s.Seen.Name], s.Out})
 		}
 	}
+	for _, k := range spec.Plan.Contacts {
+		if k.Dial != nil {
+			b.set(k.Dial.Raw.Name, k.Dial.Marked)
+		}
+	}
 	b.run.Start(nil)
 	return b
 }
@@ -43,7 +48,7 @@ func (b *bench) set(input string, value int64) {
 
 // warm puts a sensor at a temperature.
 func (b *bench) warm(sensor string, temp float64) bool {
-	count, err := b.spec.Chains[sensor].Count(temp)
+	count, err := b.spec.Count(sensor, temp)
 	if err != nil {
 		return false
 	}

@@ -93,7 +93,7 @@ func circuits(spec *translate.Specification, s *survey.Sensor) (open, short, amb
 			short = c
 		}
 	}
-	n, err := chain.Count(surroundings(spec.Survey))
+	n, err := spec.Count(s.ID.V, surroundings(spec.Survey))
 	ambient = count{n, err == nil}
 	switch s.Kind.V {
 	case "type_k", "type_j", "type_t":

@@ -156,7 +156,7 @@ func (r *Run) run() {
 		case cToward:
 			m[in.d] = m[in.a] + (m[in.b]-m[in.a])/m[in.c]
 		case cLookup:
-			m[in.d] = r.code.tables[in.c].at(m[in.a])
+			m[in.d] = r.code.tables[in.c].At(m[in.a])
 		case cTick:
 			if m[in.d] < m[in.a] {
 				m[in.d]++
@@ -202,8 +202,8 @@ func (r *Run) report(n int) {
 	r.Probe(n, r.m[d.slot] != 0, atoms, equal, close)
 }
 
-// at is the table's value at x.
-func (t *Table) at(x int64) int64 {
+// At is the table's value at x.
+func (t *Table) At(x int64) int64 {
 	last := len(t.X) - 1
 	if x <= t.X[0] {
 		return t.Y[0]

@@ -138,7 +138,12 @@ func (c *Chain) junctionError(b *tally) {
 		return
 	}
 	at25 := c.Curve.slope(25)
-	b.add("cold junction", s.ColdJunctionError.V*at25/b.slope, "%.3g K at the junction × %.3g µV/K there over %.3g µV/K here", s.ColdJunctionError.V, 1e6*at25, 1e6*b.slope)
+	kelvin, from := s.ColdJunctionError.V, ""
+	if c.JunctionError.Kelvin > 0 {
+		kelvin, from = c.JunctionError.Kelvin, " ("+c.JunctionError.Working+")"
+	}
+	b.add("cold junction", kelvin*at25/b.slope, "%.3g K at the junction%s × %.3g µV/K there over %.3g µV/K here", kelvin, from, 1e6*at25, 1e6*b.slope)
+	b.add(c.Counts.Name, c.Counts.Kelvin*b.width, "%.3g counts of %.3g K: %s", c.Counts.Kelvin, b.width, c.Counts.Working)
 }
 
 // dividerError is that of the divider's resistor: one wrong by a part p looks

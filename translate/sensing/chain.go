@@ -21,6 +21,11 @@ type Chain struct {
 	Curve  Curve
 	Box    survey.Enclosure // where resistors and reference drift
 
+	// A couple whose cold junction is measured: the error of that measurement in
+	// K, where it is better known than the sheet says, and an error in counts of
+	// the program's own table.
+	JunctionError, Counts Contribution
+
 	low, high float64 // believable temperatures, degC
 	rising    bool    // the count rises with temperature
 	front     frontEnd

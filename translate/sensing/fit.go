@@ -1,6 +1,7 @@
 package sensing
 
 import (
+	"errors"
 	"fmt"
 	"math"
 )
@@ -28,6 +29,23 @@ type Fitted struct {
 // of one step of the values, such as 0.01 K.
 func (c *Chain) Fit(bound, unit float64) (Fitted, error) {
 	low, high := c.Believable()
+	return c.fit(low, high, bound, unit)
+}
+
+// FitBetween makes the table as Fit does, over the believable counts between
+// two temperatures in degC only. Beyond them it stays at the value of its end,
+// so that it says no more than "at least" or "at most" there.
+func (c *Chain) FitBetween(from, to, bound, unit float64) (Fitted, error) {
+	low, high := c.Believable()
+	a, errA := c.Count(math.Max(from, c.low))
+	b, errB := c.Count(math.Min(to, c.high))
+	if err := errors.Join(errA, errB); err != nil {
+		return Fitted{}, err
+	}
+	return c.fit(max(low, min(a, b)), min(high, max(a, b)), bound, unit)
+}
+
+func (c *Chain) fit(low, high int64, bound, unit float64) (Fitted, error) {
 	if c.Signed() {
 		return Fitted{}, fmt.Errorf("a sensor with signed counts needs no table: it is linear")
 	}

@@ -1,6 +1,7 @@
 package sensing
 
 import (
+	"errors"
 	"fmt"
 	"math"
 
@@ -86,4 +87,23 @@ func (j *Junction) Moves(t, low, high float64) (float64, error) {
 	}
 	moved, err := j.Compensated.Curve.Inverse(e[0] - e[1] + e[2])
 	return moved - t, err
+}
+
+// Believable gives the lowest and highest raw count that can be believed with
+// a cold junction between two temperatures in degC: what the couple gives over
+// its believable range, short of the converter's ends.
+func (j *Junction) Believable(coldFrom, coldTo float64) (low, high int64, err error) {
+	c := j.Compensated
+	least, errA := j.Shift(coldFrom)
+	most, errB := j.Shift(coldTo)
+	if err := errors.Join(errA, errB); err != nil {
+		return 0, 0, err
+	}
+	bottom, top := c.rails()
+	low = max(bottom, int64(math.Floor(c.coordinate(c.low)-most)))
+	high = min(top, int64(math.Ceil(c.coordinate(c.high)-least)))
+	if low >= high {
+		return 0, 0, fmt.Errorf("with the cold junction at %.4g to %.4g degC the converter reads only %d to %d counts", coldFrom, coldTo, low, high)
+	}
+	return low, high, nil
 }

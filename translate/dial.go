@@ -1,0 +1,152 @@
+package translate
+
+import (
+	"fmt"
+	"math"
+
+	"makebreak/survey"
+	"makebreak/translate/logic"
+	"makebreak/translate/sensing"
+)
+
+// What a dial is built of, where the sheet cannot say.
+const (
+	dialDead  = 0.05 // share of the reference that a resistor at either end of the track keeps free; common practice
+	dialTrack = 0.2  // tolerance of the track; common practice
+	dialFault = 2.0  // s for which a wiper must be wrong, or right again; common practice
+)
+
+// Dial is a set-point dial that the user keeps, as a potentiometer.
+//
+// Between its stops the set point follows the wiper; beyond them it stays at
+// the stop, so that the stops are limits in the program too. A wiper, track or
+// wire that is broken reads inside the dead zones: it is a fault, and the
+// control then works at the set point of the sheet, which somebody has
+// reviewed, by the counts that it would have without a dial.
+type Dial struct {
+	Raw      *logic.Var // the input
+	SetPoint *logic.Var // in steps of the reading
+	Believed *logic.Var
+	Marked   int64 // count of the sheet's set point
+	Layout   sensing.Dial
+}
+
+// dialled reports whether a control's dial goes on: one of an operating
+// control. What limits is not left to whoever passes.
+func dialled(c *survey.Control) bool {
+	return c.Dial.Set && c.Switching() && c.Duty.V == survey.Operating && c.Reset.V == survey.ResetAutomatic && c.MakesAt.Set && c.BreaksAt.Set
+}
+
+// marked is the temperature of the dial's mark: the set point, or the break
+// where the sheet gives only the edges.
+func marked(c *survey.Control) survey.Field[float64] {
+	if c.SetPoint.Set {
+		return c.SetPoint
+	}
+	return c.BreaksAt
+}
+
+// dialEdges gives the lowest and the highest edge that the dial can ask for.
+func dialEdges(c *survey.Control) (low, high float64) {
+	at := marked(c).V
+	lower, upper := math.Min(c.MakesAt.V, c.BreaksAt.V), math.Max(c.MakesAt.V, c.BreaksAt.V)
+	return c.Dial.V[0] + lower - at, c.Dial.V[1] + upper - at
+}
+
+// dialFigures says how the dial is laid out, and that the sensor sees it all.
+func (b *builder) dialFigures(c *survey.Control, chain *sensing.Chain) {
+	if !dialled(c) {
+		return
+	}
+	low, high := dialEdges(c)
+	for _, t := range []float64{low, high} {
+		if _, err := chain.Threshold(t, sensing.AtOrAbove, sensing.Nearest); err != nil {
+			b.fail(c.Dial.Source, "a stop of the dial cannot be seen by "+c.Sensor.V, err.Error(), "stops inside its range, or another divider")
+			return
+		}
+	}
+	d, err := sensing.NewDial(c.Dial.V, b.survey.Electronics.ADC, dialDead, dialTrack)
+	if err != nil {
+		b.fail(c.Dial.Source, "the dial cannot be read", err.Error(), "other stops, or another converter")
+		return
+	}
+	fs, at := &b.spec.Figures, c.Dial.Path
+	fs.add(c.ID.V, "dial_low_counts", float64(d.Bottom), "counts", at, fmt.Sprintf("stop at %s; below %d counts: wiper, track or wire broken", Degrees(d.Low), d.FaultBelow))
+	fs.add(c.ID.V, "dial_high_counts", float64(d.Top), "counts", at, fmt.Sprintf("stop at %s; above %d counts: broken", Degrees(d.High), d.FaultAbove))
+	fs.add(c.ID.V, "dial_count_width", d.Width(), "K", at, "change of the set point with one count of the dial")
+	fs.add(c.ID.V, "dial_end_resistor", sensing.EndResistor(1, dialDead), "of the track", at,
+		fmt.Sprintf("at either end of the track, so that %g %% of the reference stay free; the track on the converter's own reference, taken as good to %g %% (common practice)", 100*dialDead, 100*dialTrack))
+}
+
+// dial builds the blocks of a control's dial, or gives nil where it has none.
+func (b *builder) dial(c *survey.Control, p *Probe) *Dial {
+	if !dialled(c) {
+		return nil
+	}
+	layout, err := sensing.NewDial(c.Dial.V, b.survey.Electronics.ADC, dialDead, dialTrack)
+	if err != nil {
+		return nil // has been said
+	}
+	id, r := c.ID.V, b.reading(p)
+	table, err := layout.Table(r.Unit)
+	if err != nil {
+		b.fail(c.Dial.Source, "the dial cannot be read", err.Error(), "other stops")
+		return nil
+	}
+	d := &Dial{Layout: layout}
+	d.Marked, _ = layout.Mark(marked(c).V)
+	from, what := c.Dial.Source, "dial of "+c.What.V
+	count := func(name string, v int64, means string) *logic.Const {
+		return b.constant(logic.Const{Name: id + "_dial_" + name, Value: v, Unit: "counts", Means: means, Origin: origin(from),
+			Working: fmt.Sprintf("a track of %g %% too much, and a third of the way to the rail", 100*dialTrack)})
+	}
+	low, high := count("lowest", layout.FaultBelow, "below: wiper, track or wire broken"), count("highest", layout.FaultAbove, "above: wiper, track or wire broken")
+	d.Raw = b.input(logic.Var{Name: b.name(id, "dial"), What: what + ", raw counts", Kind: logic.Int, Range: logic.Count})
+	bad := b.local(b.name(id, "dial_bad"), what+": this sample is no setting",
+		logic.Or(logic.Lt(logic.Use(d.Raw), logic.C(low)), logic.Gt(logic.Use(d.Raw), logic.C(high))))
+	fault := b.steps(id+"_dial_fault_after", dialFault, survey.Source{Assumed: "common practice"}, "no setting for")
+	lost := b.counter(b.name(id, "dial_lost_for"), "steps since the dial was last believed", fault, fault.Value)
+	t := &logic.Table{Name: b.name(id, "dial_marks"), What: "set point of " + what, Unit: fmt.Sprintf("%g K", r.Unit), Working: "linear between the stops " + c.Dial.Text}
+	span := logic.Range{Lo: int64(min(table.Y[0], table.Y[1])), Hi: int64(max(table.Y[0], table.Y[1]))}
+	for i := range table.X {
+		t.X, t.Y = append(t.X, int64(table.X[i])), append(t.Y, int64(table.Y[i]))
+	}
+	b.prog.Tables = append(b.prog.Tables, t)
+	d.SetPoint = b.state(logic.Var{Name: b.name(id, "set_point"), What: "set point by the dial, in steps of " + t.Unit, Kind: logic.Int, Range: span,
+		Start: min(max(r.in(marked(c).V), span.Lo), span.Hi)})
+	b.add(
+		&logic.Timer{Var: lost, Limit: fault, Restart: logic.Not(logic.Use(bad)), Why: "a setting ends the doubt"},
+		&logic.Set{Var: d.SetPoint, When: logic.Not(logic.Use(bad)), To: logic.Lookup(t, logic.Use(d.Raw)), Why: "the stops hold beyond them"},
+	)
+	d.Believed = b.local(b.name(id, "dial_believed"), what+": is believed", logic.Lt(logic.Use(lost), logic.C(fault)))
+	b.flag(id+"_dial", what+": wiper, track or wire broken; works at the set point of the sheet", logic.Not(logic.Use(d.Believed)))
+	return d
+}
+
+// reached is true where the reading is at or beyond an edge that lies offset K
+// from the dial's mark, or, with a dial that is not believed, beyond the edge
+// of the sheet.
+func (b *builder) reached(c *survey.Control, p *Probe, d *Dial, e *edge, name string, offset float64, rising bool) *logic.Expr {
+	if d == nil {
+		return e.reached(p)
+	}
+	r := b.reading(p)
+	at := logic.Use(d.SetPoint)
+	if n := r.in(math.Abs(offset)); n != 0 {
+		side, shift := "below", logic.Sub
+		if offset > 0 {
+			side, shift = "above", logic.Add
+		}
+		k := b.constant(logic.Const{Name: c.ID.V + "_" + name + "_" + side + "_mark", Value: n, Unit: fmt.Sprintf("%g K", r.Unit),
+			Means: Kelvins(math.Abs(offset)) + " " + side + " the dial's mark", Origin: origin(marked(c).Source), Working: "differential as on the sheet"})
+		at = shift(at, logic.C(k))
+	}
+	beyond := logic.Le(logic.Use(r.Value), at)
+	if rising {
+		beyond = logic.Ge(logic.Use(r.Value), at)
+	}
+	believed := logic.Use(d.Believed)
+	v := b.local(b.name(c.ID.V, name+"_reached"), "the temperature is at or beyond the "+name+", by the dial or, without it, by the sheet",
+		logic.Or(logic.And(believed, beyond), logic.And(logic.Not(believed), e.reached(p))))
+	return logic.Use(v)
+}
