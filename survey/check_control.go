@@ -37,6 +37,22 @@ func (c *Control) Switching() bool { return c.Action.V == BreaksOnRise || c.Acti
 // Modulating reports whether the part is a valve that moves with temperature.
 func (c *Control) Modulating() bool { return c.Action.V == ClosesOnRise || c.Action.V == OpensOnRise }
 
+// DialStays reports whether the user's dial goes on as a potentiometer: one of
+// an operating control that is replaced. What limits is not left to whoever
+// passes.
+func (c *Control) DialStays() bool {
+	return c.Dial.Set && c.Plan.V == Replace && c.Switching() && c.Duty.V == Operating && c.Reset.V == ResetAutomatic && c.MakesAt.Set && c.BreaksAt.Set
+}
+
+// DialMark is the temperature that the dial marks: the set point, or the break
+// where the sheet gives only the edges.
+func (c *Control) DialMark() Field[float64] {
+	if c.SetPoint.Set {
+		return c.SetPoint
+	}
+	return c.BreaksAt
+}
+
 func canonical(a Action) Action {
 	switch a {
 	case "makes_on_fall":

@@ -100,7 +100,7 @@ func (b *builder) contact(c *survey.Control, p *Probe) *Contact {
 	// Towards the side that the contact protects, any reading will do and a
 	// failed probe forces it; away from it, only a good probe counts.
 	k.Dial = b.dial(c, p)
-	at, rising := marked(c).V, c.Action.V == survey.BreaksOnRise
+	at, rising := c.DialMark().V, c.Action.V == survey.BreaksOnRise
 	toMade := b.reached(c, p, k.Dial, k.Make, "make", c.MakesAt.V-at, !rising)
 	toOpen := b.reached(c, p, k.Dial, k.Break, "break", c.BreaksAt.V-at, rising)
 	whyMade, whyOpen := "temperature has reached the make", "temperature has reached the break"

@@ -145,28 +145,6 @@ func (b *builder) result(about, name string, r switching.Result, from string) {
 	b.spec.Figures.open(about, name, r.Unit, from, r.Working)
 }
 
-// outputs works out what each output stage has to stand besides switching.
-func (b *builder) outputs() {
-	for _, l := range b.survey.Loads {
-		o := output(b.survey, l.ID.V)
-		if o == nil {
-			continue
-		}
-		multiple, source := 0.0, ""
-		if k, ok := b.spec.Catalogue.Load(string(l.Kind.V)); ok {
-			multiple, source = k.Inrush.Usual, k.Inrush.Source.String()
-		}
-		b.result(l.ID.V, "inrush", switching.Inrush(known(l.Inrush), known(l.Current), multiple, source), l.Inrush.Path)
-		if o.Kind.V == "ssr" || o.Kind.V == "triac" {
-			heat := switching.Heat(known(o.OnDrop), known(l.Current))
-			b.result(l.ID.V, "heat", heat, o.OnDrop.Path)
-			if box := b.survey.Equipment.Enclosure.Temperature; box.Set {
-				b.result(l.ID.V, "hottest", switching.Hottest(heat, known(o.ThermalRes), box.V[1]), o.ThermalRes.Path)
-			}
-		}
-	}
-}
-
 // known is a value, or zero where the sheet does not give it.
 func known(f survey.Field[float64]) float64 {
 	if !f.Set {

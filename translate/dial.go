@@ -31,31 +31,16 @@ type Dial struct {
 	Layout   sensing.Dial
 }
 
-// dialled reports whether a control's dial goes on: one of an operating
-// control. What limits is not left to whoever passes.
-func dialled(c *survey.Control) bool {
-	return c.Dial.Set && c.Switching() && c.Duty.V == survey.Operating && c.Reset.V == survey.ResetAutomatic && c.MakesAt.Set && c.BreaksAt.Set
-}
-
-// marked is the temperature of the dial's mark: the set point, or the break
-// where the sheet gives only the edges.
-func marked(c *survey.Control) survey.Field[float64] {
-	if c.SetPoint.Set {
-		return c.SetPoint
-	}
-	return c.BreaksAt
-}
-
 // dialEdges gives the lowest and the highest edge that the dial can ask for.
 func dialEdges(c *survey.Control) (low, high float64) {
-	at := marked(c).V
+	at := c.DialMark().V
 	lower, upper := math.Min(c.MakesAt.V, c.BreaksAt.V), math.Max(c.MakesAt.V, c.BreaksAt.V)
 	return c.Dial.V[0] + lower - at, c.Dial.V[1] + upper - at
 }
 
 // dialFigures says how the dial is laid out, and that the sensor sees it all.
 func (b *builder) dialFigures(c *survey.Control, chain *sensing.Chain) {
-	if !dialled(c) {
+	if !c.DialStays() {
 		return
 	}
 	low, high := dialEdges(c)
@@ -80,7 +65,7 @@ func (b *builder) dialFigures(c *survey.Control, chain *sensing.Chain) {
 
 // dial builds the blocks of a control's dial, or gives nil where it has none.
 func (b *builder) dial(c *survey.Control, p *Probe) *Dial {
-	if !dialled(c) {
+	if !c.DialStays() {
 		return nil
 	}
 	layout, err := sensing.NewDial(c.Dial.V, b.survey.Electronics.ADC, dialDead, dialTrack)
@@ -94,7 +79,7 @@ func (b *builder) dial(c *survey.Control, p *Probe) *Dial {
 		return nil
 	}
 	d := &Dial{Layout: layout}
-	d.Marked, _ = layout.Mark(marked(c).V)
+	d.Marked, _ = layout.Mark(c.DialMark().V)
 	from, what := c.Dial.Source, "dial of "+c.What.V
 	count := func(name string, v int64, means string) *logic.Const {
 		return b.constant(logic.Const{Name: id + "_dial_" + name, Value: v, Unit: "counts", Means: means, Origin: origin(from),
@@ -113,7 +98,7 @@ func (b *builder) dial(c *survey.Control, p *Probe) *Dial {
 	}
 	b.prog.Tables = append(b.prog.Tables, t)
 	d.SetPoint = b.state(logic.Var{Name: b.name(id, "set_point"), What: "set point by the dial, in steps of " + t.Unit, Kind: logic.Int, Range: span,
-		Start: min(max(r.in(marked(c).V), span.Lo), span.Hi)})
+		Start: min(max(r.in(c.DialMark().V), span.Lo), span.Hi)})
 	b.add(
 		&logic.Timer{Var: lost, Limit: fault, Restart: logic.Not(logic.Use(bad)), Why: "a setting ends the doubt"},
 		&logic.Set{Var: d.SetPoint, When: logic.Not(logic.Use(bad)), To: logic.Lookup(t, logic.Use(d.Raw)), Why: "the stops hold beyond them"},
@@ -138,7 +123,7 @@ func (b *builder) reached(c *survey.Control, p *Probe, d *Dial, e *edge, name st
 			side, shift = "above", logic.Add
 		}
 		k := b.constant(logic.Const{Name: c.ID.V + "_" + name + "_" + side + "_mark", Value: n, Unit: fmt.Sprintf("%g K", r.Unit),
-			Means: Kelvins(math.Abs(offset)) + " " + side + " the dial's mark", Origin: origin(marked(c).Source), Working: "differential as on the sheet"})
+			Means: Kelvins(math.Abs(offset)) + " " + side + " the dial's mark", Origin: origin(c.DialMark().Source), Working: "differential as on the sheet"})
 		at = shift(at, logic.C(k))
 	}
 	beyond := logic.Le(logic.Use(r.Value), at)

@@ -22,6 +22,7 @@ func (b *builder) figures() {
 	b.margins()
 	b.cycles()
 	b.outputs()
+	b.failures()
 }
 
 // asked lists what the sheet asks for, whether the part is replaced or stays.

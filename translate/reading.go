@@ -89,7 +89,7 @@ func (b *builder) spanOf(s *survey.Sensor) (need span, any bool) {
 // spanFor is the span of temperature that a control needs, where it needs one.
 func (b *builder) spanFor(c *survey.Control) (span, bool) {
 	switch {
-	case dialled(c):
+	case c.DialStays():
 		low, high := dialEdges(c)
 		return span{low - roomAround, high + roomAround}, true
 	}

@@ -29,6 +29,8 @@ type Specification struct {
 	Refused    []Refusal
 	// Conversions are the tables of the sensors of which a temperature is needed.
 	Conversions []*Conversion
+	// Stages are the output stages and what was asked of each.
+	Stages []Stage
 	// Junctions are the thermocouples whose cold junction is measured, by sensor.
 	Junctions map[string]*Junction
 }

@@ -52,6 +52,15 @@ func (w *work) printSpecification(out io.Writer, as string) error {
 			return err
 		}
 	}
+	if err := w.printFailures(out, as); err != nil {
+		return err
+	}
+	if err := w.printStages(out, as); err != nil {
+		return err
+	}
+	if err := w.printConversions(out, as); err != nil {
+		return err
+	}
 	if w.spec.Program == nil {
 		return nil
 	}
@@ -73,4 +82,45 @@ func figureRows(fs translate.Figures) [][]string {
 		rows = append(rows, []string{f.About, f.Name, value, f.From, f.Working})
 	}
 	return rows
+}
+
+// printFailures prints what the converter reads when each sensor's circuit breaks.
+func (w *work) printFailures(out io.Writer, as string) error {
+	var rows [][]string
+	for _, f := range w.spec.SensorFailures() {
+		rows = append(rows, []string{f.Sensor, f.What, f.CountText(), f.Seen(), f.Working})
+	}
+	if len(rows) == 0 {
+		return nil
+	}
+	fmt.Fprintln(out, "\nBroken circuits: what the converter then reads")
+	return printTable(out, as, []string{"sensor", "failure", "count", "seen by the program", "working"}, rows)
+}
+
+// printStages prints what was asked of each output stage.
+func (w *work) printStages(out io.Writer, as string) error {
+	var rows [][]string
+	for _, s := range w.spec.Stages {
+		for _, c := range s.Checks {
+			rows = append(rows, []string{s.Load, s.Kind, c.Name, translate.Verdict(c), c.Working})
+		}
+	}
+	if len(rows) == 0 {
+		return nil
+	}
+	fmt.Fprintln(out, "\nOutput stages")
+	return printTable(out, as, []string{"load", "output", "question", "answer", "working"}, rows)
+}
+
+// printConversions prints the tables that turn counts into temperatures.
+func (w *work) printConversions(out io.Writer, as string) error {
+	var rows [][]string
+	for _, c := range w.spec.Conversions {
+		rows = append(rows, []string{c.Sensor, translate.Degrees(c.From) + " to " + translate.Degrees(c.To), fmt.Sprint(c.Pieces), fmt.Sprint(c.Bytes), fmt.Sprintf("%.3g K", c.Worst), c.Working})
+	}
+	if len(rows) == 0 {
+		return nil
+	}
+	fmt.Fprintln(out, "\nConversion tables")
+	return printTable(out, as, []string{"sensor", "span", "pieces", "bytes", "worst error", "working"}, rows)
 }

@@ -21,6 +21,9 @@ func Specification(spec *translate.Specification, a *risk.Assessment, functions 
 		Functions: keyed(FunctionColumns, FunctionRows(functions)),
 		Program:   program(spec),
 		Budgets:   budgets(spec),
+		Failures:  failures(spec),
+		Stages:    stages(spec),
+		Tables:    tables(spec),
 	})
 }
 
@@ -32,6 +35,9 @@ type specification struct {
 	Functions []map[string]string `json:"functions"`
 	Program   *programJSON        `json:"program"` // null where none could be made
 	Budgets   []budgetJSON        `json:"error_budgets"`
+	Failures  []failureJSON       `json:"sensor_failures"`
+	Stages    []stageJSON         `json:"output_stages"`
+	Tables    []tableJSON         `json:"conversion_tables"`
 }
 
 // figures leaves out no figure: what is no number becomes null, with the
@@ -203,6 +209,68 @@ func keyed(columns []string, rows [][]string) []map[string]string {
 			m[c] = r[i]
 		}
 		out = append(out, m)
+	}
+	return out
+}
+
+type failureJSON struct {
+	Sensor  string `json:"sensor"`
+	What    string `json:"failure"`
+	Count   *int64 `json:"count"` // null where it cannot be said
+	Inside  bool   `json:"may_read_as_a_temperature"`
+	Working string `json:"working"`
+}
+
+func failures(spec *translate.Specification) []failureJSON {
+	out := []failureJSON{}
+	for _, f := range spec.SensorFailures() {
+		j := failureJSON{Sensor: f.Sensor, What: f.What, Inside: f.Inside, Working: f.Working}
+		if f.Known {
+			j.Count = &f.Count
+		}
+		out = append(out, j)
+	}
+	return out
+}
+
+type stageJSON struct {
+	Load    string `json:"load"`
+	Output  string `json:"output"`
+	Check   string `json:"question"`
+	Holds   *bool  `json:"holds"` // null where it is not determined
+	Working string `json:"working"`
+}
+
+func stages(spec *translate.Specification) []stageJSON {
+	out := []stageJSON{}
+	for _, s := range spec.Stages {
+		for _, c := range s.Checks {
+			j := stageJSON{Load: s.Load, Output: s.Kind, Check: c.Name, Working: c.Working}
+			if c.Determined {
+				j.Holds = &c.Holds
+			}
+			out = append(out, j)
+		}
+	}
+	return out
+}
+
+type tableJSON struct {
+	Sensor  string  `json:"sensor"`
+	From    float64 `json:"from_degc"`
+	To      float64 `json:"to_degc"`
+	Unit    float64 `json:"unit_k"`
+	Bound   float64 `json:"bound_k"`
+	Worst   float64 `json:"worst_k"`
+	Pieces  int     `json:"pieces"`
+	Bytes   int     `json:"bytes"`
+	Working string  `json:"working"`
+}
+
+func tables(spec *translate.Specification) []tableJSON {
+	out := []tableJSON{}
+	for _, c := range spec.Conversions {
+		out = append(out, tableJSON{c.Sensor, c.From, c.To, c.Unit, c.Bound, c.Worst, c.Pieces, c.Bytes, c.Working})
 	}
 	return out
 }

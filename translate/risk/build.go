@@ -213,6 +213,7 @@ func (b *builder) findStat(g *Guard, l *survey.Load, guard *survey.Control) {
 		c := controlOf(b.s, id)
 		if g.Stat == unknown && c.Duty.V == survey.Operating && c.Action.V == guard.Action.V {
 			g.Stat = id
+			g.StatDial = dialReach(c, guard)
 			if tolerance, _, ok := b.judge.tolerance(c); ok {
 				g.StatTol = tolerance
 			}
@@ -238,4 +239,16 @@ func (b *builder) answers() {
 			path: fmt.Sprintf("answers[%d]", i),
 		})
 	}
+}
+
+// dialReach is how far the user can turn a control's dial from the set point of
+// the sheet towards a guard, K.
+func dialReach(c, guard *survey.Control) float64 {
+	if !c.DialStays() {
+		return 0
+	}
+	if guard.Action.V == survey.BreaksOnRise {
+		return c.Dial.V[1] - c.DialMark().V
+	}
+	return c.DialMark().V - c.Dial.V[0]
 }

@@ -159,6 +159,7 @@ func (b *builder) control(v *Control, c *survey.Control) {
 	v.Hardware = hardware(c.Plan.V)
 	v.ProtectivePart = protectivePart(c)
 	v.Switching = c.Action.V == survey.BreaksOnRise || c.Action.V == survey.MakesOnRise
+	v.DialStays = c.DialStays()
 	v.SelfActing = selfActing(c)
 	v.ActsOn = b.actsOn(c)
 	b.controlDangers(v, c)

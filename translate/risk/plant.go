@@ -132,6 +132,7 @@ func (b *builder) sensors() {
 func (b *builder) sensorDangers(s *Sensor, load string) {
 	for _, p := range b.view.Paths {
 		if p.Load.ID == load {
+			s.Serious = s.Serious || p.Danger.Harm == "serious"
 			s.GuardsAbove = s.GuardsAbove || !math.IsNaN(p.Danger.Above)
 			s.GuardsBelow = s.GuardsBelow || !math.IsNaN(p.Danger.Below)
 		}

@@ -228,6 +228,7 @@ type Control struct {
 	Refused         string   `expr:"refused"`           // title of a control that is refused by name, or ""
 	RefusedWhy      string   `expr:"refused_why"`
 	NotTranslated   string   `expr:"not_translated"` // why the translator made nothing of it, or ""
+	DialStays       bool     `expr:"dial_stays"`     // its dial goes on as a potentiometer
 	ProofDue        string   `expr:"proof_due"`      // YYYY-MM-DD, or unknown
 	ProofOverdue    bool     `expr:"proof_overdue"`  // due before the newest date in the sheet
 	SensorWhat      string   `expr:"sensor_what"`
@@ -317,6 +318,7 @@ type Sensor struct {
 	Mains       bool     `expr:"mains"`        // the board switches mains (50 V or more)
 	GuardsAbove bool     `expr:"guards_above"` // a danger above lies on the way of a load it works on
 	GuardsBelow bool     `expr:"guards_below"` // a danger below does
+	Serious     bool     `expr:"serious"`      // a load it works on can reach a danger of serious harm
 	Cools       bool     `expr:"cools"`        // it works on a cooling load
 }
 
@@ -398,6 +400,7 @@ type Guard struct {
 	Beyond      bool     `expr:"beyond"`       // worst is not on the safe side of the danger
 	Stat        string   `expr:"stat"`         // the control that works every cycle on the same load, or unknown
 	StatTol     float64  `expr:"stat_tolerance"`
+	StatDial    float64  `expr:"stat_dial"` // K by which its dial can be turned towards the guard
 }
 
 // Place is a probe or a load and where it stands.
