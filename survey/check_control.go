@@ -45,13 +45,24 @@ func (c *Control) DialStays() bool {
 }
 
 // DialMark is the temperature that the dial marks: the set point, or the break
-// where the sheet gives only the edges.
+// where the sheet gives only the edges; of a modulating valve, the middle of
+// its band.
 func (c *Control) DialMark() Field[float64] {
-	if c.SetPoint.Set {
+	switch {
+	case c.SetPoint.Set:
 		return c.SetPoint
+	case c.Modulating() && c.StartsAt.Set && c.FullAt.Set:
+		middle := c.StartsAt
+		middle.V = (c.StartsAt.V + c.FullAt.V) / 2
+		middle.Text = "middle of " + c.StartsAt.Text + " and " + c.FullAt.Text
+		return middle
 	}
 	return c.BreaksAt
 }
+
+// Cools reports whether the part lets more through, or switches on, as it
+// warms: a cooling control, or a fan control.
+func (c *Control) Cools() bool { return c.Action.V == MakesOnRise || c.Action.V == OpensOnRise }
 
 func canonical(a Action) Action {
 	switch a {

@@ -35,11 +35,14 @@ func newBuilder(spec *Specification) *builder {
 			StepMS: int64(math.Round(s.Electronics.CalledEvery.V * 1000)),
 		},
 		plan: &Plan{
-			Sensors:  map[string]*Probe{},
-			Contacts: map[string]*Contact{},
-			Loads:    map[string]*Switched{},
-			Signals:  map[string]*logic.Var{},
-			Timers:   map[string]*logic.Var{},
+			Sensors:     map[string]*Probe{},
+			Contacts:    map[string]*Contact{},
+			Regulators:  map[string]*Regulator{},
+			Valves:      map[string]*Valve{},
+			Indications: map[string]*Indication{},
+			Loads:       map[string]*Switched{},
+			Signals:     map[string]*logic.Var{},
+			Timers:      map[string]*logic.Var{},
 		},
 	}
 	// Parameters of the C functions, and names that the sheet fixes.

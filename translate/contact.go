@@ -24,6 +24,8 @@ type Contact struct {
 	Make    *edge
 	Break   *edge
 	Dial    *Dial // nil without one
+	// PID is set where the contact is that of a time-proportioned control.
+	PID *Regulator
 }
 
 // edge is a threshold of a contact, in counts.

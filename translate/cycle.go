@@ -41,6 +41,10 @@ func (b *builder) cycle(c *survey.Control) {
 		}
 		b.cycleFigures(c, "old_", loop, from)
 	}
+	if tuning, continuous := b.settingsOf(c.ID.V); continuous && wantsPID(c) {
+		b.held(c, l, tuning)
+		return
+	}
 	t, ok := b.spec.Thresholds[c.ID.V]
 	if !ok {
 		return
@@ -53,7 +57,7 @@ func (b *builder) cycle(c *survey.Control) {
 		b.openContact(l, "not determined: "+err.Error())
 		return
 	}
-	b.contactLife(c, l, figures.Cycle)
+	b.contactLife(c, l, figures.Cycle.Period(), "process")
 }
 
 // driven is the load of the process that a control runs.
@@ -117,10 +121,10 @@ func (b *builder) openContact(l *survey.Load, reason string) {
 }
 
 // contactLife works out how long the new output's contact lives on a cycle.
-func (b *builder) contactLife(c *survey.Control, l *survey.Load, cycle thermal.Cycle) {
+func (b *builder) contactLife(c *survey.Control, l *survey.Load, period float64, from string) {
 	note := func(name string, r switching.Result, from string) { b.result(l.ID.V, name, r, from) }
-	year := switching.OperationsPerYear(cycle.Period(), 1)
-	note("operations_per_year", year, "process")
+	year := switching.OperationsPerYear(period, 1)
+	note("operations_per_year", year, from)
 	o := output(b.survey, l.ID.V)
 	if o == nil || o.Kind.V != "relay" {
 		return // nothing wears in a semiconductor by switching

@@ -13,14 +13,16 @@ import (
 func (b *builder) figures() {
 	for _, c := range b.survey.Controls {
 		b.asked(c)
-		if chain := b.spec.Chains[c.Sensor.V]; chain != nil && translated(c) {
+		if chain := b.spec.Chains[c.Sensor.V]; chain != nil && b.translated(c) && c.Switching() {
 			b.switching(c, chain)
 		}
+		b.valveFigures(c)
 		b.overshoot(c)
 	}
-	b.conversions()
 	b.margins()
+	b.tunings()
 	b.cycles()
+	b.conversions()
 	b.outputs()
 	b.failures()
 }

@@ -215,6 +215,9 @@ func (b *builder) probesOf(names []string) []*Probe {
 		if k := b.plan.Contacts[n]; k != nil {
 			seen[k.Probe.Sensor.ID.V] = true
 		}
+		if g := b.plan.Regulators[n]; g != nil {
+			seen[g.Probe.Sensor.ID.V] = true
+		}
 		if b.plan.Sensors[n] != nil {
 			seen[n] = true
 		}

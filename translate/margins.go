@@ -108,7 +108,7 @@ func (b *builder) margins() {
 			continue
 		}
 		for _, c := range b.survey.Controls {
-			if translated(c) && c.Duty.V == survey.Operating && b.spec.Chains[c.Sensor.V] != nil {
+			if b.translated(c) && c.Switching() && c.Duty.V == survey.Operating && b.spec.Chains[c.Sensor.V] != nil {
 				b.margin(x, limit, c)
 				break
 			}

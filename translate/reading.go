@@ -73,7 +73,7 @@ func (b *builder) conversions() {
 // spanOf is what all the parts that need a sensor's temperature ask for.
 func (b *builder) spanOf(s *survey.Sensor) (need span, any bool) {
 	for _, c := range b.survey.Controls {
-		if c.Sensor.V != s.ID.V || !translated(c) {
+		if c.Sensor.V != s.ID.V || !b.translated(c) {
 			continue
 		}
 		if n, ok := b.spanFor(c); ok {
@@ -88,7 +88,16 @@ func (b *builder) spanOf(s *survey.Sensor) (need span, any bool) {
 
 // spanFor is the span of temperature that a control needs, where it needs one.
 func (b *builder) spanFor(c *survey.Control) (span, bool) {
+	t, continuous := b.settingsOf(c.ID.V)
 	switch {
+	case c.Action.V == survey.Indicates:
+		low, high := b.spec.Chains[c.Sensor.V].Valid()
+		return span{low, high}, true
+	case wantsPID(c) && continuous:
+		return pidSpan(c, t), true
+	case c.Modulating():
+		low, high := band(c)
+		return span{low - roomAround, high + roomAround}, true
 	case c.DialStays():
 		low, high := dialEdges(c)
 		return span{low - roomAround, high + roomAround}, true

@@ -24,7 +24,8 @@ import (
 //	set NAME VALUE     an input: a temperature, open, short, true, false, or a count
 //	mix NAME V1 V2 …   from now on the input takes these values in turn
 //	run TIME           let the program run
-//	expect NAME VALUE  an output: on, off; fault: none, or a bit's name
+//	expect NAME VALUE  an output: on, off, a number, or a span of numbers such as
+//	                   445..455; fault: none, or a bit's name
 //	never NAME VALUE TIME   run for this long; the output must never be that
 //	until NAME VALUE MIN MAX  run until the output is that: not before MIN, not after MAX
 func TestScenarios(t *testing.T) {
@@ -126,7 +127,7 @@ func (b *bench) do(f []string) {
 		}
 	case "expect":
 		if !b.is(f[1], f[2]) {
-			b.fail("it is not")
+			b.fail("it is not%s", b.now(f[1]))
 		}
 	case "never":
 		for i := range b.ticks(f[3:]) {
@@ -244,12 +245,26 @@ func (b *bench) is(name, word string) bool {
 	}
 	for _, v := range b.spec.Program.Outputs {
 		if v.Name == name {
-			on := b.run.Get(v) != 0
+			now := b.run.Get(v)
+			if low, high, ok := numbers(word); ok {
+				return low <= now && now <= high
+			}
+			on := now != 0
 			return on == (word == "on" || word == "open")
 		}
 	}
 	b.fail("no output %s", name)
 	return false
+}
+
+// now tells what an output is, where it is a number.
+func (b *bench) now(name string) string {
+	for _, v := range b.spec.Program.Outputs {
+		if v.Name == name && v.Kind == logic.Int {
+			return fmt.Sprintf(", but %d", b.run.Get(v))
+		}
+	}
+	return ""
 }
 
 func (b *bench) fault(word string) bool {
@@ -264,4 +279,15 @@ func (b *bench) fault(word string) bool {
 	}
 	b.fail("no fault %s", word)
 	return false
+}
+
+// numbers reads a number or a span of numbers.
+func numbers(word string) (low, high int64, ok bool) {
+	from, to, span := strings.Cut(word, "..")
+	if !span {
+		to = from
+	}
+	low, errLow := strconv.ParseInt(from, 10, 64)
+	high, errHigh := strconv.ParseInt(to, 10, 64)
+	return low, high, errLow == nil && errHigh == nil
 }

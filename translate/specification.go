@@ -29,6 +29,8 @@ type Specification struct {
 	Refused    []Refusal
 	// Conversions are the tables of the sensors of which a temperature is needed.
 	Conversions []*Conversion
+	// Tunings are the rules for a continuous control, by control.
+	Tunings []Tuning
 	// Stages are the output stages and what was asked of each.
 	Stages []Stage
 	// Junctions are the thermocouples whose cold junction is measured, by sensor.
@@ -51,13 +53,16 @@ type Refusal struct {
 // Plan says which variable of the program stands for which part of the sheet,
 // for those who put faults into it or print it.
 type Plan struct {
-	Sensors  map[string]*Probe    // by sensor
-	Contacts map[string]*Contact  // by control
-	Loads    map[string]*Switched // by load
-	Signals  map[string]*logic.Var
-	Timers   map[string]*logic.Var
-	Fault    *logic.Var
-	Bits     []logic.Flag
+	Sensors     map[string]*Probe      // by sensor
+	Contacts    map[string]*Contact    // by control
+	Regulators  map[string]*Regulator  // by control: what gives an output between none and all
+	Valves      map[string]*Valve      // by load: what takes one
+	Loads       map[string]*Switched   // by load
+	Indications map[string]*Indication // by control
+	Signals     map[string]*logic.Var
+	Timers      map[string]*logic.Var
+	Fault       *logic.Var
+	Bits        []logic.Flag
 }
 
 // Figure is one derived value with its history.

@@ -33,7 +33,7 @@ func (b *builder) stage(l *survey.Load, o *survey.Output, inrush switching.Resul
 
 	var refused, doubtful, unsettled []string
 	for _, c := range st.Checks {
-		text := c.Name + ": " + c.Working
+		text := c.Name + ": " + strings.TrimPrefix(c.Working, "not determined: ")
 		switch {
 		case !c.Determined:
 			unsettled = append(unsettled, text)
@@ -116,7 +116,6 @@ func (b *builder) outputs() {
 		}
 	}
 }
-
 
 // Verdict is the answer to a question about a stage, in a word.
 func Verdict(c switching.Check) string {

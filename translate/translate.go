@@ -50,16 +50,23 @@ func (b *builder) chains() {
 }
 
 // translated reports whether a control becomes part of the program.
-func translated(c *survey.Control) bool {
-	switching := c.Action.V == survey.BreaksOnRise || c.Action.V == survey.MakesOnRise
-	return switching && c.Plan.V == survey.Replace && c.BreaksAt.Set && c.MakesAt.Set
+func (b *builder) translated(c *survey.Control) bool {
+	switch {
+	case c.Plan.V != survey.Replace:
+		return false
+	case c.Switching():
+		return c.BreaksAt.Set && c.MakesAt.Set
+	case c.Modulating():
+		return b.modulates(c)
+	}
+	return c.Action.V == survey.Indicates && c.Sensor.Set
 }
 
 // refuse names every part that is to be replaced or watched by the program and
 // is not.
 func (b *builder) refuse() {
 	for _, c := range b.survey.Controls {
-		if c.Plan.V != survey.Replace && c.Plan.V != survey.Monitor || translated(c) {
+		if c.Plan.V != survey.Replace && c.Plan.V != survey.Monitor || b.translated(c) {
 			continue
 		}
 		b.spec.Refused = append(b.spec.Refused, Refusal{About: c.ID.V, Why: whyNot(c), Source: c.Plan.Source})
@@ -72,13 +79,13 @@ func whyNot(c *survey.Control) string {
 	}
 	switch c.Action.V {
 	case survey.ClosesOnRise, survey.OpensOnRise:
-		return "a modulating valve is not translated"
+		return "no load follows it, or neither its band nor a set point with want: pid is known"
 	case survey.Pulses:
 		return "a pulsing device is not translated"
 	case survey.HoldsWhileHot:
 		return "flame supervision is never moved into the program"
 	case survey.Indicates:
-		return "an indication is not translated"
+		return "no sensor takes over from it"
 	}
 	return "its make and break temperatures are not known"
 }
@@ -94,34 +101,33 @@ func (b *builder) program() {
 	}
 	b.probes()
 	for _, c := range b.survey.Controls {
-		if !translated(c) {
-			continue
+		if b.translated(c) {
+			b.control(c, w)
 		}
-		p := b.plan.Sensors[c.Sensor.V]
-		var k *Contact
-		if c.Reset.V == survey.ResetAutomatic {
-			k = b.contact(c, p)
-		} else {
-			k = b.latch(c, p)
-			b.flag(c.ID.V+"_tripped", c.What.V+": has tripped", k.Tripped)
-		}
-		b.plan.Contacts[c.ID.V] = k
-		made := b.local(b.name(c.ID.V, "contact"), c.What.V+": its contact is made", k.Made)
-		w.known[c.ID.V] = logic.Use(made)
 	}
 	for _, id := range b.order() {
 		if t := timer(b.survey, id); t != nil {
 			w.known[id] = b.clock(t, w)
 			continue
 		}
-		s := b.switched(load(b.survey, id), w)
+		l := load(b.survey, id)
+		if g := b.follows(l); g != nil {
+			v := b.positioned(l, g, w)
+			b.plan.Valves[id] = v
+			w.known[id] = logic.Use(b.local(b.name(id, "open"), l.What.V+": is not shut", logic.Gt(logic.Use(v.Out), logic.Lit(0))))
+			continue
+		}
+		if l.Follows.Set {
+			continue // what it follows is no part of the program
+		}
+		s := b.switched(l, w)
 		b.plan.Loads[id] = s
 		w.known[id] = logic.Use(s.Out)
 	}
 	b.settle()
 	b.faultWord()
 	b.must(w)
-	if b.diags.HasErrors() || len(b.plan.Loads) == 0 {
+	if b.diags.HasErrors() || len(b.plan.Loads)+len(b.plan.Valves)+len(b.plan.Indications) == 0 {
 		return
 	}
 	b.prune()
@@ -132,6 +138,51 @@ func (b *builder) program() {
 	}
 	b.spec.Program, b.spec.Plan = checked, b.plan
 	b.comesUp()
+}
+
+// control builds one replaced part: what makes and breaks, what moves, what
+// shows.
+func (b *builder) control(c *survey.Control, w *wiring) {
+	p, id := b.plan.Sensors[c.Sensor.V], c.ID.V
+	var k *Contact
+	switch {
+	case c.Action.V == survey.Indicates:
+		b.plan.Indications[id] = b.indication(c, p)
+		return
+	case wantsPID(c) && b.continuous(c):
+		t, _ := b.settingsOf(id)
+		g := b.pid(c, p, t)
+		if g == nil {
+			return // has been said
+		}
+		b.plan.Regulators[id] = g
+		if g.Window == nil {
+			return
+		}
+		k = &Contact{Control: c, Probe: p, Acts: acts(b.survey, id), Made: g.Made, Dial: g.Dial, PID: g}
+	case c.Modulating() && !(c.StartsAt.Set && c.FullAt.Set):
+		f, _ := b.spec.Figures.Get(id, "gain")
+		b.fail(c.Want.Source, "a PID control of "+id+" cannot be worked out", describe(f.Working, "its process is not known"), "the figures of the process; or starts_at and full_at, for the like of the old valve")
+		return
+	case c.Modulating():
+		b.plan.Regulators[id] = b.proportional(c, p)
+		return
+	case c.Reset.V == survey.ResetAutomatic:
+		k = b.contact(c, p)
+	default:
+		k = b.latch(c, p)
+		b.flag(id+"_tripped", c.What.V+": has tripped", k.Tripped)
+	}
+	b.plan.Contacts[id] = k
+	made := b.local(b.name(id, "contact"), c.What.V+": its contact is made", k.Made)
+	w.known[id] = logic.Use(made)
+}
+
+// continuous reports whether there are settings for a control that wants to be
+// continuous.
+func (b *builder) continuous(c *survey.Control) bool {
+	_, ok := b.settingsOf(c.ID.V)
+	return ok
 }
 
 // prune takes out what was worked out for a step and is read by nothing, such
@@ -191,7 +242,7 @@ func (b *builder) needed(sensor string) bool {
 		}
 	}
 	for _, c := range b.survey.Controls {
-		if translated(c) && c.Sensor.V == sensor {
+		if b.translated(c) && c.Sensor.V == sensor {
 			return true
 		}
 	}
@@ -240,7 +291,7 @@ func (b *builder) order() []string {
 		for _, n := range on {
 			visit(n)
 		}
-		if l := load(b.survey, id); l == nil || l.RunsWhen.V.Tree != nil {
+		if l := load(b.survey, id); l == nil || l.RunsWhen.V.Tree != nil || l.Follows.Set {
 			done = append(done, id)
 		}
 	}
@@ -275,6 +326,13 @@ func (b *builder) must(w *wiring) {
 		})
 	}
 	for _, l := range b.survey.Loads {
+		if v := b.plan.Valves[l.ID.V]; v != nil && len(v.Probes) > 0 {
+			b.prog.Never = append(b.prog.Never, &logic.Property{
+				Name: l.ID.V + "_safe_on_fault",
+				Why:  "a probe that is not believed puts " + l.ID.V + " into its safe position in the same step",
+				Bad:  logic.And(logic.Or(each(v.Probes, (*Probe).failed)...), logic.Ne(logic.Use(v.Out), logic.Lit(v.Safe))),
+			})
+		}
 		s := b.plan.Loads[l.ID.V]
 		if s == nil || len(s.Probes) == 0 {
 			continue

@@ -82,6 +82,10 @@ func (w *wiring) sided(id string, at survey.Source, positive bool) *logic.Expr {
 	if c == nil {
 		return logic.False() // said already, where it was refused
 	}
+	if b := w.b; b.plan.Regulators[id] != nil {
+		b.fail(at, id+" gives a position and no contact", id, "a load that follows it, or want: two_position")
+		return logic.False()
+	}
 	if c.ReadBy.V != "" {
 		return logic.Not(w.name(c.ReadBy.V, c.ReadBy.Source))
 	}

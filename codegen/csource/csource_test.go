@@ -1,12 +1,14 @@
 package csource_test
 
 import (
+	"errors"
 	"flag"
 	"fmt"
 	"os"
 	"os/exec"
 	"path/filepath"
 	"strings"
+	"syscall"
 	"testing"
 
 	"github.com/google/go-cmp/cmp"
@@ -68,10 +70,17 @@ func command(t *testing.T, dir, name string, args ...string) string {
 }
 
 func try(dir, name string, args ...string) (string, error) {
-	cmd := exec.Command(name, args...)
-	cmd.Dir = dir
-	out, err := cmd.CombinedOutput()
-	return string(out), err
+	run := func(name string, args ...string) (string, error) {
+		cmd := exec.Command(name, args...)
+		cmd.Dir = dir
+		out, err := cmd.CombinedOutput()
+		return string(out), err
+	}
+	out, err := run(name, args...)
+	if errors.Is(err, syscall.ENOEXEC) { // a kernel without 32-bit programs
+		return run("qemu-i386", append([]string{name}, args...)...)
+	}
+	return out, err
 }
 
 func clip(s string, n int) string {

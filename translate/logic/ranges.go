@@ -220,3 +220,14 @@ func clamp(x, lo, hi int64) int64 {
 	}
 	return x
 }
+
+// Span is what an expression can be, by the declared ranges of its variables,
+// for those who build programs and have to declare the range of what they
+// write. What would not fit 32 bits is reported by Check, later.
+func Span(e *Expr) Range {
+	k := &checker{
+		Checked: &Checked{Program: &Program{}, Ranges: map[*Expr]Range{}, Writer: map[*Var]int{}},
+		role:    map[*Var]role{},
+	}
+	return k.rangeOf(e)
+}

@@ -25,6 +25,7 @@ type ruleCase struct {
 	given       figures // worked out on the sheet that fires
 	givenQuiet  figures // worked out on its neighbour
 	quietBase   string  // the neighbour's sheet where it is another one
+	refused     string  // why the translator made nothing of it, on the sheet that fires
 }
 
 func sheetWith(t *testing.T, base string, changes change) *survey.Survey {
@@ -49,7 +50,12 @@ func sheetWith(t *testing.T, base string, changes change) *survey.Survey {
 
 func assessed(t *testing.T, s *survey.Survey, given figures) *Assessment {
 	t.Helper()
-	computed := Computed{Figures: map[Key]Figure{}}
+	return assessedWith(t, s, given, nil)
+}
+
+func assessedWith(t *testing.T, s *survey.Survey, given figures, refused map[string]string) *Assessment {
+	t.Helper()
+	computed := Computed{Figures: map[Key]Figure{}, NotTranslated: refused}
 	for key, value := range given {
 		computed.Figures[key] = Figure{Value: &value, Reason: "as given"}
 	}
@@ -79,7 +85,11 @@ func findingOf(a *Assessment, id, about string) *Finding {
 func runCases(t *testing.T, cases []ruleCase) {
 	for _, c := range cases {
 		t.Run(c.rule+"_"+string(c.grade), func(t *testing.T) {
-			f := findingOf(assessed(t, sheetWith(t, c.base, c.fire), c.given), c.rule, c.about)
+			refused := map[string]string{}
+			if c.refused != "" {
+				refused[c.about] = c.refused
+			}
+			f := findingOf(assessedWith(t, sheetWith(t, c.base, c.fire), c.given, refused), c.rule, c.about)
 			if f == nil {
 				t.Fatalf("not raised about %s", c.about)
 			}

@@ -23,7 +23,8 @@
  * Open findings: 2 proving_switch_not_checked_open (act, flow_proven); 3 earth_fault_bypasses_limit
  * (act, cal2); 4 insulation_of_new_probe (act, tank_probe); 5 contact_life (act, heater); 6
  * scald_and_storage (act, tank_stat); 7 model_beyond_evidence (act, cal2); 8
- * mercury_asbestos_refrigerant (act, tank_stat); 9 approval_lapses (act, cal2).
+ * mercury_asbestos_refrigerant (act, tank_stat); 9 approval_lapses (act, cal2). Not judged, for
+ * want of a figure: 1; risks.md says which.
  */
 #ifndef CAL2_PORT_H
 #define CAL2_PORT_H

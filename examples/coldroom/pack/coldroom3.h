@@ -27,7 +27,7 @@
  * moisture_direction (act, room_probe); 8 damp_dust_washdown (act, coldroom3); 9
  * mercury_asbestos_refrigerant (act, room_stat); 10 mercury_asbestos_refrigerant (act, warm_stat);
  * 11 approval_lapses (act, coldroom3); 12 limit_trips_late (act, defrost_limit/spoilage). Not
- * judged, for want of a figure: 2; risks.md says which.
+ * judged, for want of a figure: 3; risks.md says which.
  */
 #ifndef COLDROOM3_H
 #define COLDROOM3_H

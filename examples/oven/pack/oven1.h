@@ -23,7 +23,8 @@
  * Open findings: 1 kept_limit_fails_as_cold (act, chamber_limit); 2 proving_switch_not_checked_open
  * (act, door_shut); 3 earth_fault_bypasses_limit (act, oven1); 4 thermocouple_reversed_or_shorted
  * (act, chamber_probe); 5 damp_dust_washdown (act, oven1); 6 contact_life (act, elements); 7
- * mercury_asbestos_refrigerant (act, chamber_stat); 8 approval_lapses (act, oven1).
+ * mercury_asbestos_refrigerant (act, chamber_stat); 8 approval_lapses (act, oven1). Not judged, for
+ * want of a figure: 1; risks.md says which.
  */
 #ifndef OVEN1_H
 #define OVEN1_H
