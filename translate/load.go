@@ -287,6 +287,9 @@ func signal(s *survey.Survey, id string) *survey.Signal {
 // Warms reports whether the load, switched on, raises the temperature of the
 // control that runs it; known is false where no such control tells.
 func (s *Switched) Warms(v *survey.Survey) (warms, known bool) {
+	if c := control(v, s.Load.Follows.V); c != nil && (c.Switching() || c.Modulating()) {
+		return !c.Cools(), true
+	}
 	for _, n := range s.Load.RunsWhen.V.Tree.Names() {
 		if c := control(v, n); c != nil && c.Switching() && c.Duty.V == survey.Operating {
 			return c.Action.V == survey.BreaksOnRise, true

@@ -57,6 +57,8 @@ func checks(spec *translate.Specification, a *risk.Assessment) []check {
 	}
 	cs = append(cs, sensors(spec)...)
 	cs = append(cs, contacts(spec)...)
+	cs = append(cs, regulators(spec)...)
+	cs = append(cs, indications(spec)...)
 	cs = append(cs, loads(spec)...)
 	return append(cs, clocks(spec)...)
 }
@@ -107,7 +109,7 @@ func contacts(spec *translate.Specification) []check {
 	for _, c := range spec.Survey.Controls {
 		k := spec.Plan.Contacts[c.ID.V]
 		t, ok := spec.Thresholds[c.ID.V]
-		if k == nil || !ok {
+		if k == nil || !ok || k.PID != nil {
 			continue
 		}
 		on, off := "warm", "cool"
@@ -122,6 +124,9 @@ func contacts(spec *translate.Specification) []check {
 			check{c.ID.V, on + " it slowly", expect("make", "makes", t.Make.SwitchesAt, t.Make.Counts)})
 		if k.Latches {
 			cs = append(cs, latches(spec, c, k)...)
+		}
+		if k.Dial != nil {
+			cs = append(cs, dialled(c, k.Dial, fmt.Sprintf("makes at %s and breaks at %s, the set point of the sheet", degrees(c.MakesAt.V), degrees(c.BreaksAt.V)))...)
 		}
 	}
 	return cs
@@ -153,6 +158,9 @@ func latches(spec *translate.Specification, c *survey.Control, k *translate.Cont
 func loads(spec *translate.Specification) []check {
 	var cs []check
 	for _, l := range spec.Survey.Loads {
+		if v := spec.Plan.Valves[l.ID.V]; v != nil {
+			cs = append(cs, valves(spec, v)...)
+		}
 		s := spec.Plan.Loads[l.ID.V]
 		if s == nil {
 			continue

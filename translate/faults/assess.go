@@ -21,6 +21,14 @@ func Assess(spec *translate.Specification, view *risk.View) []Row {
 			if s := spec.Plan.Loads[l.ID.V]; s != nil {
 				a.load(s)
 			}
+			if v := spec.Plan.Valves[l.ID.V]; v != nil {
+				a.valve(v)
+			}
+		}
+		for _, c := range spec.Survey.Controls {
+			if n := spec.Plan.Indications[c.ID.V]; n != nil {
+				a.indication(n)
+			}
 		}
 	}
 	for _, r := range spec.Refused {

@@ -36,6 +36,11 @@ func newBench(spec *translate.Specification, run *logic.Run) *bench {
 			b.set(k.Dial.Raw.Name, k.Dial.Marked)
 		}
 	}
+	for _, g := range spec.Plan.Regulators {
+		if g.Dial != nil {
+			b.set(g.Dial.Raw.Name, g.Dial.Marked)
+		}
+	}
 	b.run.Start(nil)
 	return b
 }
@@ -102,7 +107,7 @@ const longest = 40_000
 func settling(spec *translate.Specification) int {
 	n := 60
 	for _, c := range spec.Program.Consts {
-		for _, suffix := range []string{"_MIN_ON", "_MIN_OFF", "_CLEAR_AFTER", "_PROVE_WITHIN", "_CONTACT_SETTLES"} {
+		for _, suffix := range []string{"_MIN_ON", "_MIN_OFF", "_CLEAR_AFTER", "_PROVE_WITHIN", "_CONTACT_SETTLES", "_SAMPLE"} {
 			if strings.HasSuffix(c.Name, suffix) {
 				n = max(n, min(int(c.Value), longest)+20)
 			}

@@ -16,7 +16,11 @@ func (a *assessor) dial(l *translate.Switched, k *translate.Contact, function st
 		b.set(k.Dial.Raw.Name, 0)
 		b.steps(settling(a.spec))
 		now = end{wrong, "goes on at the dial's last setting and does not notice"}
-		if b.run.Get(k.Dial.Believed) == 0 {
+		switch {
+		case b.run.Get(k.Dial.Believed) != 0:
+		case k.PID != nil:
+			now = end{bounded, fmt.Sprintf("holds the set point of the sheet, %s, and reports it", translate.Degrees(k.Control.DialMark().V))}
+		default:
 			now = end{bounded, fmt.Sprintf("works at the set point of the sheet, makes at %s and breaks at %s, and reports it",
 				translate.Degrees(k.Control.MakesAt.V), translate.Degrees(k.Control.BreaksAt.V))}
 		}

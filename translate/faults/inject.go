@@ -192,6 +192,9 @@ func horizonOf(spec *translate.Specification, l *translate.Switched) int {
 // drifting moves the true temperature slowly through the edge at which the
 // control acts, with the reading wrong, and reads off where it acts.
 func (a *assessor) drifting(l *translate.Switched, k *translate.Contact, f sensorFault) (end, string) {
+	if k.PID != nil {
+		return end{bounded, fmt.Sprintf("holds a temperature that is %s off; nothing notices", translate.Kelvins(driftOf))}, "construction: the reading is all that the control has"
+	}
 	asked := actsAt(k)
 	chain := a.spec.Chains[k.Probe.Sensor.ID.V]
 	t := a.spec.Thresholds[k.Control.ID.V]
