@@ -13,19 +13,22 @@ const (
 
 // Contact is a replaced two-position control in the program.
 type Contact struct {
-	Control *survey.Control
-	Probe   *Probe
-	State   *logic.Var
-	Made    *logic.Expr // the contact is made, in this step
-	Acts    bool        // what the contact does when it acts: false opens, true makes
-	Latches bool        // it remembers that it has acted
-	Tripped *logic.Expr // it has acted and waits for its reset; nil unless it latches
-	Reset   *logic.Var  // the button; nil unless it latches and has one
-	Make    *edge
-	Break   *edge
-	Dial    *Dial // nil without one
+	Control     *survey.Control
+	Probe       *Probe
+	State       *logic.Var
+	Made        *logic.Expr // the contact is made, in this step
+	Acts        bool        // what the contact does when it acts: false opens, true makes
+	Latches     bool        // it remembers that it has acted
+	Tripped     *logic.Expr // it has acted and waits for its reset; nil unless it latches
+	Reset       *logic.Var  // the button; nil unless it latches and has one
+	Make        *edge
+	Break       *edge
+	Dial        *Dial        // nil without one
+	Anticipator *Anticipator // nil without one
 	// PID is set where the contact is that of a time-proportioned control.
 	PID *Regulator
+
+	mark *logic.Expr // the set point in steps of the reading
 }
 
 // edge is a threshold of a contact, in counts.
@@ -101,10 +104,10 @@ func (b *builder) contact(c *survey.Control, p *Probe) *Contact {
 
 	// Towards the side that the contact protects, any reading will do and a
 	// failed probe forces it; away from it, only a good probe counts.
-	k.Dial = b.dial(c, p)
+	k.Dial, k.Anticipator = b.dial(c, p), b.anticipator(c, p, k.State)
 	at, rising := c.DialMark().V, c.Action.V == survey.BreaksOnRise
-	toMade := b.reached(c, p, k.Dial, k.Make, "make", c.MakesAt.V-at, !rising)
-	toOpen := b.reached(c, p, k.Dial, k.Break, "break", c.BreaksAt.V-at, rising)
+	toMade := b.reached(k, k.Make, "make", c.MakesAt.V-at, !rising)
+	toOpen := b.reached(k, k.Break, "break", c.BreaksAt.V-at, rising)
 	whyMade, whyOpen := "temperature has reached the make", "temperature has reached the break"
 	if k.Acts {
 		toMade = logic.Or(p.failed(), toMade)

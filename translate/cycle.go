@@ -51,6 +51,9 @@ func (b *builder) cycle(c *survey.Control) {
 	}
 	s := b.sensor(c.Sensor.V)
 	loop.Sensing = thermal.Sensing{Lag: s.Lag.V}
+	if anticipates(c) {
+		loop.Sensing.Anticipator = thermal.Anticipator{Rise: c.Anticipator.Rise.V, Lag: c.Anticipator.Lag.V}
+	}
 	loop.Switching = thermal.Switching{Make: t.Make.SwitchesAt, Break: t.Break.SwitchesAt, MinOn: c.MinOn.V, MinOff: c.MinOff.V}
 	figures, err := b.cycleFigures(c, "", loop, s.Lag.Path)
 	if err != nil {

@@ -108,30 +108,59 @@ func (b *builder) dial(c *survey.Control, p *Probe) *Dial {
 	return d
 }
 
-// reached is true where the reading is at or beyond an edge that lies offset K
-// from the dial's mark, or, with a dial that is not believed, beyond the edge
-// of the sheet.
-func (b *builder) reached(c *survey.Control, p *Probe, d *Dial, e *edge, name string, offset float64, rising bool) *logic.Expr {
-	if d == nil {
+// reached is true where the temperature is at or beyond an edge that lies
+// offset K from the dial's mark. Where the dial is not believed, the edge is
+// that of the sheet. Counts are compared as long as nothing moves the edge or
+// warms the reading.
+func (b *builder) reached(k *Contact, e *edge, name string, offset float64, rising bool) *logic.Expr {
+	c, p, d, a := k.Control, k.Probe, k.Dial, k.Anticipator
+	if d == nil && a == nil {
 		return e.reached(p)
 	}
 	r := b.reading(p)
-	at := logic.Use(d.SetPoint)
+	at, value, sheet := b.mark(k, r), logic.Use(r.Value), e.reached(p)
+	if a != nil {
+		value = logic.Use(a.Warm)
+	}
 	if n := r.in(math.Abs(offset)); n != 0 {
 		side, shift := "below", logic.Sub
 		if offset > 0 {
 			side, shift = "above", logic.Add
 		}
 		k := b.constant(logic.Const{Name: c.ID.V + "_" + name + "_" + side + "_mark", Value: n, Unit: fmt.Sprintf("%g K", r.Unit),
-			Means: Kelvins(math.Abs(offset)) + " " + side + " the dial's mark", Origin: origin(c.DialMark().Source), Working: "differential as on the sheet"})
+			Means: Kelvins(math.Abs(offset)) + " " + side + " the set point", Origin: origin(c.DialMark().Source), Working: "differential as on the sheet"})
 		at = shift(at, logic.C(k))
 	}
-	beyond := logic.Le(logic.Use(r.Value), at)
+	beyond := logic.Le(value, at)
 	if rising {
-		beyond = logic.Ge(logic.Use(r.Value), at)
+		beyond = logic.Ge(value, at)
 	}
-	believed := logic.Use(d.Believed)
-	v := b.local(b.name(c.ID.V, name+"_reached"), "the temperature is at or beyond the "+name+", by the dial or, without it, by the sheet",
-		logic.Or(logic.And(believed, beyond), logic.And(logic.Not(believed), e.reached(p))))
+	if a == nil {
+		believed := logic.Use(d.Believed)
+		beyond = logic.Or(logic.And(believed, beyond), logic.And(logic.Not(believed), sheet))
+	}
+	v := b.local(b.name(c.ID.V, name+"_reached"), "the temperature is at or beyond the "+name, beyond)
 	return logic.Use(v)
+}
+
+// mark is the set point in steps of the reading: by the dial, or of the sheet.
+func (b *builder) mark(k *Contact, r Reading) *logic.Expr {
+	if k.Dial != nil && k.Anticipator == nil {
+		return logic.Use(k.Dial.SetPoint)
+	}
+	if k.mark == nil {
+		k.mark = b.wanted(k.Control, k.Dial, r)
+	}
+	return k.mark
+}
+
+// wanted is the set point by a dial that is believed, else that of the sheet.
+func (b *builder) wanted(c *survey.Control, d *Dial, r Reading) *logic.Expr {
+	at := c.DialMark()
+	k := b.constant(logic.Const{Name: c.ID.V + "_set_point", Value: r.in(at.V), Unit: fmt.Sprintf("%g K", r.Unit), Means: Degrees(at.V), Origin: origin(at.Source), Working: "in steps of the reading"})
+	if d == nil {
+		return logic.C(k)
+	}
+	return logic.Use(b.whole(b.name(c.ID.V, "wanted"), "set point by the dial or, without it, by the sheet",
+		logic.Select(logic.Use(d.Believed), logic.Use(d.SetPoint), logic.C(k))))
 }

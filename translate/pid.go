@@ -88,7 +88,8 @@ func (b *builder) pid(c *survey.Control, p *Probe, t Tuning) *Regulator {
 	running := b.local(b.name(id, "running"), c.What.V+": its probe is believed", logic.Not(p.failed()))
 	due := b.local(b.name(id, "due"), c.What.V+": a new output is due", logic.And(logic.Use(running), logic.Eq(logic.Use(at), logic.Lit(0))))
 
-	setPoint := b.setPoint(c, p, g)
+	g.Dial = b.dial(c, p)
+	setPoint := b.wanted(c, g.Dial, r)
 	deviation := logic.Sub(setPoint, logic.Use(r.Value))
 	if c.Cools() { // more output where it is too warm
 		deviation = logic.Sub(logic.Use(r.Value), setPoint)
@@ -143,19 +144,6 @@ func (b *builder) due(c *survey.Control, p *Probe, sample *logic.Const) *logic.V
 	b.add(&logic.Set{Var: at, To: logic.Select(p.failed(), logic.C(last),
 		logic.Select(logic.Ge(logic.Prev(at), logic.C(last)), logic.Lit(0), logic.Add(logic.Prev(at), logic.Lit(1))))})
 	return at
-}
-
-// setPoint is the set point in steps of the reading: of the sheet, or by the dial.
-func (b *builder) setPoint(c *survey.Control, p *Probe, g *Regulator) *logic.Expr {
-	r := b.reading(p)
-	at := c.DialMark()
-	k := b.constant(logic.Const{Name: c.ID.V + "_set_point", Value: r.in(at.V), Unit: fmt.Sprintf("%g K", r.Unit), Means: Degrees(at.V), Origin: origin(at.Source), Working: "in steps of the reading"})
-	if g.Dial = b.dial(c, p); g.Dial == nil {
-		return logic.C(k)
-	}
-	v := b.whole(b.name(c.ID.V, "wanted"), "set point by the dial or, without it, by the sheet",
-		logic.Select(logic.Use(g.Dial.Believed), logic.Use(g.Dial.SetPoint), logic.C(k)))
-	return logic.Use(v)
 }
 
 // fractionOf is x·Mul/Div; a divisor of one is left out.

@@ -100,7 +100,10 @@ func (b *builder) spanFor(c *survey.Control) (span, bool) {
 		return span{low - roomAround, high + roomAround}, true
 	case c.DialStays():
 		low, high := dialEdges(c)
-		return span{low - roomAround, high + roomAround}, true
+		return span{low - roomAround - known(c.Anticipator.Rise), high + roomAround}, true
+	case anticipates(c):
+		low, high := math.Min(c.MakesAt.V, c.BreaksAt.V), math.Max(c.MakesAt.V, c.BreaksAt.V)
+		return span{low - roomAround - c.Anticipator.Rise.V, high + roomAround}, true
 	}
 	return span{}, false
 }

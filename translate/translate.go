@@ -291,7 +291,7 @@ func (b *builder) order() []string {
 		for _, n := range on {
 			visit(n)
 		}
-		if l := load(b.survey, id); l == nil || l.RunsWhen.V.Tree != nil || l.Follows.Set {
+		if l := load(b.survey, id); l == nil || b.programmed(l) {
 			done = append(done, id)
 		}
 	}
@@ -305,6 +305,27 @@ func (b *builder) order() []string {
 		visit(id)
 	}
 	return done
+}
+
+// programmed reports whether the program has to do with a load: it has an output
+// stage, it follows something, or something other than parts that stay stands
+// in its line.
+func (b *builder) programmed(l *survey.Load) bool {
+	if l.Follows.Set {
+		return true
+	}
+	if l.RunsWhen.V.Tree == nil {
+		return false
+	}
+	if output(b.survey, l.ID.V) != nil {
+		return true
+	}
+	for _, n := range l.RunsWhen.V.Tree.Names() {
+		if c := control(b.survey, n); c == nil || c.Plan.V == survey.Replace {
+			return true
+		}
+	}
+	return false
 }
 
 // faultWord gathers every fault into one number for the outside.

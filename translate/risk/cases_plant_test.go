@@ -1,5 +1,7 @@
 package risk
 
+import "strings"
+
 const tankPapers = `answers:
   - {finding: paperwork_open, about: rollback, answer: The old stat is kept for a year., role: engineer, date: 2026-11-20}
   - {finding: paperwork_open, about: spares, answer: Two boards., role: engineer, date: 2026-11-20}
@@ -24,6 +26,9 @@ var plantCases = []ruleCase{
 	{rule: "heat_without_flow", about: "heater", grade: Stop, base: "tank",
 		fire:  change{"loads:\n", tankPump, "medium: water", "medium: air", "runs_when: tank_stat and flow_proven", "runs_when: tank_stat"},
 		quiet: change{"loads:\n", tankPump, "medium: water", "medium: air"}},
+	{rule: "heat_without_flow", about: "heater", grade: Stop, base: "tank", // a fan that stands still while it heats, as with a defrost
+		fire:  change{"loads:\n", tankPump, "medium: water", "medium: air", "runs_when: tank_stat and flow_proven", "runs_when: tank_stat"},
+		quiet: change{"loads:\n", strings.Replace(tankPump, "runs_when: flow_proven", "runs_when: flow_proven and not tank_stat", 1), "medium: water", "medium: air", "runs_when: tank_stat and flow_proven", "runs_when: tank_stat"}},
 	{rule: "heat_flow_not_proved", about: "heater", grade: Act, base: "tank",
 		fire:  change{"loads:\n", tankPump, "runs_when: tank_stat and flow_proven", "runs_when: tank_stat"},
 		quiet: change{"loads:\n", tankPump}},

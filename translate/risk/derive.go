@@ -29,6 +29,7 @@ func (b *builder) load(v *Load, l *survey.Load) {
 	v.Controls = controlsOf(b.s, l)
 	v.Driven = b.driven(v, l)
 	v.Proving = b.proving(l)
+	v.Excludes = b.excludes(l)
 	v.ThermalStart = b.thermalStart(l)
 	v.RunsOn = v.ThermalStart || b.timedRunOn(l)
 	v.MinOff = 0

@@ -209,3 +209,36 @@ func find[T any](list []*T, is func(*T) bool) *T {
 	}
 	return nil
 }
+
+// excludes lists the loads that cannot be on while this one is: something that
+// this load's line needs is something that their line must not have, in series.
+func (b *builder) excludes(l *survey.Load) []string {
+	needs, _ := inSeries(l.RunsWhen.V.Tree)
+	needs = append(needs, l.ID.V)
+	var ids []string
+	for _, other := range b.s.Loads {
+		_, bars := inSeries(other.RunsWhen.V.Tree)
+		if slices.ContainsFunc(needs, func(n string) bool { return slices.Contains(bars, n) }) {
+			ids = append(ids, other.ID.V)
+		}
+	}
+	return ids
+}
+
+// inSeries lists the names that stand in series in a line: those that it needs
+// and those that bar it.
+func inSeries(c *survey.Cond) (needs, bars []string) {
+	switch {
+	case c == nil:
+	case c.Op == survey.CondName:
+		needs = append(needs, c.Name)
+	case c.Op == survey.CondNot && c.Args[0].Op == survey.CondName:
+		bars = append(bars, c.Args[0].Name)
+	case c.Op == survey.CondAnd:
+		for _, a := range c.Args {
+			n, x := inSeries(a)
+			needs, bars = append(needs, n...), append(bars, x...)
+		}
+	}
+	return needs, bars
+}

@@ -132,6 +132,7 @@ type Load struct {
 	Stats          []string `expr:"stats"`           // of these, the ones that work every cycle
 	Proving        []string `expr:"proving"`         // signals that its runs_when wants true
 	ThermalStart   bool     `expr:"thermal_start"`   // starts on a rising temperature by itself
+	Excludes       []string `expr:"excludes"`        // loads whose wiring keeps them off while this one is on
 	RunsOn         bool     `expr:"runs_on"`         // goes on after a heating load: by a timer or by its own control
 	HighLimit      bool     `expr:"high_limit"`      // hardware that breaks on rise cuts it
 	FlameGuard     bool     `expr:"flame_guard"`     // hardware flame supervision cuts it

@@ -27,8 +27,8 @@
  * moisture_direction (act, exchanger_probe); 8 damp_dust_washdown (act, wah1); 9 limit_error_budget
  * (act, exchanger_stat); 10 limit_error_budget (act, fan_disc); 11 contact_life (act, burner_call);
  * 12 mercury_asbestos_refrigerant (act, exchanger_stat); 13 mercury_asbestos_refrigerant (act,
- * fan_disc); 14 approval_lapses (act, wah1). Not judged, for want of a figure: 2; risks.md says
- * which.
+ * fan_disc); 14 approval_lapses (act, wah1); 15 heating_and_cooling_overlap (act, exchanger_stat).
+ * Not judged, for want of a figure: 2; risks.md says which.
  */
 /* The recorded inputs visit every state and make every transition. */
 #include "wah1.h"
