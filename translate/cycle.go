@@ -40,6 +40,7 @@ func (b *builder) cycle(c *survey.Control) {
 			loop.Sensing.Anticipator = thermal.Anticipator{Rise: c.Anticipator.Rise.V, Lag: c.Anticipator.Lag.V}
 		}
 		b.cycleFigures(c, "old_", loop, from)
+		b.describing(c, loop)
 	}
 	if tuning, continuous := b.settingsOf(c.ID.V); continuous && wantsPID(c) {
 		b.held(c, l, tuning)

@@ -109,13 +109,13 @@ func (b *builder) pid(c *survey.Control, p *Probe, t Tuning) *Regulator {
 		out = logic.Add(out, b.derivative(c, r, plan, s.Td, due, running, k))
 	}
 	most := k("most", plan.MostOutput, "permille", "all", "the whole output")
-	raw := b.whole(b.name(id, "unheld"), "output before it is held between none and all", out)
+	raw := b.whole(b.name(id, "unheld"), "output, where one is due, before it is held between none and all", logic.Select(logic.Use(due), out, logic.Lit(0)))
 	if sum != nil {
 		mul := k("i_mul", plan.I.Mul, "", "integral: factor of the deviation in each sample", fmt.Sprintf("%s: integral time %s", name, Span(s.Ti)))
-		free := logic.Not(logic.Or(
+		pushes := b.local(b.name(id, "pushes_on"), "the output is held, and the deviation pushes it on", logic.Or(
 			logic.And(logic.Gt(logic.Use(raw), logic.C(most)), logic.Gt(logic.Use(e), logic.Lit(0))),
 			logic.And(logic.Lt(logic.Use(raw), logic.Lit(0)), logic.Lt(logic.Use(e), logic.Lit(0)))))
-		b.add(&logic.Set{Var: sum, When: logic.Or(logic.Not(logic.Use(running)), logic.And(logic.Use(due), free)),
+		b.add(&logic.Set{Var: sum, When: logic.Or(logic.Not(logic.Use(running)), logic.And(logic.Use(due), logic.Not(logic.Use(pushes)))),
 			To: logic.Select(logic.Use(running),
 				logic.Clamp(logic.Add(logic.Prev(sum), logic.Mul(logic.Use(e), logic.C(mul))), logic.Lit(0), logic.Lit(plan.MostOutput*plan.I.Div)), logic.Lit(0)),
 			Why: "not while the output is held and the deviation pushes it on; emptied while the probe is not believed"})
@@ -186,7 +186,7 @@ func (b *builder) proportion(c *survey.Control, g *Regulator, at, due, running *
 	id, w := c.ID.V, *g.Window
 	half := logic.Lit(thermal.Full / 2)
 	n := b.whole(b.name(id, "steps_on"), "steps of the window for this output",
-		logic.Div(logic.Add(logic.Mul(logic.Use(g.Permille), logic.C(g.Sample)), half), logic.Lit(thermal.Full)))
+		logic.Select(logic.Use(due), logic.Div(logic.Add(logic.Mul(logic.Use(g.Permille), logic.C(g.Sample)), half), logic.Lit(thermal.Full)), logic.Lit(0)))
 	on := logic.Use(n)
 	if w.MinPulse > 0 {
 		least := k("least_pulse", w.MinPulse, "steps", "shortest pulse "+Span(float64(w.MinPulse)*b.step), "min_pulse of the output, or the minimum times of the control")

@@ -199,3 +199,18 @@ func (b *builder) held(c *survey.Control, l *survey.Load, t Tuning) {
 		b.contactLife(c, l, t.Window, "process; one operation in every window, at most")
 	}
 }
+
+// describing notes the ultimate gain as the describing function has it from the
+// old cycle, where that is valid, with its difference from the exact one.
+func (b *builder) describing(c *survey.Control, old thermal.Loop) {
+	const name = "describing_gain"
+	d, err := old.Describing()
+	switch {
+	case err != nil:
+		b.spec.Figures.open(c.ID.V, name, "1/K", "process", "not determined: "+err.Error())
+	case !d.Valid:
+		b.spec.Figures.open(c.ID.V, name, "1/K", "process", "not shown: "+d.Because)
+	default:
+		b.spec.Figures.add(c.ID.V, name, d.Gain, "1/K", "process", fmt.Sprintf("4d/(π·√(a² − ε²)) from the old cycle (Åström and Hägglund 1984): %+.0f %% off the exact %.4g; %s", 100*d.Difference, d.Exact, d.Because))
+	}
+}

@@ -55,7 +55,8 @@ func (b *builder) proportional(c *survey.Control, p *Probe) *Regulator {
 	if !c.Cools() { // opens as it cools
 		into = logic.Sub(logic.C(top), logic.Use(r.Value))
 	}
-	in := b.whole(b.name(id, "into_band"), "how far the reading is into the band, towards open", logic.Clamp(into, logic.Lit(0), logic.C(width)))
+	past := b.whole(b.name(id, "past_shut"), "how far the reading is past where it is shut", into)
+	in := b.whole(b.name(id, "into_band"), "the same, within the band", logic.Clamp(logic.Use(past), logic.Lit(0), logic.C(width)))
 	demand := b.whole(b.name(id, "demand"), "opening for this reading", logic.Div(logic.Mul(logic.Use(in), logic.Lit(thermal.Full)), logic.C(width)))
 
 	play := int64(math.Round(thermal.Full * known(c.Hysteresis) / 2 / (high - low)))
@@ -63,10 +64,12 @@ func (b *builder) proportional(c *survey.Control, p *Probe) *Regulator {
 	to := logic.Use(demand)
 	if play > 0 {
 		half := k("play", play, "permille", "half of the hysteresis of "+Kelvins(c.Hysteresis.V), "1000 × hysteresis / 2 / band", c.Hysteresis.Source)
-		held := logic.Clamp(logic.Prev(g.Permille), logic.Sub(logic.Use(demand), logic.C(half)), logic.Add(logic.Use(demand), logic.C(half)))
-		to = logic.Select(logic.Le(logic.Use(demand), logic.Lit(0)), logic.Lit(0),
-			logic.Select(logic.Ge(logic.Use(demand), logic.Lit(thermal.Full)), logic.Lit(thermal.Full),
-				logic.Clamp(held, logic.Lit(0), logic.Lit(thermal.Full))))
+		least := b.whole(b.name(id, "least"), "the play's lower end", logic.Sub(logic.Use(demand), logic.C(half)))
+		most := b.whole(b.name(id, "most"), "the play's upper end", logic.Add(logic.Use(demand), logic.C(half)))
+		held := b.whole(b.name(id, "held"), "where the play leaves it", logic.Clamp(logic.Prev(g.Permille), logic.Use(least), logic.Use(most)))
+		to = logic.Select(logic.Eq(logic.Use(demand), logic.Lit(0)), logic.Lit(0),
+			logic.Select(logic.Eq(logic.Use(demand), logic.Lit(thermal.Full)), logic.Lit(thermal.Full),
+				logic.Clamp(logic.Use(held), logic.Lit(0), logic.Lit(thermal.Full))))
 	}
 	b.add(&logic.Set{Var: g.Permille, When: p.good(), To: to, Why: "stays where it is while the probe is in doubt"})
 	return g

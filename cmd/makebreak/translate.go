@@ -61,6 +61,9 @@ func (w *work) printSpecification(out io.Writer, as string) error {
 	if err := w.printConversions(out, as); err != nil {
 		return err
 	}
+	if err := w.printTunings(out, as); err != nil {
+		return err
+	}
 	if w.spec.Program == nil {
 		return nil
 	}
@@ -123,4 +126,35 @@ func (w *work) printConversions(out io.Writer, as string) error {
 	}
 	fmt.Fprintln(out, "\nConversion tables")
 	return printTable(out, as, []string{"sensor", "span", "pieces", "bytes", "worst error", "working"}, rows)
+}
+
+// printTunings prints the rules for a continuous control side by side.
+func (w *work) printTunings(out io.Writer, as string) error {
+	for _, t := range w.spec.Tunings {
+		var rows [][]string
+		for _, r := range t.Rules {
+			if r.Refused != "" {
+				rows = append(rows, []string{r.Name, "-", "-", "-", "-", "-", "-", "-", r.Refused})
+				continue
+			}
+			s := r.Settings.Parallel()
+			name := r.Name
+			if name == t.Chosen.Name {
+				name += " (taken)"
+			}
+			rows = append(rows, []string{name, fmt.Sprintf("%.4g /K", s.Kc), translate.Span(s.Ti), translate.Span(s.Td),
+				fmt.Sprintf("%.3g", r.Margins.Gain), fmt.Sprintf("%.3g°", r.Margins.Phase), fmt.Sprintf("%.3g", r.Margins.Sensitivity),
+				fmt.Sprintf("%.0f %%", 100*r.Response.Overshoot), translate.Span(r.Response.Settling)})
+		}
+		fmt.Fprintf(out, "\nSettings of a continuous control in place of %s: %s\n", visible(t.Control), t.Because)
+		if err := printTable(out, as, []string{"rule", "gain", "integral", "derivative", "gain margin", "phase margin", "Ms", "overshoot", "settling"}, rows); err != nil {
+			return err
+		}
+		for i, r := range t.Rules {
+			if i == 0 || r.Source != t.Rules[i-1].Source {
+				fmt.Fprintf(out, "%s: %s\n", r.Name, r.Source)
+			}
+		}
+	}
+	return nil
 }

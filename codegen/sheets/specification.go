@@ -24,6 +24,7 @@ func Specification(spec *translate.Specification, a *risk.Assessment, functions 
 		Failures:  failures(spec),
 		Stages:    stages(spec),
 		Tables:    tables(spec),
+		Tunings:   tunings(spec),
 	})
 }
 
@@ -38,6 +39,7 @@ type specification struct {
 	Failures  []failureJSON       `json:"sensor_failures"`
 	Stages    []stageJSON         `json:"output_stages"`
 	Tables    []tableJSON         `json:"conversion_tables"`
+	Tunings   []tuningJSON        `json:"tunings"`
 }
 
 // figures leaves out no figure: what is no number becomes null, with the
@@ -273,4 +275,45 @@ func tables(spec *translate.Specification) []tableJSON {
 		out = append(out, tableJSON{c.Sensor, c.From, c.To, c.Unit, c.Bound, c.Worst, c.Pieces, c.Bytes, c.Working})
 	}
 	return out
+}
+
+type tuningJSON struct {
+	Control     string   `json:"control"`
+	Rule        string   `json:"rule"`
+	Taken       bool     `json:"taken"`
+	Gain        *float64 `json:"gain_per_k"` // null where the rule gives nothing, or the figure is no number
+	Integral    *float64 `json:"integral_time_s"`
+	Derivative  *float64 `json:"derivative_time_s"`
+	GainMargin  *float64 `json:"gain_margin"`
+	PhaseMargin *float64 `json:"phase_margin_deg"`
+	Sensitivity *float64 `json:"peak_sensitivity"`
+	Overshoot   *float64 `json:"overshoot"`
+	Settling    *float64 `json:"settling_s"`
+	Source      string   `json:"source"`
+	Refused     string   `json:"refused,omitempty"`
+}
+
+func tunings(spec *translate.Specification) []tuningJSON {
+	out := []tuningJSON{}
+	for _, t := range spec.Tunings {
+		for _, r := range t.Rules {
+			j := tuningJSON{Control: t.Control, Rule: r.Name, Taken: r.Name == t.Chosen.Name, Source: r.Source, Refused: r.Refused}
+			if r.Refused == "" {
+				s := r.Settings.Parallel()
+				j.Gain, j.Integral, j.Derivative = finite(s.Kc), finite(s.Ti), finite(s.Td)
+				j.GainMargin, j.PhaseMargin, j.Sensitivity = finite(r.Margins.Gain), finite(r.Margins.Phase), finite(r.Margins.Sensitivity)
+				j.Overshoot, j.Settling = finite(r.Response.Overshoot), finite(r.Response.Settling)
+			}
+			out = append(out, j)
+		}
+	}
+	return out
+}
+
+// finite is a number that JSON can hold, or null.
+func finite(v float64) *float64 {
+	if math.IsInf(v, 0) || math.IsNaN(v) {
+		return nil
+	}
+	return &v
 }

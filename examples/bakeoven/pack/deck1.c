@@ -426,20 +426,20 @@ void deck1_step(struct deck1 *m, const struct deck1_in *in, struct deck1_out *ou
             (int16_t)((int16_t)oven_stat_wanted - (int16_t)roof_probe_reading),
             -907,
             DECK1_OVEN_STAT_CLIP);
-    /* output before it is held between none and all */
+    /* output, where one is due, before it is held between none and all */
     const int16_t oven_stat_unheld = (int16_t)(
-            (((int32_t)oven_stat_deviation * (int32_t)DECK1_OVEN_STAT_P_MUL) /
-             (int32_t)DECK1_OVEN_STAT_P_DIV) +
-            ((int32_t)m->oven_stat_sum / (int32_t)DECK1_OVEN_STAT_I_DIV));
+            oven_stat_due
+            ? (
+                    (((int32_t)oven_stat_deviation * (int32_t)DECK1_OVEN_STAT_P_MUL) /
+                     (int32_t)DECK1_OVEN_STAT_P_DIV) +
+                    ((int32_t)m->oven_stat_sum / (int32_t)DECK1_OVEN_STAT_I_DIV))
+            : INT32_C(0));
+    /* the output is held, and the deviation pushes it on */
+    const bool oven_stat_pushes_on = ((oven_stat_unheld > DECK1_OVEN_STAT_MOST) &&
+                                      (oven_stat_deviation > 0)) ||
+        ((oven_stat_unheld < 0) && (oven_stat_deviation < 0));
 
-    if (
-            !oven_stat_running ||
-            (
-                    oven_stat_due &&
-                    !(
-                            ((oven_stat_unheld > DECK1_OVEN_STAT_MOST) &&
-                             (oven_stat_deviation > 0)) ||
-                            ((oven_stat_unheld < 0) && (oven_stat_deviation < 0))))) {
+    if (!oven_stat_running || (oven_stat_due && !oven_stat_pushes_on)) {
         /* not while the output is held and the deviation pushes it on; emptied while the probe is
          * not believed
          */
@@ -461,8 +461,12 @@ void deck1_step(struct deck1 *m, const struct deck1_in *in, struct deck1_out *ou
 
     /* steps of the window for this output */
     const uint8_t oven_stat_steps_on = (uint8_t)(
-            (((int32_t)m->oven_stat_permille * (int32_t)DECK1_OVEN_STAT_SAMPLE) + INT32_C(500)) /
-            INT32_C(1000));
+            oven_stat_due
+            ? (
+                    (((int32_t)m->oven_stat_permille * (int32_t)DECK1_OVEN_STAT_SAMPLE) +
+                     INT32_C(500)) /
+                    INT32_C(1000))
+            : INT32_C(0));
 
     if (!oven_stat_running || oven_stat_due) {
         m->oven_stat_on_for = (uint8_t)(

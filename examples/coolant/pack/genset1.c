@@ -264,32 +264,32 @@ void genset1_step(struct genset1 *m, const struct genset1_in *in, struct genset1
 
     /* temperature of outlet_probe in steps of 0.01 K */
     const uint16_t outlet_probe_reading = genset1_outlet_probe_temperature(outlet_probe_counts);
-    /* how far the reading is into the band, towards open */
-    const uint16_t wax_valve_into_band = (uint16_t)genset1_clamp_i16((int16_t)((int16_t)outlet_probe_reading -
-                GENSET1_WAX_VALVE_BAND_FROM),
+    /* how far the reading is past where it is shut */
+    const int16_t wax_valve_past_shut = (int16_t)((int16_t)outlet_probe_reading -
+                                                  GENSET1_WAX_VALVE_BAND_FROM);
+    /* the same, within the band */
+    const uint16_t wax_valve_into_band = (uint16_t)genset1_clamp_i16(wax_valve_past_shut,
             0,
             GENSET1_WAX_VALVE_BAND);
     /* opening for this reading */
     const uint16_t wax_valve_demand = (uint16_t)(((int32_t)wax_valve_into_band * INT32_C(1000)) /
                                                  (int32_t)GENSET1_WAX_VALVE_BAND);
+    /* the play's lower end */
+    const int16_t wax_valve_least = (int16_t)((int16_t)wax_valve_demand - GENSET1_WAX_VALVE_PLAY);
+    /* the play's upper end */
+    const uint16_t wax_valve_most = (uint16_t)((int16_t)wax_valve_demand + GENSET1_WAX_VALVE_PLAY);
+    /* where the play leaves it */
+    const int16_t wax_valve_held = genset1_clamp_i16((int16_t)m->wax_valve_permille,
+                                                     wax_valve_least,
+                                                     (int16_t)wax_valve_most);
 
     if (m->outlet_probe_state == GENSET1_OUTLET_PROBE_STATE_GOOD) {
         /* stays where it is while the probe is in doubt */
         m->wax_valve_permille = (uint16_t)(
-                (wax_valve_demand <= 0u)
+                (wax_valve_demand == 0u)
                 ? 0
-                : (
-                        (wax_valve_demand >= 1000u)
-                        ? 1000
-                        : genset1_clamp_i16(
-                                genset1_clamp_i16(
-                                        (int16_t)m->wax_valve_permille,
-                                        (int16_t)((int16_t)wax_valve_demand -
-                                                  GENSET1_WAX_VALVE_PLAY),
-                                        (int16_t)((int16_t)wax_valve_demand +
-                                                  GENSET1_WAX_VALVE_PLAY)),
-                                0,
-                                1000)));
+                : ((wax_valve_demand == 1000u)
+                   ? 1000 : genset1_clamp_i16(wax_valve_held, 0, 1000)));
     }
 
     /* it has to be in its safe position */

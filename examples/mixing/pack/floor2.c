@@ -362,20 +362,20 @@ void floor2_step(struct floor2 *m, const struct floor2_in *in, struct floor2_out
             (int16_t)(FLOOR2_SELF_ACTING_SET_POINT - (int16_t)flow_probe_reading),
             -2763,
             FLOOR2_SELF_ACTING_CLIP);
-    /* output before it is held between none and all */
+    /* output, where one is due, before it is held between none and all */
     const int16_t self_acting_unheld = (int16_t)(
-            (((int32_t)self_acting_deviation * (int32_t)FLOOR2_SELF_ACTING_P_MUL) /
-             (int32_t)FLOOR2_SELF_ACTING_P_DIV) +
-            ((int32_t)m->self_acting_sum / (int32_t)FLOOR2_SELF_ACTING_I_DIV));
+            self_acting_due
+            ? (
+                    (((int32_t)self_acting_deviation * (int32_t)FLOOR2_SELF_ACTING_P_MUL) /
+                     (int32_t)FLOOR2_SELF_ACTING_P_DIV) +
+                    ((int32_t)m->self_acting_sum / (int32_t)FLOOR2_SELF_ACTING_I_DIV))
+            : INT32_C(0));
+    /* the output is held, and the deviation pushes it on */
+    const bool self_acting_pushes_on = ((self_acting_unheld > FLOOR2_SELF_ACTING_MOST) &&
+                                        (self_acting_deviation > 0)) ||
+        ((self_acting_unheld < 0) && (self_acting_deviation < 0));
 
-    if (
-            !self_acting_running ||
-            (
-                    self_acting_due &&
-                    !(
-                            ((self_acting_unheld > FLOOR2_SELF_ACTING_MOST) &&
-                             (self_acting_deviation > 0)) ||
-                            ((self_acting_unheld < 0) && (self_acting_deviation < 0))))) {
+    if (!self_acting_running || (self_acting_due && !self_acting_pushes_on)) {
         /* not while the output is held and the deviation pushes it on; emptied while the probe is
          * not believed
          */
