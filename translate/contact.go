@@ -33,11 +33,14 @@ type edge struct {
 }
 
 // reached is true where the temperature is at or beyond the edge.
-func (e *edge) reached(p *Probe) *logic.Expr {
+func (e *edge) reached(p *Probe) *logic.Expr { return e.reachedBy(p.Value) }
+
+// reachedBy is the same for a reading that is in the units of Const.
+func (e *edge) reachedBy(reading *logic.Var) *logic.Expr {
 	if e.AtLeast {
-		return logic.Ge(logic.Use(p.Value), logic.C(e.Const))
+		return logic.Ge(logic.Use(reading), logic.C(e.Const))
 	}
-	return logic.Le(logic.Use(p.Value), logic.C(e.Const))
+	return logic.Le(logic.Use(reading), logic.C(e.Const))
 }
 
 // acts says which way a control's contact goes when it protects: false where
@@ -87,7 +90,8 @@ func load(s *survey.Survey, id string) *survey.Load {
 // contact builds a two-position control that resets itself.
 func (b *builder) contact(c *survey.Control, p *Probe) *Contact {
 	k := &Contact{Control: c, Probe: p, Acts: acts(b.survey, c.ID.V)}
-	k.Make, k.Break = b.edges(c, p, k.Acts)
+	reads, scale := b.smoothed(c, p)
+	k.Make, k.Break = b.edges(c, p, k.Acts, scale)
 	start := contactOpen
 	if k.Acts {
 		start = contactMade
@@ -98,8 +102,8 @@ func (b *builder) contact(c *survey.Control, p *Probe) *Contact {
 
 	// Towards the side that the contact protects, any reading will do and a
 	// failed probe forces it; away from it, only a good probe counts.
-	toMade := k.Make.reached(p)
-	toOpen := k.Break.reached(p)
+	toMade := k.Make.reachedBy(reads)
+	toOpen := k.Break.reachedBy(reads)
 	whyMade, whyOpen := "temperature has reached the make", "temperature has reached the break"
 	if k.Acts {
 		toMade = logic.Or(p.failed(), toMade)

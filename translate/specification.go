@@ -27,6 +27,9 @@ type Specification struct {
 	// Thresholds of the translated controls, by control.
 	Thresholds map[string]Thresholds
 	Refused    []Refusal
+	Model      *Model           // how the process behaves; nil where nothing tells
+	Matches    map[string]Match // how translated operating controls were matched, by control
+	Cycles     []*ControlCycle  // of the operating two-position controls, in the order of the sheet
 }
 
 // ErrorBudget is the error of a sensor at one edge of one control.

@@ -11,11 +11,14 @@ import (
 
 // Translate works out the specification of the new control. Diagnostics name
 // what in the sheet stands in the way; the specification is returned as far as
-// it goes. Program is nil where any diagnostic is an error, or where nothing
+// it goes. Options hand in what the sheet only names. Program is nil where any diagnostic is an error, or where nothing
 // in the sheet is to be replaced.
-func Translate(s *survey.Survey) (*Specification, survey.Diagnostics) {
-	spec := &Specification{Survey: s, Chains: map[string]*sensing.Chain{}, Thresholds: map[string]Thresholds{}}
+func Translate(s *survey.Survey, with ...Option) (*Specification, survey.Diagnostics) {
+	spec := &Specification{Survey: s, Chains: map[string]*sensing.Chain{}, Thresholds: map[string]Thresholds{}, Matches: map[string]Match{}}
 	b := newBuilder(spec)
+	for _, option := range with {
+		option(b)
+	}
 	cat, err := catalogue.Load()
 	if err != nil {
 		b.fail(survey.Source{}, "the catalogue does not load", err.Error(), "a sound build of this program")

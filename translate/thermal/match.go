@@ -219,7 +219,7 @@ func (m matching) within(out Matched) (Matched, error) {
 		}
 		wanted := func(lag float64) float64 { return -at(lag) }
 		lag, found := crossing(wanted, out.Filter, m.NewLag+m.Old.Process.Dead+1e-3*m.old.Period(), 1e3)
-		why := fmt.Sprintf("%s: %.4g operations a year, and the contact's life allows %.4g", out.Because, over, m.MostOperations)
+		why := fmt.Sprintf("%s: %.0f operations a year, and the contact's life allows %.0f", out.Because, over, m.MostOperations)
 		if !found {
 			out.Feasible, out.Because = false, why+"; no software lag brings it there"
 		} else {
@@ -237,7 +237,7 @@ func (m matching) within(out Matched) (Matched, error) {
 // withCosts says what the choice costs against the old control.
 func (m matching) withCosts(out Matched) Matched {
 	out.Costs = []string{
-		fmt.Sprintf("operations a year: %.4g, before %.4g (%+.1f %%)", out.New.OperationsPerYear, m.old.OperationsPerYear, 100*(out.New.OperationsPerYear/m.old.OperationsPerYear-1)),
+		fmt.Sprintf("operations a year: %.0f, before %.0f (%+.1f %%)", out.New.OperationsPerYear, m.old.OperationsPerYear, 100*(out.New.OperationsPerYear/m.old.OperationsPerYear-1)),
 		fmt.Sprintf("swing of the medium: %.3g K, before %.3g K", out.New.Swing(), m.old.Swing()),
 		fmt.Sprintf("mean of the medium: %.4g degC, before %.4g degC (%+.2g K)", out.New.Mean, m.old.Mean, out.New.Mean-m.old.Mean),
 	}
