@@ -2,6 +2,7 @@ package translate
 
 import (
 	"fmt"
+	"math"
 
 	"makebreak/survey"
 	"makebreak/translate/switching"
@@ -76,7 +77,48 @@ func (b *builder) cycle(c *survey.Control) *ControlCycle {
 		return k
 	}
 	b.contactLife(l, k.New)
+	b.cycleTolerances(c, k.New)
 	return k
+}
+
+// cycleTolerances works out how far a sound new control may be from its cycle:
+// high and low by the worst error of its chain at that edge, on and off by what
+// they change when both edges are off by that, the same way or against each
+// other by a count.
+func (b *builder) cycleTolerances(c *survey.Control, s Side) {
+	worst := map[string]float64{}
+	for _, x := range b.spec.Budgets {
+		if x.Control == c.ID.V {
+			worst[x.Edge] = x.WorstCase
+		}
+	}
+	t := b.spec.Thresholds[c.ID.V]
+	makes, breaks := worst["make"], worst["break"]
+	if makes == 0 || breaks == 0 {
+		return
+	}
+	on, off := 0.0, 0.0
+	for _, sign := range []float64{-1, 1} {
+		for _, count := range []float64{-1, 0, 1} {
+			l := s.Loop
+			l.Switching.Make += sign * makes
+			l.Switching.Break += sign*breaks + count*t.Break.CountWidth
+			f, err := l.Steady()
+			if err != nil {
+				return
+			}
+			on, off = math.Max(on, math.Abs(f.On-s.Figures.On)), math.Max(off, math.Abs(f.Off-s.Figures.Off))
+		}
+	}
+	high, low := breaks, makes
+	if b.model.Process.Cooling() {
+		high, low = low, high
+	}
+	fs, path := &b.spec.Figures, b.model.Path
+	fs.add(c.ID.V, "on_s_tolerance", on, "s", path, "change of the on time with both edges off by the worst error of the chain, and by a count against each other; the process taken as it stands")
+	fs.add(c.ID.V, "off_s_tolerance", off, "s", path, "the same for the off time")
+	fs.add(c.ID.V, "high_tolerance", high, "K", path, "worst error of the chain at that edge")
+	fs.add(c.ID.V, "low_tolerance", low, "K", path, "worst error of the chain at that edge")
 }
 
 // oldLoop is the old control on its process; reason says what is missing.

@@ -38,13 +38,15 @@ var tolerances = [...]float64{0.125, 0.25, 0.5}
 // not: where the kept thing costs more than the contact lives for, the nearest
 // control that does not is worked out beside it, for somebody to choose.
 func (b *builder) match(c *survey.Control, chain *sensing.Chain) {
-	l := b.driven(c)
-	if !cycles(c) || l == nil || continuous(c) {
+	if !cycles(c) || continuous(c) {
 		return
 	}
-	fs, from, keep := &b.spec.Figures, c.Match.Path, thermal.Keep(c.Match.V)
+	l, fs, from, keep := b.driven(c), &b.spec.Figures, c.Match.Path, thermal.Keep(c.Match.V)
 	asked := Match{Keep: keep, Make: c.MakesAt.V, Break: c.BreaksAt.V}
-	r, reason := b.matchRequest(c, chain, keep)
+	r, reason := thermal.MatchRequest{}, "its load is not one that the sheet says drives the process"
+	if l != nil {
+		r, reason = b.matchRequest(c, chain, keep)
+	}
 	if reason == "" {
 		found, err := thermal.Match(r)
 		if err == nil {
@@ -66,12 +68,44 @@ func (b *builder) matchRequest(c *survey.Control, chain *sensing.Chain, keep the
 	if reason != "" {
 		return r, reason
 	}
-	low, high := chain.Valid()
+	low, high := b.edgeLimits(c, chain)
 	return thermal.MatchRequest{
 		Old: old, Keep: keep, NewLag: b.sensor(c.Sensor.V).Lag.V, MinOn: c.MinOn.V, MinOff: c.MinOff.V,
 		MinDifferential: 2 * math.Max(chain.CountWidth(c.MakesAt.V), chain.CountWidth(c.BreaksAt.V)),
 		LowestEdge:      thermal.Given(low), HighestEdge: thermal.Given(high),
 	}, ""
+}
+
+// edgeLimits are how low and how high a new threshold may lie: inside what the
+// probe can be believed in, short of every danger, and short of where a limit
+// that stays might trip, with its tolerance and the worst error of the new
+// chain. The sheet's own thresholds are always allowed; where they are too near
+// to a limit, a finding says so.
+func (b *builder) edgeLimits(c *survey.Control, chain *sensing.Chain) (low, high float64) {
+	low, high = chain.Valid()
+	worst := 0.0
+	if budget, err := chain.Budget(c.BreaksAt.V); err == nil {
+		worst = budget.WorstCase
+	}
+	for _, d := range b.survey.Dangers {
+		if d.Above.Set {
+			high = math.Min(high, d.Above.V-worst)
+		}
+		if d.Below.Set {
+			low = math.Max(low, d.Below.V+worst)
+		}
+	}
+	load := b.driven(c)
+	for _, x := range b.survey.Controls {
+		switch {
+		case x == c || !x.Switching() || !x.BreaksAt.Set || x.Duty.V == survey.Operating, x.Plan.V != survey.Replace && !x.Cuts.Has(load.ID.V):
+		case x.Action.V == survey.BreaksOnRise:
+			high = math.Min(high, x.BreaksAt.V-x.Tolerance.V-worst)
+		default:
+			low = math.Max(low, x.BreaksAt.V+x.Tolerance.V+worst)
+		}
+	}
+	return math.Min(low, math.Min(c.MakesAt.V, c.BreaksAt.V)), math.Max(high, math.Max(c.MakesAt.V, c.BreaksAt.V))
 }
 
 // matched notes the new control that was found, and the nearest one that the
@@ -116,15 +150,18 @@ func (b *builder) nearest(c *survey.Control, l *survey.Load, r thermal.MatchRequ
 		return
 	}
 	r.MostOperations = life.Value / leastYears
+	fs, from := &b.spec.Figures, c.Match.Path
+	fs.add(c.ID.V, "operations_over_budget", found.New.OperationsPerYear/r.MostOperations, "", from,
+		fmt.Sprintf("%.0f operations a year over the %.0f with which the contact lives for %d years", found.New.OperationsPerYear, r.MostOperations, leastYears))
 	if found.New.OperationsPerYear <= r.MostOperations {
 		return
 	}
-	fs, from := &b.spec.Figures, c.Match.Path
 	near, err := thermal.Match(r)
 	if err != nil || near.New.OperationsPerYear > r.MostOperations*(1+1e-6) {
 		fs.open(c.ID.V, "nearest_software_lag", "s", from, fmt.Sprintf("no software lag brings it to the %.0f operations a year that the contact's life allows", r.MostOperations))
 		return
 	}
+	near.Because += fmt.Sprintf(", with which the medium swings by %s", Kelvins(near.New.Swing()))
 	fs.add(c.ID.V, "nearest_software_lag", near.Filter, "s", from, near.Because)
 	fs.add(c.ID.V, "nearest_operations_per_year", near.New.OperationsPerYear, "1/year", from, near.Because)
 	fs.add(c.ID.V, "nearest_swing", near.New.Swing(), "K", from, near.Because)

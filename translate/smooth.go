@@ -38,7 +38,7 @@ func (b *builder) smoothed(c *survey.Control, p *Probe) (reads *logic.Var, scale
 		Name: b.name(id, "smoothed"), What: fmt.Sprintf("reading behind a lag of %s, in parts of a count", Span(f.Lag)), Kind: logic.Int,
 		Range: logic.Range{Lo: p.Low * f.Scale, Hi: p.High * f.Scale}, Start: p.Low * f.Scale,
 	})
-	parts := &logic.Var{Name: b.name(id, "parts"), What: "reading in parts of a count", Kind: logic.Int, Range: y.Range}
+	parts := &logic.Var{Name: b.name(id, "parts"), What: "reading in parts of a count", Kind: logic.Int, Range: y.Range, Start: y.Start}
 	b.add(
 		&logic.Define{Var: parts, As: logic.Mul(logic.Clamp(logic.Use(p.Value), logic.C(p.lowest), logic.C(p.highest)), logic.C(one))},
 		&logic.Set{Var: y, To: logic.Select(p.failed(), logic.Use(parts), logic.Toward(logic.Prev(y), logic.Use(parts), logic.C(divisor))),

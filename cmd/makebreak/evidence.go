@@ -28,11 +28,7 @@ func evidence(sheet string, s *survey.Survey) ([]translate.Option, survey.Diagno
 			Summary: summary, Found: log.V, Fits: fits,
 		}}
 	}
-	name := filepath.FromSlash(log.V)
-	if !filepath.IsLocal(name) {
-		return wrong("the log must lie beside the sheet or below", "a path without .. that does not begin at the root")
-	}
-	data, err := readBelow(filepath.Dir(sheet), name)
+	data, err := readBelow(filepath.Dir(sheet), filepath.FromSlash(log.V))
 	switch {
 	case errors.Is(err, errTooLarge):
 		return wrong(err.Error(), "a log thinned out to fewer rows")
