@@ -20,6 +20,12 @@ type builder struct {
 	taken  map[string]bool
 	diags  survey.Diagnostics
 	flags  []logic.Flag
+
+	log        *logFile // what process.log names, where it was handed in
+	model      *Model   // nil: noModel says why
+	noModel    string
+	oldLag     float64 // s, of the old element as the observed cycle allows it
+	oldLagFrom string
 }
 
 func newBuilder(spec *Specification) *builder {

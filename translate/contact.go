@@ -28,7 +28,8 @@ type Contact struct {
 	// PID is set where the contact is that of a time-proportioned control.
 	PID *Regulator
 
-	mark *logic.Expr // the set point in steps of the reading
+	smoothed *logic.Var  // the reading behind its software lag
+	mark     *logic.Expr // the set point in steps of the reading
 }
 
 // edge is a threshold of a contact, in counts.
@@ -39,11 +40,14 @@ type edge struct {
 }
 
 // reached is true where the temperature is at or beyond the edge.
-func (e *edge) reached(p *Probe) *logic.Expr {
+func (e *edge) reached(p *Probe) *logic.Expr { return e.reachedBy(p.Value) }
+
+// reachedBy is the same for a reading that is in the units of Const.
+func (e *edge) reachedBy(reading *logic.Var) *logic.Expr {
 	if e.AtLeast {
-		return logic.Ge(logic.Use(p.Value), logic.C(e.Const))
+		return logic.Ge(logic.Use(reading), logic.C(e.Const))
 	}
-	return logic.Le(logic.Use(p.Value), logic.C(e.Const))
+	return logic.Le(logic.Use(reading), logic.C(e.Const))
 }
 
 // acts says which way a control's contact goes when it protects: false where
@@ -93,7 +97,8 @@ func load(s *survey.Survey, id string) *survey.Load {
 // contact builds a two-position control that resets itself.
 func (b *builder) contact(c *survey.Control, p *Probe) *Contact {
 	k := &Contact{Control: c, Probe: p, Acts: acts(b.survey, c.ID.V)}
-	k.Make, k.Break = b.edges(c, p, k.Acts)
+	reads, scale := b.smoothed(c, p)
+	k.Make, k.Break = b.edges(c, p, k.Acts, scale)
 	start := contactOpen
 	if k.Acts {
 		start = contactMade
@@ -105,9 +110,10 @@ func (b *builder) contact(c *survey.Control, p *Probe) *Contact {
 	// Towards the side that the contact protects, any reading will do and a
 	// failed probe forces it; away from it, only a good probe counts.
 	k.Dial, k.Anticipator = b.dial(c, p), b.anticipator(c, p, k.State)
+	makes, breaks := b.wanted(c)
 	at, rising := c.DialMark().V, c.Action.V == survey.BreaksOnRise
-	toMade := b.reached(k, k.Make, "make", c.MakesAt.V-at, !rising)
-	toOpen := b.reached(k, k.Break, "break", c.BreaksAt.V-at, rising)
+	toMade := b.reached(k, reads, scale, k.Make, "make", makes-at, !rising)
+	toOpen := b.reached(k, reads, scale, k.Break, "break", breaks-at, rising)
 	whyMade, whyOpen := "temperature has reached the make", "temperature has reached the break"
 	if k.Acts {
 		toMade = logic.Or(p.failed(), toMade)

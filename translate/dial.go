@@ -32,9 +32,10 @@ type Dial struct {
 }
 
 // dialEdges gives the lowest and the highest edge that the dial can ask for.
-func dialEdges(c *survey.Control) (low, high float64) {
+func (b *builder) dialEdges(c *survey.Control) (low, high float64) {
 	at := c.DialMark().V
-	lower, upper := math.Min(c.MakesAt.V, c.BreaksAt.V), math.Max(c.MakesAt.V, c.BreaksAt.V)
+	makes, breaks := b.wanted(c)
+	lower, upper := math.Min(makes, breaks), math.Max(makes, breaks)
 	return c.Dial.V[0] + lower - at, c.Dial.V[1] + upper - at
 }
 
@@ -43,7 +44,7 @@ func (b *builder) dialFigures(c *survey.Control, chain *sensing.Chain) {
 	if !c.DialStays() {
 		return
 	}
-	low, high := dialEdges(c)
+	low, high := b.dialEdges(c)
 	for _, t := range []float64{low, high} {
 		if _, err := chain.Threshold(t, sensing.AtOrAbove, sensing.Nearest); err != nil {
 			b.fail(c.Dial.Source, "a stop of the dial cannot be seen by "+c.Sensor.V, err.Error(), "stops inside its range, or another divider")
@@ -112,13 +113,16 @@ func (b *builder) dial(c *survey.Control, p *Probe) *Dial {
 // offset K from the dial's mark. Where the dial is not believed, the edge is
 // that of the sheet. Counts are compared as long as nothing moves the edge or
 // warms the reading.
-func (b *builder) reached(k *Contact, e *edge, name string, offset float64, rising bool) *logic.Expr {
+func (b *builder) reached(k *Contact, reads *logic.Var, scale int64, e *edge, name string, offset float64, rising bool) *logic.Expr {
 	c, p, d, a := k.Control, k.Probe, k.Dial, k.Anticipator
 	if d == nil && a == nil {
-		return e.reached(p)
+		return e.reachedBy(reads)
 	}
 	r := b.reading(p)
-	at, value, sheet := b.mark(k, r), logic.Use(r.Value), e.reached(p)
+	at, value, sheet := b.mark(k, r), logic.Use(r.Value), e.reachedBy(reads)
+	if reads != p.Value {
+		value = logic.Use(b.smoothedReading(k, r, reads, scale))
+	}
 	if a != nil {
 		value = logic.Use(a.Warm)
 	}
@@ -149,13 +153,13 @@ func (b *builder) mark(k *Contact, r Reading) *logic.Expr {
 		return logic.Use(k.Dial.SetPoint)
 	}
 	if k.mark == nil {
-		k.mark = b.wanted(k.Control, k.Dial, r)
+		k.mark = b.aimed(k.Control, k.Dial, r)
 	}
 	return k.mark
 }
 
-// wanted is the set point by a dial that is believed, else that of the sheet.
-func (b *builder) wanted(c *survey.Control, d *Dial, r Reading) *logic.Expr {
+// aimed is the set point by a dial that is believed, else that of the sheet.
+func (b *builder) aimed(c *survey.Control, d *Dial, r Reading) *logic.Expr {
 	at := c.DialMark()
 	k := b.constant(logic.Const{Name: c.ID.V + "_set_point", Value: r.in(at.V), Unit: fmt.Sprintf("%g K", r.Unit), Means: Degrees(at.V), Origin: origin(at.Source), Working: "in steps of the reading"})
 	if d == nil {

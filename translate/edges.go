@@ -43,20 +43,26 @@ func (b *builder) roundingOf(c *survey.Control, acts bool) rounding {
 	return r
 }
 
-// edges brings make and break of a control to counts and declares them.
-func (b *builder) edges(c *survey.Control, p *Probe, acts bool) (makes, breaks *edge) {
+// edges brings make and break of a control to counts and declares them; scale
+// is how many units of the reading one count is, more than 1 behind a software
+// lag.
+func (b *builder) edges(c *survey.Control, p *Probe, acts bool, scale int64) (makes, breaks *edge) {
 	t, ok := b.spec.Thresholds[c.ID.V]
 	if !ok {
 		return &edge{Const: &logic.Const{}}, &edge{Const: &logic.Const{}}
 	}
 	declare := func(h sensing.Threshold, name string, from survey.Source) *edge {
-		k := b.constant(logic.Const{
+		k := logic.Const{
 			Name: c.ID.V + "_" + name, Value: h.Counts, Unit: "counts", Means: Degrees(h.Asked),
-			Origin: origin(from), Working: h.Working,
-		})
-		return &edge{Const: k, AtLeast: h.AtLeast, At: h.SwitchesAt}
+			Origin: origin(from), Working: b.matchWorking(c) + h.Working,
+		}
+		if scale > 1 {
+			k.Value, k.Unit = smoothedEdge(h.Counts, h.AtLeast, scale), fmt.Sprintf("parts of a count, %d each", scale)
+			k.Working += fmt.Sprintf("; its edge, half a count on, in parts: %d", k.Value)
+		}
+		return &edge{Const: b.constant(k), AtLeast: h.AtLeast, At: h.SwitchesAt}
 	}
-	return declare(t.Make, "make", c.MakesAt.Source), declare(t.Break, "break", c.BreaksAt.Source)
+	return declare(t.Make, "make", b.evidence(c, c.MakesAt)), declare(t.Break, "break", b.evidence(c, c.BreaksAt))
 }
 
 // Thresholds are the two edges of a control in counts.
@@ -75,11 +81,12 @@ func (b *builder) thresholds(c *survey.Control, chain *sensing.Chain) (Threshold
 	}
 	t := Thresholds{Why: r.why}
 	var err error
-	if t.Make, err = chain.Threshold(c.MakesAt.V, makeSide, r.makes); err != nil {
+	makes, breaks := b.wanted(c)
+	if t.Make, err = chain.Threshold(makes, makeSide, r.makes); err != nil {
 		b.fail(c.MakesAt.Source, "this threshold cannot be seen by "+c.Sensor.V, err.Error(), "another divider, gain or range of "+c.Sensor.V)
 		return t, false
 	}
-	if t.Break, err = chain.Threshold(c.BreaksAt.V, breakSide, r.breaks); err != nil {
+	if t.Break, err = chain.Threshold(breaks, breakSide, r.breaks); err != nil {
 		b.fail(c.BreaksAt.Source, "this threshold cannot be seen by "+c.Sensor.V, err.Error(), "another divider, gain or range of "+c.Sensor.V)
 		return t, false
 	}

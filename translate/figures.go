@@ -11,18 +11,21 @@ import (
 
 // figures works out everything that has a number before the program is built.
 func (b *builder) figures() {
+	b.identify()
+	b.tunings()
 	for _, c := range b.survey.Controls {
 		b.asked(c)
 		if chain := b.spec.Chains[c.Sensor.V]; chain != nil && b.translated(c) && c.Switching() {
+			b.match(c, chain)
 			b.switching(c, chain)
 		}
 		b.valveFigures(c)
 		b.overshoot(c)
 	}
 	b.margins()
-	b.tunings()
 	b.cycles()
 	b.conversions()
+	b.timesToDanger()
 	b.outputs()
 	b.failures()
 }
@@ -51,8 +54,8 @@ func (b *builder) switching(c *survey.Control, chain *sensing.Chain) {
 		return
 	}
 	b.spec.Thresholds[c.ID.V] = t
-	b.edgeFigures(c, "make", c.MakesAt, t.Make, t.Why)
-	b.edgeFigures(c, "break", c.BreaksAt, t.Break, t.Why)
+	b.edgeFigures(c, "make", b.evidence(c, c.MakesAt), t.Make, t.Why)
+	b.edgeFigures(c, "break", b.evidence(c, c.BreaksAt), t.Break, t.Why)
 	b.advise(c, chain)
 	b.dialFigures(c, chain)
 }
@@ -72,26 +75,26 @@ func (b *builder) advise(c *survey.Control, chain *sensing.Chain) {
 	}
 }
 
-func (b *builder) edgeFigures(c *survey.Control, name string, asked survey.Field[float64], h sensing.Threshold, why string) {
+func (b *builder) edgeFigures(c *survey.Control, name string, from survey.Source, h sensing.Threshold, why string) {
 	fs := &b.spec.Figures
-	fs.add(c.ID.V, name+"_counts", float64(h.Counts), "counts", asked.Path, h.Working+"; "+why)
-	fs.add(c.ID.V, name+"_switches_at", h.SwitchesAt, "degC", asked.Path, h.Working)
+	fs.add(c.ID.V, name+"_counts", float64(h.Counts), "counts", from.Path, h.Working+"; "+why)
+	fs.add(c.ID.V, name+"_switches_at", h.SwitchesAt, "degC", from.Path, h.Working)
 
 	// The first control on a sensor names its edges plainly; a second one says whose they are.
 	about := c.Sensor.V + "/" + name
 	if _, taken := fs.Get(about, "count_width"); taken {
 		about = c.Sensor.V + "/" + c.ID.V + "/" + name
 	}
-	fs.add(about, "count_width", h.CountWidth, "K", asked.Path, "change of temperature for one count at this threshold")
-	budget, err := b.spec.Chains[c.Sensor.V].Budget(asked.V)
+	fs.add(about, "count_width", h.CountWidth, "K", from.Path, "change of temperature for one count at this threshold")
+	budget, err := b.spec.Chains[c.Sensor.V].Budget(h.Asked)
 	if err != nil {
-		fs.open(about, "error_worst", "K", asked.Path, err.Error())
+		fs.open(about, "error_worst", "K", from.Path, err.Error())
 		return
 	}
 	b.spec.Budgets = append(b.spec.Budgets, ErrorBudget{Control: c.ID.V, Sensor: c.Sensor.V, Edge: name, Budget: budget})
 	working := budgetText(budget)
-	fs.add(about, "error_worst", budget.WorstCase, "K", asked.Path, "all causes at their worst, the same way: "+working)
-	fs.add(about, "error_rss", budget.RSS, "K", asked.Path, "root sum of squares, for independent causes: "+working)
+	fs.add(about, "error_worst", budget.WorstCase, "K", from.Path, "all causes at their worst, the same way: "+working)
+	fs.add(about, "error_rss", budget.RSS, "K", from.Path, "root sum of squares, for independent causes: "+working)
 }
 
 func budgetText(b sensing.Budget) string {

@@ -24,7 +24,7 @@ const (
 // reset threshold when the supply returns.
 func (b *builder) latch(c *survey.Control, p *Probe) *Contact {
 	k := &Contact{Control: c, Probe: p, Acts: acts(b.survey, c.ID.V), Latches: true}
-	k.Make, k.Break = b.edges(c, p, k.Acts)
+	k.Make, k.Break = b.edges(c, p, k.Acts, 1)
 	trip, rearm := k.Break, k.Make
 	if k.Acts {
 		trip, rearm = k.Make, k.Break

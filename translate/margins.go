@@ -9,24 +9,44 @@ import (
 	"makebreak/translate/thermal"
 )
 
-// drive is the process at its worst: where it settles with the load on, and how fast.
+// drive is the process at its worst: where it settles with the load on and
+// off, and how fast.
 type drive struct {
-	settles, tau, dead float64
-	from               survey.Source
+	settles, off, tau, dead float64
+	offKnown                bool
+	path                    string
 }
 
 // worstDrive takes the figure that drives furthest from a temperature; reason
-// says what is missing.
-func worstDrive(p survey.Process, from float64) (d drive, reason string) {
+// says what is missing. Where the process was identified and nothing tells
+// where the load settles but the stated worst, the time constant is that with
+// which the rise towards the worst has the measured rate.
+func (b *builder) worstDrive(from float64) (d drive, reason string) {
+	p, m := b.survey.Process, b.model
+	w := p.Worst.SettlesOn
 	switch {
-	case !p.SettlesOn.Set && !p.Worst.SettlesOn.Set:
+	case m != nil && m.Far():
+		d = drive{settles: m.Process.On, off: m.Process.Off, offKnown: true, tau: m.Process.Tau, dead: m.Process.Dead, path: m.Path}
+		if p.SettlesOn.Set {
+			d.path = p.SettlesOn.Path
+		}
+		if w.Set && math.Abs(w.V-from) > math.Abs(d.settles-from) {
+			d.settles, d.path = w.V, w.Path
+		}
+	case m != nil && w.Set && (w.V-m.At)*m.RateOn.Value > 0:
+		d = drive{settles: w.V, tau: (w.V - m.At) / m.RateOn.Value, dead: m.Process.Dead, path: w.Path}
+		d.off, d.offKnown = m.At+m.RateOff.Value*d.tau, true
+	case m != nil:
+		return d, "not determined: where the load would settle does not follow from " + m.Path + ", and worst is not on the sheet"
+	case !p.SettlesOn.Set && !w.Set:
 		return d, "not determined: where the process settles with the load on is not on the sheet"
 	case !p.TimeConstant.Set:
 		return d, "not determined: the time constant of the process is not on the sheet"
-	}
-	d = drive{settles: p.SettlesOn.V, tau: p.TimeConstant.V, dead: p.DeadTime.V, from: p.SettlesOn.Source}
-	if w := p.Worst.SettlesOn; w.Set && (!p.SettlesOn.Set || math.Abs(w.V-from) > math.Abs(d.settles-from)) {
-		d.settles, d.from = w.V, w.Source
+	default:
+		d = drive{settles: p.SettlesOn.V, off: p.SettlesOff.V, offKnown: p.SettlesOff.Set, tau: p.TimeConstant.V, dead: p.DeadTime.V, path: p.SettlesOn.Path}
+		if w.Set && (!p.SettlesOn.Set || math.Abs(w.V-from) > math.Abs(d.settles-from)) {
+			d.settles, d.path = w.V, w.Path
+		}
 	}
 	return d, ""
 }
@@ -43,22 +63,23 @@ func (b *builder) overshoot(c *survey.Control) {
 		return
 	}
 	const name = "overshoot_after_cut"
-	fs, pr, at := &b.spec.Figures, b.survey.Process, c.BreaksAt
+	fs, at := &b.spec.Figures, c.BreaksAt
 	open := func(path, reason string) { fs.open(c.ID.V, name, "K", path, "not determined: "+reason) }
 	if !at.Set {
 		open(at.Path, "the temperature at which it acts is not on the sheet")
 		return
 	}
-	d, reason := worstDrive(pr, at.V)
+	d, reason := b.worstDrive(at.V)
 	if reason != "" {
-		fs.open(c.ID.V, name, "K", "process", reason)
+		fs.open(c.ID.V, name, "K", theProcess, reason)
+		b.overshootBound(c)
 		return
 	}
 	if (c.Action.V == survey.BreaksOnRise) != (d.settles > at.V) {
-		fs.add(c.ID.V, name, 0, "K", d.from.Path, "the load does not drive beyond this limit: it settles at "+Degrees(d.settles))
+		fs.add(c.ID.V, name, 0, "K", d.path, "the load does not drive beyond this limit: it settles at "+Degrees(d.settles))
 		return
 	}
-	if !pr.SettlesOff.Set || (pr.SettlesOff.V < at.V) != (d.settles > at.V) {
+	if !d.offKnown || (d.off < at.V) != (d.settles > at.V) {
 		open("process.settles_off", "where the process comes from is not on the sheet, or lies beyond the limit")
 		return
 	}
@@ -68,17 +89,31 @@ func (b *builder) overshoot(c *survey.Control) {
 		return
 	}
 	o, err := thermal.Cut{
-		Process: thermal.Process{On: d.settles, Off: pr.SettlesOff.V, Tau: d.tau, Dead: d.dead},
-		Sensing: thermal.Sensing{Lag: lag}, Trip: at.V, From: pr.SettlesOff.V,
+		Process: thermal.Process{On: d.settles, Off: d.off, Tau: d.tau, Dead: d.dead},
+		Sensing: thermal.Sensing{Lag: lag}, Trip: at.V, From: d.off,
 	}.Overshoot()
 	switch {
 	case err != nil:
-		open(d.from.Path, err.Error())
+		open(d.path, err.Error())
 	case o.Outcome != thermal.Reached:
-		open(d.from.Path, o.Because)
+		open(d.path, o.Because)
 	default:
-		fs.add(c.ID.V, name, o.Beyond, "K", d.from.Path, fmt.Sprintf("load on for good, settling at %s, time constant %s; lag %s (%s): %s",
+		fs.add(c.ID.V, name, o.Beyond, "K", d.path, fmt.Sprintf("load on for good, settling at %s, time constant %s; lag %s (%s): %s",
 			Degrees(d.settles), Span(d.tau), Span(lag), lagFrom, o.Because))
+	}
+}
+
+// overshootBound notes what the measured rise says about an overshoot where it
+// is not known where the load settles.
+func (b *builder) overshootBound(c *survey.Control) {
+	m := b.model
+	lag, lagFrom, ok := b.elementLag(c)
+	if m == nil || !ok || math.IsNaN(m.FastestOn) || (m.FastestOn > 0) != (c.Action.V == survey.BreaksOnRise) {
+		return
+	}
+	o, err := thermal.OvershootOfRise(m.FastestOn, lag, m.Process.Dead, c.BreaksAt.V, b.vented())
+	if err == nil {
+		b.spec.Figures.add(c.ID.V, "overshoot_as_measured", o.Beyond, "K", m.Path, fmt.Sprintf("%s; lag from %s", o.Because, lagFrom))
 	}
 }
 
@@ -118,20 +153,20 @@ func (b *builder) margins() {
 
 func (b *builder) margin(x *survey.Danger, limit survey.Field[float64], c *survey.Control) {
 	fs := &b.spec.Figures
-	edge := c.BreaksAt
+	makes, edge := b.wanted(c)
 	if x.Below.Set == (c.Action.V == survey.BreaksOnRise) {
-		edge = c.MakesAt
+		edge = makes
 	}
-	fs.add(x.ID.V, "margin_to_danger", math.Abs(limit.V-edge.V), "K", limit.Path, fmt.Sprintf("from %s of %s to %s", Degrees(edge.V), c.ID.V, Degrees(limit.V)))
-	d, reason := worstDrive(b.survey.Process, edge.V)
+	fs.add(x.ID.V, "margin_to_danger", math.Abs(limit.V-edge), "K", limit.Path, fmt.Sprintf("from %s of %s to %s", Degrees(edge), c.ID.V, Degrees(limit.V)))
+	d, reason := b.worstDrive(edge)
 	if reason != "" {
-		fs.open(x.ID.V, "rise_before_fault", "K", "process", reason)
+		fs.open(x.ID.V, "rise_before_fault", "K", theProcess, reason)
 		return
 	}
 	s := b.sensor(c.Sensor.V)
 	wait := s.FaultAfter.V + 3*b.step + s.Lag.V + d.dead
-	fs.add(x.ID.V, "rise_before_fault", math.Abs(d.slope(edge.V))*wait, "K", d.from.Path,
-		fmt.Sprintf("|%s − %s| / %s × (fault_after %s + three steps + lag %s + dead time %s)", Degrees(d.settles), Degrees(edge.V), Span(d.tau), Span(s.FaultAfter.V), Span(s.Lag.V), Span(d.dead)))
+	fs.add(x.ID.V, "rise_before_fault", math.Abs(d.slope(edge))*wait, "K", d.path,
+		fmt.Sprintf("|%s − %s| / %s × (fault_after %s + three steps + lag %s + dead time %s)", Degrees(d.settles), Degrees(edge), Span(d.tau), Span(s.FaultAfter.V), Span(s.Lag.V), Span(d.dead)))
 }
 
 func (b *builder) sensor(id string) *survey.Sensor {

@@ -89,7 +89,7 @@ func (b *builder) pid(c *survey.Control, p *Probe, t Tuning) *Regulator {
 	due := b.local(b.name(id, "due"), c.What.V+": a new output is due", logic.And(logic.Use(running), logic.Eq(logic.Use(at), logic.Lit(0))))
 
 	g.Dial = b.dial(c, p)
-	setPoint := b.wanted(c, g.Dial, r)
+	setPoint := b.aimed(c, g.Dial, r)
 	deviation := logic.Sub(setPoint, logic.Use(r.Value))
 	if c.Cools() { // more output where it is too warm
 		deviation = logic.Sub(logic.Use(r.Value), setPoint)

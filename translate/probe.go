@@ -18,14 +18,15 @@ const (
 
 // Probe is a sensor in the program: how its readings are believed.
 type Probe struct {
-	Sensor *survey.Sensor
-	Raw    *logic.Var // the input
-	Bad    *logic.Var // this raw sample is outside what can be believed
-	State  *logic.Var // proving, good, suspect, faulty
-	Proven *logic.Var // has been good since the last start
-	Value  *logic.Var // median of the last three believable samples
-	Low    int64      // lowest and highest believable count
-	High   int64
+	Sensor          *survey.Sensor
+	Raw             *logic.Var // the input
+	Bad             *logic.Var // this raw sample is outside what can be believed
+	State           *logic.Var // proving, good, suspect, faulty
+	Proven          *logic.Var // has been good since the last start
+	Value           *logic.Var // median of the last three believable samples
+	Low             int64      // lowest and highest believable count
+	High            int64
+	lowest, highest *logic.Const // the same, as the program has them
 
 	Cold    *Probe   // measures its cold junction, or nil
 	reading *Reading // its temperature, once something has asked for it
@@ -88,6 +89,7 @@ func (b *builder) probe(s *survey.Sensor) *Probe {
 	p.Raw = b.input(raw)
 	low := b.constant(b.edge(id+"_lowest", p.Low, s, "lowest believable count"))
 	high := b.constant(b.edge(id+"_highest", p.High, s, "highest believable count"))
+	p.lowest, p.highest = low, high
 	p.Bad = b.local(b.name(id, "bad"), what+": this sample cannot be believed",
 		logic.Or(logic.Lt(logic.Use(p.Raw), logic.C(low)), logic.Gt(logic.Use(p.Raw), logic.C(high))))
 

@@ -17,6 +17,7 @@ type Reading struct {
 	Unit  float64 // K for one whole step
 	Low   int64   // what the reading can be: it stays there beyond the table
 	High  int64
+	table *logic.Table
 }
 
 // in brings a temperature, or a difference, to whole steps.
@@ -88,21 +89,22 @@ func (b *builder) spanOf(s *survey.Sensor) (need span, any bool) {
 
 // spanFor is the span of temperature that a control needs, where it needs one.
 func (b *builder) spanFor(c *survey.Control) (span, bool) {
-	t, continuous := b.settingsOf(c.ID.V)
 	switch {
 	case c.Action.V == survey.Indicates:
 		low, high := b.spec.Chains[c.Sensor.V].Valid()
 		return span{low, high}, true
-	case wantsPID(c) && continuous:
+	case b.continuous(c):
+		t, _ := b.settingsOf(c.ID.V)
 		return pidSpan(c, t), true
 	case c.Modulating():
 		low, high := band(c)
 		return span{low - roomAround, high + roomAround}, true
 	case c.DialStays():
-		low, high := dialEdges(c)
+		low, high := b.dialEdges(c)
 		return span{low - roomAround - known(c.Anticipator.Rise), high + roomAround}, true
 	case anticipates(c):
-		low, high := math.Min(c.MakesAt.V, c.BreaksAt.V), math.Max(c.MakesAt.V, c.BreaksAt.V)
+		makes, breaks := b.wanted(c)
+		low, high := math.Min(makes, breaks), math.Max(makes, breaks)
 		return span{low - roomAround - c.Anticipator.Rise.V, high + roomAround}, true
 	}
 	return span{}, false
@@ -174,7 +176,7 @@ func (b *builder) reading(p *Probe) Reading {
 		t := c.table
 		t.Name = b.name(t.Name)
 		b.prog.Tables = append(b.prog.Tables, t)
-		r := Reading{Unit: c.Unit, Low: min(t.Y[0], t.Y[len(t.Y)-1]), High: max(t.Y[0], t.Y[len(t.Y)-1])}
+		r := Reading{Unit: c.Unit, table: t, Low: min(t.Y[0], t.Y[len(t.Y)-1]), High: max(t.Y[0], t.Y[len(t.Y)-1])}
 		r.Value = &logic.Var{Name: b.name(id, "reading"), What: t.What + " in steps of " + t.Unit, Kind: logic.Int, Range: logic.Range{Lo: r.Low, Hi: r.High}, Start: r.Low}
 		b.add(&logic.Define{Var: r.Value, As: logic.Lookup(t, logic.Use(p.Value))})
 		p.reading = &r

@@ -61,7 +61,7 @@ func loadSpec(t testing.TB, sheet string) *translate.Specification {
 	if diags.HasErrors() {
 		t.Fatalf("%s does not load:\n%v", sheet, diags)
 	}
-	spec, diags := translate.Translate(s)
+	spec, diags := translate.Translate(s, withLog(t, sheet, s)...)
 	if diags.HasErrors() {
 		t.Fatalf("%s does not translate:\n%v", sheet, diags)
 	}

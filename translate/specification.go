@@ -35,6 +35,9 @@ type Specification struct {
 	Stages []Stage
 	// Junctions are the thermocouples whose cold junction is measured, by sensor.
 	Junctions map[string]*Junction
+	Model     *Model           // how the process behaves; nil where nothing tells
+	Matches   map[string]Match // how translated operating controls were matched, by control
+	Cycles    []*ControlCycle  // of the operating two-position controls, in the order of the sheet
 }
 
 // ErrorBudget is the error of a sensor at one edge of one control.

@@ -85,11 +85,10 @@ type effect struct {
 }
 
 // effect works out what a load must do to the temperature of the operating
-// control that runs it, from the figures of the process. Without such figures,
+// control that runs it, from what is known of the process. Where nothing is,
 // or where the load could never reach the break, there is nothing to expect.
 func (b *builder) effect(s *Switched) (effect, bool) {
-	pr := b.survey.Process
-	if !drives(b.survey, s.Load.ID.V) || !pr.SettlesOn.Set || !pr.TimeConstant.Set {
+	if !drives(b.survey, s.Load.ID.V) || b.model == nil {
 		return effect{}, false
 	}
 	for _, n := range s.Load.RunsWhen.V.Tree.Names() {
@@ -97,27 +96,33 @@ func (b *builder) effect(s *Switched) (effect, bool) {
 		if k == nil || k.Latches || k.Control.Duty.V != survey.Operating {
 			continue
 		}
-		return b.slowest(k, pr)
+		return b.slowest(k)
 	}
 	return effect{}, false
 }
 
 // slowest takes the slowest of the figures given: at the edge where the load
 // goes off, the temperature moves at (settles − edge)/τ (first-order process).
-func (b *builder) slowest(k *Contact, pr survey.Process) (effect, bool) {
-	edge, heats := k.Control.BreaksAt.V, k.Control.Action.V == survey.BreaksOnRise
+func (b *builder) slowest(k *Contact) (effect, bool) {
+	m := b.model
+	makes, edge := b.wanted(k.Control)
+	differential := math.Abs(edge - makes)
+	heats := k.Control.Action.V == survey.BreaksOnRise
 	if k.Dial != nil { // the stop where the load does least
-		low, high := dialEdges(k.Control)
+		low, high := b.dialEdges(k.Control)
 		edge = low
 		if heats {
 			edge = high
 		}
 	}
-	settles := pr.SettlesOn
-	if pr.Worst.SettlesOn.Set && (pr.Worst.SettlesOn.V < settles.V) == heats {
-		settles = pr.Worst.SettlesOn
+	settles, from := m.Process.On, b.survey.Process.SettlesOn.Source
+	if !m.Far() {
+		from = survey.Source{Path: m.Path}
 	}
-	drive := settles.V - edge
+	if w := b.survey.Process.Worst.SettlesOn; m.Far() && w.Set && (w.V < settles) == heats {
+		settles, from = w.V, w.Source
+	}
+	drive := settles - edge
 	if !heats {
 		drive = -drive
 	}
@@ -125,22 +130,22 @@ func (b *builder) slowest(k *Contact, pr survey.Process) (effect, bool) {
 		return effect{}, false
 	}
 	chain := b.spec.Chains[k.Probe.Sensor.ID.V]
-	e := effect{probe: k.Probe, from: settles.Source}
-	e.kelvin = effectShare * math.Abs(k.Control.BreaksAt.V-k.Control.MakesAt.V)
+	e := effect{probe: k.Probe, from: from}
+	e.kelvin = effectShare * differential
 	e.countsFall = chain.Rising() != heats
 	width := chain.CountWidth(edge)
 	if k.Dial != nil {
-		low, high := dialEdges(k.Control)
+		low, high := b.dialEdges(k.Control)
 		width = math.Max(chain.CountWidth(low), chain.CountWidth(high))
 	}
 	e.counts = max(int64(math.Floor(e.kelvin/width)), 2)
 	e.kelvin = float64(e.counts) * width
 	// Through the last e.kelvin before the edge, where the drive is least.
-	answer := pr.TimeConstant.V * math.Log((drive+e.kelvin)/drive)
-	delay := pr.DeadTime.V + k.Probe.Sensor.Lag.V
+	answer := m.Process.Tau * math.Log((drive+e.kelvin)/drive)
+	delay := m.Process.Dead + k.Probe.Sensor.Lag.V
 	e.within = slack * (answer + delay)
 	e.working = fmt.Sprintf("%s times the slowest expected answer: %s × ln((%s + %s)/%s) = %s, and %s of dead time and lag",
-		number(slack, 1), Span(pr.TimeConstant.V), Kelvins(drive), Kelvins(e.kelvin), Kelvins(drive), Span(answer), Span(delay))
+		number(slack, 1), Span(m.Process.Tau), Kelvins(drive), Kelvins(e.kelvin), Kelvins(drive), Span(answer), Span(delay))
 	return e, true
 }
 

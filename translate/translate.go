@@ -11,11 +11,14 @@ import (
 
 // Translate works out the specification of the new control. Diagnostics name
 // what in the sheet stands in the way; the specification is returned as far as
-// it goes. Program is nil where any diagnostic is an error, or where nothing
+// it goes. Options hand in what the sheet only names. Program is nil where any diagnostic is an error, or where nothing
 // in the sheet is to be replaced.
-func Translate(s *survey.Survey) (*Specification, survey.Diagnostics) {
-	spec := &Specification{Survey: s, Chains: map[string]*sensing.Chain{}, Thresholds: map[string]Thresholds{}, Junctions: map[string]*Junction{}}
+func Translate(s *survey.Survey, with ...Option) (*Specification, survey.Diagnostics) {
+	spec := &Specification{Survey: s, Chains: map[string]*sensing.Chain{}, Thresholds: map[string]Thresholds{}, Junctions: map[string]*Junction{}, Matches: map[string]Match{}}
 	b := newBuilder(spec)
+	for _, option := range with {
+		option(b)
+	}
 	cat, err := catalogue.Load()
 	if err != nil {
 		b.fail(survey.Source{}, "the catalogue does not load", err.Error(), "a sound build of this program")
@@ -149,7 +152,7 @@ func (b *builder) control(c *survey.Control, w *wiring) {
 	case c.Action.V == survey.Indicates:
 		b.plan.Indications[id] = b.indication(c, p)
 		return
-	case wantsPID(c) && b.continuous(c):
+	case b.continuous(c):
 		t, _ := b.settingsOf(id)
 		g := b.pid(c, p, t)
 		if g == nil {
@@ -178,11 +181,11 @@ func (b *builder) control(c *survey.Control, w *wiring) {
 	w.known[id] = logic.Use(made)
 }
 
-// continuous reports whether there are settings for a control that wants to be
-// continuous.
+// continuous reports whether a control becomes a PID control: it is wanted, and
+// there are settings for it.
 func (b *builder) continuous(c *survey.Control) bool {
 	_, ok := b.settingsOf(c.ID.V)
-	return ok
+	return ok && wantsPID(c)
 }
 
 // prune takes out what was worked out for a step and is read by nothing, such

@@ -1,6 +1,7 @@
 package translate
 
 import (
+	"errors"
 	"fmt"
 	"math"
 	"slices"
@@ -75,17 +76,18 @@ func (b *builder) tunings() {
 	}
 }
 
-// transfer is the process as the new control of c sees it.
+// transfer is the process as the new control of c sees it: the dead time is
+// that of the process, without the lag of the old element, and the lag of the
+// new probe is put in. Identified from a cycle it is integrating.
 func (b *builder) transfer(c *survey.Control) (tr thermal.Transfer, from string, err error) {
-	p := b.survey.Process
-	if !p.SettlesOn.Set || !p.SettlesOff.Set || !p.TimeConstant.Set {
-		return tr, "process", fmt.Errorf("settles_on, settles_off and time_constant of the process are not all on the sheet")
+	m := b.model
+	if m == nil {
+		return tr, theProcess, errors.New(b.noModel)
 	}
-	process := thermal.Process{On: p.SettlesOn.V, Off: p.SettlesOff.V, Tau: p.TimeConstant.V, Dead: p.DeadTime.V}
-	if process.Cooling() != c.Cools() {
-		return tr, "process", fmt.Errorf("the process moves the other way: it settles at %s with the load on and %s with it off", Degrees(process.On), Degrees(process.Off))
+	if m.Process.Cooling() != c.Cools() {
+		return tr, m.Path, fmt.Errorf("the process moves the other way: it settles at %s with the load on and %s with it off", Degrees(m.Process.On), Degrees(m.Process.Off))
 	}
-	return process.Transfer(thermal.Sensing{Lag: b.sensor(c.Sensor.V).Lag.V}), "process", nil
+	return m.Transfer(thermal.Sensing{Lag: b.sensor(c.Sensor.V).Lag.V}), m.Path, nil
 }
 
 // choose takes SIMC: with derivative only where the second lag is longer than
@@ -188,7 +190,8 @@ func wantsPID(c *survey.Control) bool {
 
 // held says what a PID control does where a two-position one cycles: how far
 // it lets the temperature go, and how often it switches.
-func (b *builder) held(c *survey.Control, l *survey.Load, t Tuning) {
+func (b *builder) held(c *survey.Control, l *survey.Load) {
+	t, _ := b.settingsOf(c.ID.V)
 	fs, at := &b.spec.Figures, c.Want.Path
 	away := t.Chosen.Response.Disturbed
 	working := fmt.Sprintf("set point %s, and %s after the load has taken or given a tenth of the output: %s on the process, by simulation", Degrees(c.DialMark().V), Kelvins(away), t.Chosen.Name)
@@ -196,7 +199,7 @@ func (b *builder) held(c *survey.Control, l *survey.Load, t Tuning) {
 	fs.add(c.ID.V, "low", c.DialMark().V-away, "degC", at, working)
 	fs.add(c.ID.V, "mean", c.DialMark().V, "degC", at, "integral action leaves no lasting offset")
 	if t.Window > 0 {
-		b.contactLife(c, l, t.Window, "process; one operation in every window, at most")
+		b.contactLifeAt(l, t.Window, 0, "process; one operation in every window, at most")
 	}
 }
 

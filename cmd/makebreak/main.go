@@ -84,6 +84,7 @@ licensed person decide.`,
 		newTranslate(out, errw),
 		newCodegen(out, errw),
 		newRisks(out, errw),
+		newCycle(out, errw),
 	)
 	return root
 }

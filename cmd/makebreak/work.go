@@ -91,7 +91,11 @@ func translateSheet(file string, errw io.Writer) (*translate.Specification, erro
 	if err != nil {
 		return nil, err
 	}
-	spec, diags := translate.Translate(s)
+	with, diags := evidence(file, s)
+	if err := say(diags, errw); err != nil {
+		return nil, err
+	}
+	spec, diags := translate.Translate(s, with...)
 	return spec, say(diags, errw)
 }
 

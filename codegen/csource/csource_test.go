@@ -442,7 +442,15 @@ func sourceOf(t testing.TB, sheet string) csource.Source {
 	if diags.HasErrors() {
 		t.Fatalf("%s: %v", sheet, diags)
 	}
-	spec, diags := translate.Translate(s)
+	var with []translate.Option
+	if s.Process.Log.Set {
+		log, err := os.ReadFile(filepath.Join(filepath.Dir(sheet), s.Process.Log.V))
+		if err != nil {
+			t.Fatal(err)
+		}
+		with = append(with, translate.WithLog(s.Process.Log.V, log))
+	}
+	spec, diags := translate.Translate(s, with...)
 	if diags.HasErrors() || spec.Program == nil {
 		t.Fatalf("%s: no program: %v", sheet, diags)
 	}

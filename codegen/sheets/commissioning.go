@@ -60,6 +60,7 @@ func checks(spec *translate.Specification, a *risk.Assessment) []check {
 	cs = append(cs, regulators(spec)...)
 	cs = append(cs, indications(spec)...)
 	cs = append(cs, loads(spec)...)
+	cs = append(cs, runs(spec)...)
 	return append(cs, clocks(spec)...)
 }
 
@@ -140,6 +141,33 @@ func budgeted(spec *translate.Specification, control, edge string) string {
 		}
 	}
 	return ""
+}
+
+// runs says how the plant has to cycle once the program is in charge.
+func runs(spec *translate.Specification) []check {
+	var cs []check
+	for _, k := range spec.Cycles {
+		id := k.Control.ID.V
+		if spec.Plan.Contacts[id] == nil {
+			continue
+		}
+		const do = "let the plant settle, then take two cycles or more with a stopwatch, and a reference thermometer in the medium"
+		if k.New.Why != "" {
+			cs = append(cs, check{id, do, "write down on, off, high and low; no cycle was predicted: " + k.New.Why})
+			continue
+		}
+		f := k.New.Figures
+		give := func(name string, print func(float64) string) string {
+			if v, ok := spec.Figures.Value(id, name); ok {
+				return " ± " + print(v)
+			}
+			return ""
+		}
+		cs = append(cs, check{id, do, fmt.Sprintf("on %s%s, off %s%s, period %s; high %s%s, low %s%s. At the demand of the sheet: another ambient or a draw-off changes on and off, and hardly the swing",
+			span(f.On), give("on_s_tolerance", span), span(f.Off), give("off_s_tolerance", span), span(f.Period()),
+			degrees(f.High), give("high_tolerance", kelvins), degrees(f.Low), give("low_tolerance", kelvins))})
+	}
+	return cs
 }
 
 func latches(spec *translate.Specification, c *survey.Control, k *translate.Contact) []check {

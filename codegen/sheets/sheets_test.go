@@ -93,7 +93,7 @@ func TestCommissioning(t *testing.T) {
 	for _, c := range checks(spec, &risk.Assessment{}) {
 		parts = append(parts, c.part)
 	}
-	order := []string{"link", "high_alarm", "frost", "isolation", "added", "probe", "stat", "heater"}
+	order := []string{"link", "high_alarm", "frost", "isolation", "added", "probe", "stat", "heater", "stat"}
 	if got := slices.Compact(parts); !slices.Equal(got, order) {
 		t.Errorf("order of testing: %v, want %v", got, order)
 	}

@@ -152,7 +152,7 @@ func (a *assessor) rule(rule *Rule) error {
 	missing := map[string]bool{}
 	for _, it := range a.view.items(rule.Each) {
 		figures := newLookup(a.view.computed.Figures)
-		a.env["fig"], a.env["fig_reason"] = figures.value, figures.reason
+		a.env["fig"], a.env["fig_reason"], a.env["has_fig"] = figures.value, figures.reason, figures.has
 		if rule.Each != "equipment" {
 			a.env[rule.Each] = it.thing
 		}

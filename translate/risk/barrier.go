@@ -159,8 +159,22 @@ func (j *judge) trip(c *survey.Control, d *survey.Danger) trip {
 		t.worst += sign * t.overshoot
 		t.sum += word + Kelvin(t.overshoot) + " overshoot"
 	}
+	if bound, ok := j.measuredOvershoot(c); ok && math.IsNaN(t.overshoot) {
+		t.worst += sign * bound
+		t.sum += word + Kelvin(bound) + " overshoot at the measured rise, not at the worst one"
+	}
 	t.sum += " = " + Celsius(t.worst)
 	return t
+}
+
+// measuredOvershoot is what the fastest measured rise says, in K. At the worst
+// it is more: it may count against a limit, and never makes one good.
+func (j *judge) measuredOvershoot(c *survey.Control) (k float64, ok bool) {
+	f := j.computed.Figures[Key{c.ID.V, OvershootAsMeasured}]
+	if f.Value == nil {
+		return 0, false
+	}
+	return math.Max(0, *f.Value), true
 }
 
 // overshoot is the predicted rise (or fall) after the control has cut, in K.

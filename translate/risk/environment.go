@@ -37,7 +37,8 @@ func names(v *View, figures *lookup) map[string]any {
 		"has":   func(word string) bool { return word != "" && word != unknown },
 		"list":  joined, "degc": Celsius, "kelvin": Kelvin, "amps": Amps, "percent": Percent, "years": Years,
 		"duration": Duration, "num": func(x float64) string { return number(x, 3) },
-		"fig": figures.value, "fig_reason": figures.reason,
+		"whole": func(x float64) string { return number(x, 0) },
+		"fig":   figures.value, "fig_reason": figures.reason, "has_fig": figures.has,
 	}
 }
 
@@ -74,6 +75,13 @@ func (l *lookup) value(name string, abouts ...string) float64 {
 		return math.NaN()
 	}
 	return *f.Value
+}
+
+// has reports whether there is a figure with a value; a rule that asks so does
+// without it otherwise, and does not wait.
+func (l *lookup) has(name string, abouts ...string) bool {
+	f, ok := l.find(name, abouts)
+	return ok && f.Value != nil
 }
 
 // reason says why the figure is not determined, or is empty.

@@ -436,7 +436,8 @@ type Computed struct {
 const (
 	// OvershootAfterCut, about a hardware control: K by which the medium goes on
 	// after that control has cut the load, towards the danger, at worst.
-	OvershootAfterCut = "overshoot_after_cut"
+	OvershootAfterCut   = "overshoot_after_cut"
+	OvershootAsMeasured = "overshoot_as_measured"
 )
 
 // answer is what the responsible person decided on a finding.

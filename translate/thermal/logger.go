@@ -21,6 +21,7 @@ type Row struct {
 // LogError is one thing wrong with a logger file.
 type LogError struct {
 	Line int // 1-based line of the file; 0 where it concerns the whole
+	Col  int // 1-based column of the line, in bytes; 0 where it concerns all of it
 	What string
 }
 
@@ -74,12 +75,17 @@ func ReadLog(r io.Reader) ([]Row, error) {
 			break
 		}
 		line, _ := in.FieldPos(0)
-		row, err := parseRow(fields, where, width)
+		row, field, err := parseRow(fields, where, width)
 		if err == nil && len(rows) > 0 && row.Time <= rows[len(rows)-1].Time {
+			field = where[0]
 			err = fmt.Errorf("time_s is %g, not after %g in the row before", row.Time, rows[len(rows)-1].Time)
 		}
 		if err != nil {
-			wrong = append(wrong, &LogError{line, err.Error()})
+			col := 0
+			if field >= 0 {
+				_, col = in.FieldPos(field)
+			}
+			wrong = append(wrong, &LogError{line, col, err.Error()})
 			continue
 		}
 		rows = append(rows, row)
@@ -101,7 +107,7 @@ func ReadLog(r io.Reader) ([]Row, error) {
 func readFailure(err error) error {
 	var parse *csv.ParseError
 	if errors.As(err, &parse) {
-		return &LogError{parse.Line, parse.Err.Error()}
+		return &LogError{parse.Line, parse.Column, parse.Err.Error()}
 	}
 	return err
 }
@@ -117,11 +123,11 @@ func columns(header []string) ([3]int, error) {
 	for i, want := range logColumns {
 		where[i] = slices.Index(names, want)
 		if where[i] < 0 {
-			wrong = append(wrong, &LogError{1, fmt.Sprintf("no column %s; the header has %q", want, shortened(header))})
+			wrong = append(wrong, &LogError{1, 1, fmt.Sprintf("no column %s; the header has %q", want, shortened(header))})
 		}
 	}
 	if len(names) == 1 && strings.ContainsAny(names[0], ";\t") {
-		wrong = append(wrong, &LogError{1, "columns are separated by commas here, and numbers written with a point"})
+		wrong = append(wrong, &LogError{1, 1, "columns are separated by commas here, and numbers written with a point"})
 	}
 	return where, errors.Join(wrong...)
 }
@@ -135,24 +141,25 @@ func shortened(header []string) string {
 	return string(s)
 }
 
-func parseRow(fields []string, where [3]int, width int) (Row, error) {
+// parseRow reads one row; where it cannot, field is the one to blame, or -1.
+func parseRow(fields []string, where [3]int, width int) (row Row, field int, err error) {
 	if len(fields) != width {
-		return Row{}, fmt.Errorf("%d fields, but the header has %d", len(fields), width)
+		return Row{}, -1, fmt.Errorf("%d fields, but the header has %d", len(fields), width)
 	}
 	var v [3]float64
 	for i, at := range where {
 		text := strings.TrimSpace(fields[at])
 		x, err := strconv.ParseFloat(text, 64)
 		if err != nil || math.IsNaN(x) || math.IsInf(x, 0) {
-			return Row{}, fmt.Errorf("%s is %q, but a number is needed", logColumns[i], shortened([]string{text}))
+			return Row{}, at, fmt.Errorf("%s is %q, but a number is needed", logColumns[i], shortened([]string{text}))
 		}
 		v[i] = x
 	}
 	if v[2] != 0 && v[2] != 1 {
-		return Row{}, fmt.Errorf("state is %g, but 0 (off) or 1 (on) is needed", v[2])
+		return Row{}, where[2], fmt.Errorf("state is %g, but 0 (off) or 1 (on) is needed", v[2])
 	}
 	if v[1] < -273.15 || v[1] > 5000 {
-		return Row{}, fmt.Errorf("temperature_c is %g, which no thermometer shows", v[1])
+		return Row{}, where[1], fmt.Errorf("temperature_c is %g, which no thermometer shows", v[1])
 	}
-	return Row{Time: v[0], Temperature: v[1], On: v[2] == 1}, nil
+	return Row{Time: v[0], Temperature: v[1], On: v[2] == 1}, 0, nil
 }

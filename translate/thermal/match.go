@@ -19,12 +19,13 @@ const (
 type MatchRequest struct {
 	Old             Loop
 	Keep            Keep
-	NewLag          float64  // s, of the new probe
-	MinOn, MinOff   float64  // s, of the new control
-	MostOperations  float64  // a year, that the new contact's life allows; 0: not limited
-	MinDifferential float64  // K between the new make and break, such as two counts; 0: any above none
-	LowestEdge      Estimate // degC that no new threshold may go below, where there is one
-	HighestEdge     Estimate // degC that no new threshold may go above, where there is one
+	NewLag          float64     // s, of the new probe
+	NewAnticipator  Anticipator // that the program carries on; zero: none
+	MinOn, MinOff   float64     // s, of the new control
+	MostOperations  float64     // a year, that the new contact's life allows; 0: not limited
+	MinDifferential float64     // K between the new make and break, such as two counts; 0: any above none
+	LowestEdge      Estimate    // degC that no new threshold may go below, where there is one
+	HighestEdge     Estimate    // degC that no new threshold may go above, where there is one
 }
 
 // Matched is a new control.
@@ -84,7 +85,7 @@ type matching struct {
 func (m matching) loop(brk, make, filter float64) Loop {
 	return Loop{
 		Process:   m.Old.Process,
-		Sensing:   Sensing{Lag: m.NewLag, Filter: filter},
+		Sensing:   Sensing{Lag: m.NewLag, Filter: filter, Anticipator: m.NewAnticipator},
 		Switching: Switching{Make: make, Break: brk, MinOn: m.MinOn, MinOff: m.MinOff},
 	}
 }
@@ -219,7 +220,7 @@ func (m matching) within(out Matched) (Matched, error) {
 		}
 		wanted := func(lag float64) float64 { return -at(lag) }
 		lag, found := crossing(wanted, out.Filter, m.NewLag+m.Old.Process.Dead+1e-3*m.old.Period(), 1e3)
-		why := fmt.Sprintf("%s: %.4g operations a year, and the contact's life allows %.4g", out.Because, over, m.MostOperations)
+		why := fmt.Sprintf("%s: %.0f operations a year, and the contact's life allows %.0f", out.Because, over, m.MostOperations)
 		if !found {
 			out.Feasible, out.Because = false, why+"; no software lag brings it there"
 		} else {
@@ -237,7 +238,7 @@ func (m matching) within(out Matched) (Matched, error) {
 // withCosts says what the choice costs against the old control.
 func (m matching) withCosts(out Matched) Matched {
 	out.Costs = []string{
-		fmt.Sprintf("operations a year: %.4g, before %.4g (%+.1f %%)", out.New.OperationsPerYear, m.old.OperationsPerYear, 100*(out.New.OperationsPerYear/m.old.OperationsPerYear-1)),
+		fmt.Sprintf("operations a year: %.0f, before %.0f (%+.1f %%)", out.New.OperationsPerYear, m.old.OperationsPerYear, 100*(out.New.OperationsPerYear/m.old.OperationsPerYear-1)),
 		fmt.Sprintf("swing of the medium: %.3g K, before %.3g K", out.New.Swing(), m.old.Swing()),
 		fmt.Sprintf("mean of the medium: %.4g degC, before %.4g degC (%+.2g K)", out.New.Mean, m.old.Mean, out.New.Mean-m.old.Mean),
 	}

@@ -19,9 +19,9 @@
  * the design.
  * Open findings: 1 danger_without_barrier (act, freezing/tape); 2 frost_load_safe_on (act, tape); 3
  * welded_output (act, tape); 4 probe_out_of_pocket (act, line_stat); 5 moisture_direction (act,
- * line_probe); 6 insulation_of_new_probe (act, line_probe); 7 mercury_asbestos_refrigerant (act,
- * line_stat); 8 approval_lapses (act, frost7). Not judged, for want of a figure: 1; risks.md says
- * which.
+ * line_probe); 6 insulation_of_new_probe (act, line_probe); 7 contact_life (act, tape); 8
+ * mercury_asbestos_refrigerant (act, line_stat); 9 approval_lapses (act, frost7). Not judged, for
+ * want of a figure: 1; risks.md says which.
  */
 #ifndef FROST7_H
 #define FROST7_H

@@ -3,7 +3,7 @@
  * Equipment: Room control, caretaker's flat
  * Site: Ferry House
  * Printed by makebreak 0.1.0 from sheet.yaml
- * Sheet SHA-256: c47d607d811997dce351f262b36b80dc26f4ea70d4cecc0725b3507a8cc8a827
+ * Sheet SHA-256: d3cb2df54b043c85a55b36ae17d55a520d1b44a8f6e6363d94d5ab1013700b13
  *
  * Replaces:
  * - room_stat: room control with a mercury bottle, in the hall
@@ -55,16 +55,19 @@
  * ROOM_PROBE_FAULT_AFTER + ROOM_PROBE_GOOD_RUN
  */
 #define ROOM4_ROOM_PROBE_PROVE_WITHIN 15u
-/* counts: 19 degC (controls[0].set_point, line 53): 19 degC is 2289.167 counts by thermistor
- * (beta); rounded up: at least 2289, which changes at 19.0041 degC; one count is 0.0246 K
+/* counts: 18.87 degC (controls[0].match, line 61): the sheet has make 19 degC and break 20 degC;
+ * match cycle_rate: differential +0.265 K about the same middle, so that the rate is the old one;
+ * 18.8674 degC is 2294.557 counts by thermistor (beta); rounded up: at least 2294, which changes at
+ * 18.8811 degC; one count is 0.0246 K
  */
-#define ROOM4_ROOM_STAT_MAKE 2289u
-/* counts: 20 degC (controls[0].set_point, line 53): 20 degC is 2248.575 counts by thermistor
- * (beta); rounded to the nearest edge of a count: at most 2248, which changes at 19.9895 degC; one
- * count is 0.0247 K; moved by -1 counts, so that the differential is not below the one asked for:
- * 2247, which changes at 20.0142 degC
+#define ROOM4_ROOM_STAT_MAKE 2294u
+/* counts: 20.13 degC (controls[0].match, line 61): the sheet has make 19 degC and break 20 degC;
+ * match cycle_rate: differential +0.265 K about the same middle, so that the rate is the old one;
+ * 20.1326 degC is 2243.201 counts by thermistor (beta); rounded to the nearest edge of a count: at
+ * most 2242, which changes at 20.1376 degC; one count is 0.0247 K; moved by -1 counts, so that the
+ * differential is not below the one asked for: 2241, which changes at 20.1622 degC
  */
-#define ROOM4_ROOM_STAT_BREAK 2247u
+#define ROOM4_ROOM_STAT_BREAK 2241u
 /* counts: below: wiper, track or wire broken (controls[0].dial, line 57): a track of 20 % too much,
  * and a third of the way to the rail
  */
@@ -87,15 +90,19 @@
 #define ROOM4_ROOM_STAT_HEAT_LAG 361
 /* 0.01 K: 20 degC (controls[0].set_point, line 53): in steps of the reading */
 #define ROOM4_ROOM_STAT_SET_POINT 2000u
-/* 0.01 K: 1 K below the set point (controls[0].set_point, line 53): differential as on the sheet */
-#define ROOM4_ROOM_STAT_MAKE_BELOW_MARK 100
-/* steps: an effect is expected within 1 h 35 min (process.settles_on, line 19): 3 times the slowest
- * expected answer: 3 h × ln((3 K + 0.49 K)/3 K) = 27 min 19 s, and 4 min 30 s of dead time and lag;
- * 1 h 35 min / 1 s a step, rounded up
+/* 0.01 K: 1.13 K below the set point (controls[0].set_point, line 53): differential as on the sheet
  */
-#define ROOM4_BOILER_EFFECT_WITHIN 5726u
-/* counts: 0.49 K towards the set point (process.settles_on, line 19): 0.5 of the differential */
-#define ROOM4_BOILER_EFFECT 19
+#define ROOM4_ROOM_STAT_MAKE_BELOW_MARK 113
+/* 0.01 K: 0.13 K above the set point (controls[0].set_point, line 53): differential as on the sheet
+ */
+#define ROOM4_ROOM_STAT_BREAK_ABOVE_MARK 13
+/* steps: an effect is expected within 1 h 59 min (process.settles_on, line 19): 3 times the slowest
+ * expected answer: 3 h × ln((2.87 K + 0.62 K)/2.87 K) = 35 min 19 s, and 4 min 30 s of dead time
+ * and lag; 1 h 59 min / 1 s a step, rounded up
+ */
+#define ROOM4_BOILER_EFFECT_WITHIN 7167u
+/* counts: 0.62 K towards the set point (process.settles_on, line 19): 0.5 of the differential */
+#define ROOM4_BOILER_EFFECT 24
 
 /* These do not compile where an assumption of this file does not hold. */
 typedef char room4_int_has_16_bits[(((unsigned)-1) >= 0xFFFFu) ? 1 : -1];
@@ -116,16 +123,16 @@ typedef char room4_room_boiler_effect_for[(ROOM4_BOILER_EFFECT_WITHIN <= 65535u)
 #define ROOM4_READ_U16(entry) (entry)
 #endif
 
-/* temperature of room_probe (0.01 K): thermistor (beta), counts 1854 to 2896: 3 pieces (proved to
- * be the fewest), 16 bytes, worst error 0.0232 K at count 2789 of 0.05 K allowed, in steps of 0.01
- * K; equal spacing needs 5 pieces, 12 bytes, worst 0.0393 K; straight between the points, the end
+/* temperature of room_probe (0.01 K): thermistor (beta), counts 1848 to 2901: 3 pieces (proved to
+ * be the fewest), 16 bytes, worst error 0.0249 K at count 2058 of 0.05 K allowed, in steps of 0.01
+ * K; equal spacing needs 5 pieces, 12 bytes, worst 0.0407 K; straight between the points, the end
  * values beyond them
  */
 static const uint16_t room4_room_probe_temperature_x[4] ROOM4_FLASH = {
-    1854u, 2066u, 2689u, 2896u
+    1848u, 2058u, 2689u, 2901u
 };
 static const uint16_t room4_room_probe_temperature_y[4] ROOM4_FLASH = {
-    2997u, 2451u, 912u, 382u
+    3013u, 2471u, 912u, 369u
 };
 
 static uint16_t room4_room_probe_temperature(uint16_t x)
@@ -424,7 +431,8 @@ void room4_step(struct room4 *m, const struct room4_in *in, struct room4_out *ou
     const bool room_stat_make_reached = (int16_t)room_stat_warm_reading <=
         ((int16_t)room_stat_wanted - ROOM4_ROOM_STAT_MAKE_BELOW_MARK);
     /* the temperature is at or beyond the break */
-    const bool room_stat_break_reached = room_stat_warm_reading >= room_stat_wanted;
+    const bool room_stat_break_reached = (int16_t)room_stat_warm_reading >=
+        ((int16_t)room_stat_wanted + ROOM4_ROOM_STAT_BREAK_ABOVE_MARK);
 
     room4_room_stat(m, room_stat_make_reached, room_stat_break_reached);
 

@@ -3,7 +3,7 @@
  * Equipment: Room control, caretaker's flat
  * Site: Ferry House
  * Printed by makebreak 0.1.0 from sheet.yaml
- * Sheet SHA-256: c47d607d811997dce351f262b36b80dc26f4ea70d4cecc0725b3507a8cc8a827
+ * Sheet SHA-256: d3cb2df54b043c85a55b36ae17d55a520d1b44a8f6e6363d94d5ab1013700b13
  *
  * Replaces:
  * - room_stat: room control with a mercury bottle, in the hall
