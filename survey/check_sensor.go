@@ -65,6 +65,7 @@ func (d *decoder) sensor(s *Survey, x *Sensor, w *wiring) {
 	case "millivolt", "current":
 		need(given(x.FullScale), "full_scale", "full_scale: 30 mV")
 	}
+	d.errorFits(x)
 	d.positive(x.R25, x.Beta, x.PullUp, x.PullDown, x.Excitation, x.Current, x.Gain, x.CountsPerKelvin, x.FullScale)
 	if x.Slope.Set && x.Slope.V == 0 {
 		d.failAt(x.Slope.Source, "does not change with temperature", x.Slope.Text, "such as -2 mV/K")
@@ -157,4 +158,18 @@ func count(set ...bool) int {
 		}
 	}
 	return n
+}
+
+// errorFits wants the error of a sensor in what it measures.
+func (d *decoder) errorFits(x *Sensor) {
+	if !x.Error.Set {
+		return
+	}
+	dim := map[SensorKind]string{"millivolt": "voltage", "current": "current"}[x.Kind.V]
+	if dim == "" {
+		dim = "interval"
+	}
+	if _, m := quantity(x.Error.Text, dim); m != nil {
+		d.failAt(x.Error.Source, "not an error of what this kind measures", x.Error.Text, "such as "+dimensions[dim].example)
+	}
 }

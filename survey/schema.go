@@ -167,10 +167,12 @@ func quantitySchema(unit string) object {
 // them for a time.
 func quantityPattern(dim string) string {
 	sign, units := `\+?`, dimensions[dim].unitNames()
-	if dim == "volt_or_ampere" {
-		units = append(dimensions["voltage"].unitNames(), dimensions["current"].unitNames()...)
+	signed := dimensions[dim].signed
+	for _, p := range mixed[dim] {
+		units = append(units, dimensions[p].unitNames()...)
+		signed = signed || dimensions[p].signed
 	}
-	if dimensions[dim].signed || dim == "volt_or_ampere" {
+	if signed {
 		sign = "[+-]?"
 	}
 	one := sign + numberPattern + " *(" + strings.Join(units, "|") + ")"

@@ -370,7 +370,7 @@ type Sensor struct {
 	OpenReads         Field[string]  `sheet:"open_reads" for:"kind=type_k,type_j,type_t" oneof:"high low floats unknown" usual:"unknown|not stated" about:"thermocouple: what an open circuit reads"`
 
 	At              Field[[][2]float64] `sheet:"at" for:"kind=linear" unit:"temperature_voltage" about:"linear: pairs of temperature and voltage"`
-	Error           Field[float64]      `sheet:"error" for:"kind=linear,diode,digital,millivolt,current" unit:"interval" about:"linear, diode, digital: error of the sensor"`
+	Error           Field[float64]      `sheet:"error" for:"kind=linear,diode,digital,millivolt,current" unit:"reading_error" about:"error of the sensor, in what it measures: K, V or A"`
 	At25            Field[float64]      `sheet:"at_25" for:"kind=diode" unit:"voltage" about:"diode: voltage at 25 degC"`
 	Slope           Field[float64]      `sheet:"slope" for:"kind=diode" unit:"voltage_per_kelvin" about:"diode: change with temperature"`
 	CountsPerKelvin Field[float64]      `sheet:"counts_per_kelvin" for:"kind=digital" about:"digital: counts for one kelvin"`

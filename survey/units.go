@@ -91,14 +91,23 @@ func (d dimension) listed() string {
 	return strings.Join(names, ", ")
 }
 
+// mixed are the keys that take a quantity of more than one dimension; which one
+// fits is for the key's section to say.
+var mixed = map[string][]string{
+	"volt_or_ampere": {"voltage", "current"},
+	"reading_error":  {"voltage", "current", "interval"},
+}
+
 // quantity reads a number with its unit in a dimension and gives it in the
 // dimension's stored unit. A time may have several parts, the larger first.
 func quantity(text, dim string) (float64, *misfit) {
-	if dim == "volt_or_ampere" {
-		if v, m := quantity(text, "voltage"); m == nil {
-			return v, nil
+	if parts, ok := mixed[dim]; ok {
+		for _, p := range parts[:len(parts)-1] {
+			if v, m := quantity(text, p); m == nil {
+				return v, nil
+			}
 		}
-		return quantity(text, "current")
+		return quantity(text, parts[len(parts)-1])
 	}
 	d := dimensions[dim]
 	terms, m := d.terms(text)

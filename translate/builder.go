@@ -46,6 +46,8 @@ func newBuilder(spec *Specification) *builder {
 			Regulators:  map[string]*Regulator{},
 			Valves:      map[string]*Valve{},
 			Indications: map[string]*Indication{},
+			Pulsers:     map[string]*Pulser{},
+			Monitors:    map[string]*Monitored{},
 			Loads:       map[string]*Switched{},
 			Signals:     map[string]*logic.Var{},
 			Timers:      map[string]*logic.Var{},

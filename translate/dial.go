@@ -81,17 +81,8 @@ func (b *builder) dial(c *survey.Control, p *Probe) *Dial {
 	}
 	d := &Dial{Layout: layout}
 	d.Marked, _ = layout.Mark(c.DialMark().V)
-	from, what := c.Dial.Source, "dial of "+c.What.V
-	count := func(name string, v int64, means string) *logic.Const {
-		return b.constant(logic.Const{Name: id + "_dial_" + name, Value: v, Unit: "counts", Means: means, Origin: origin(from),
-			Working: fmt.Sprintf("a track of %g %% too much, and a third of the way to the rail", 100*dialTrack)})
-	}
-	low, high := count("lowest", layout.FaultBelow, "below: wiper, track or wire broken"), count("highest", layout.FaultAbove, "above: wiper, track or wire broken")
-	d.Raw = b.input(logic.Var{Name: b.name(id, "dial"), What: what + ", raw counts", Kind: logic.Int, Range: logic.Count})
-	bad := b.local(b.name(id, "dial_bad"), what+": this sample is no setting",
-		logic.Or(logic.Lt(logic.Use(d.Raw), logic.C(low)), logic.Gt(logic.Use(d.Raw), logic.C(high))))
-	fault := b.steps(id+"_dial_fault_after", dialFault, survey.Source{Assumed: "common practice"}, "no setting for")
-	lost := b.counter(b.name(id, "dial_lost_for"), "steps since the dial was last believed", fault, fault.Value)
+	what := "dial of " + c.What.V
+	bad := b.wiper(id, what, c.Dial.Source, d, "the set point of the sheet holds")
 	t := &logic.Table{Name: b.name(id, "dial_marks"), What: "set point of " + what, Unit: fmt.Sprintf("%g K", r.Unit), Working: "linear between the stops " + c.Dial.Text}
 	span := logic.Range{Lo: int64(min(table.Y[0], table.Y[1])), Hi: int64(max(table.Y[0], table.Y[1]))}
 	for i := range table.X {
@@ -100,13 +91,28 @@ func (b *builder) dial(c *survey.Control, p *Probe) *Dial {
 	b.prog.Tables = append(b.prog.Tables, t)
 	d.SetPoint = b.state(logic.Var{Name: b.name(id, "set_point"), What: "set point by the dial, in steps of " + t.Unit, Kind: logic.Int, Range: span,
 		Start: min(max(r.in(c.DialMark().V), span.Lo), span.Hi)})
-	b.add(
-		&logic.Timer{Var: lost, Limit: fault, Restart: logic.Not(logic.Use(bad)), Why: "a setting ends the doubt"},
-		&logic.Set{Var: d.SetPoint, When: logic.Not(logic.Use(bad)), To: logic.Lookup(t, logic.Use(d.Raw)), Why: "the stops hold beyond them"},
-	)
-	d.Believed = b.local(b.name(id, "dial_believed"), what+": is believed", logic.Lt(logic.Use(lost), logic.C(fault)))
-	b.flag(id+"_dial", what+": wiper, track or wire broken; works at the set point of the sheet", logic.Not(logic.Use(d.Believed)))
+	b.add(&logic.Set{Var: d.SetPoint, When: logic.Not(logic.Use(bad)), To: logic.Lookup(t, logic.Use(d.Raw)), Why: "the stops hold beyond them"})
 	return d
+}
+
+// wiper declares the input of a dial and whether it is believed; otherwise
+// says what holds where it is not. The result is true for a sample that is no
+// setting.
+func (b *builder) wiper(id, what string, from survey.Source, d *Dial, otherwise string) (bad *logic.Var) {
+	count := func(name string, v int64, means string) *logic.Const {
+		return b.constant(logic.Const{Name: id + "_dial_" + name, Value: v, Unit: "counts", Means: means, Origin: origin(from),
+			Working: fmt.Sprintf("a track of %g %% too much, and a third of the way to the rail", 100*dialTrack)})
+	}
+	low, high := count("lowest", d.Layout.FaultBelow, "below: wiper, track or wire broken"), count("highest", d.Layout.FaultAbove, "above: wiper, track or wire broken")
+	d.Raw = b.input(logic.Var{Name: b.name(id, "dial"), What: what + ", raw counts", Kind: logic.Int, Range: logic.Count})
+	bad = b.local(b.name(id, "dial_bad"), what+": this sample is no setting",
+		logic.Or(logic.Lt(logic.Use(d.Raw), logic.C(low)), logic.Gt(logic.Use(d.Raw), logic.C(high))))
+	fault := b.steps(id+"_dial_fault_after", dialFault, survey.Source{Assumed: "common practice"}, "no setting for")
+	lost := b.counter(b.name(id, "dial_lost_for"), "steps since the dial was last believed", fault, fault.Value)
+	b.add(&logic.Timer{Var: lost, Limit: fault, Restart: logic.Not(logic.Use(bad)), Why: "a setting ends the doubt"})
+	d.Believed = b.local(b.name(id, "dial_believed"), what+": is believed", logic.Lt(logic.Use(lost), logic.C(fault)))
+	b.flag(id+"_dial", what+": wiper, track or wire broken; "+otherwise, logic.Not(logic.Use(d.Believed)))
+	return bad
 }
 
 // reached is true where the temperature is at or beyond an edge that lies

@@ -127,7 +127,7 @@ func (b *builder) comparison(p *Probe, cmp string, limit float64, text string, a
 }
 
 // edge of the believable range of a sensor, as a constant.
-func (b *builder) edge(name string, count int64, s *survey.Sensor, what string) logic.Const {
+func (b *builder) edge(name string, count int64, s *survey.Sensor, what string) *logic.Expr {
 	chain := b.spec.Chains[s.ID.V]
 	low, high := chain.Temperature(count)
 	t := math.Min(math.Max((low+high)/2, chain.Curve.Low), chain.Curve.High)
@@ -135,5 +135,12 @@ func (b *builder) edge(name string, count int64, s *survey.Sensor, what string) 
 	if !s.Valid.Set {
 		from = survey.Source{Assumed: "the range of its kind, short of both rails", Path: s.Valid.Path}
 	}
-	return logic.Const{Name: name, Value: count, Unit: "counts", Means: what + ", about " + number(t, 1) + " degC", Origin: origin(from), Working: chain.Curve.Name}
+	means := what + ", about " + number(t, 1) + " degC"
+	switch s.Kind.V {
+	case "millivolt":
+		means = what + ", about " + number(1000*t, 2) + " mV"
+	case "current":
+		means = what + ", about " + number(t, 2) + " A"
+	}
+	return logic.C(b.constant(logic.Const{Name: name, Value: count, Unit: "counts", Means: means, Origin: origin(from), Working: chain.Curve.Name}))
 }

@@ -15,11 +15,14 @@ func (b *builder) figures() {
 	b.tunings()
 	for _, c := range b.survey.Controls {
 		b.asked(c)
-		if chain := b.spec.Chains[c.Sensor.V]; chain != nil && b.translated(c) && c.Switching() {
+		if chain := b.spec.Chains[c.Sensor.V]; chain != nil && b.translated(c) && c.Switching() && c.Plan.V == survey.Replace {
 			b.match(c, chain)
 			b.switching(c, chain)
 		}
 		b.valveFigures(c)
+		b.pulseFigures(c)
+		b.flameFigures(c)
+		b.imageFigures(c)
 		b.overshoot(c)
 	}
 	b.margins()

@@ -143,7 +143,7 @@ func (b *builder) margins() {
 			continue
 		}
 		for _, c := range b.survey.Controls {
-			if b.translated(c) && c.Switching() && c.Duty.V == survey.Operating && b.spec.Chains[c.Sensor.V] != nil {
+			if b.translated(c) && c.Plan.V == survey.Replace && c.Switching() && c.Duty.V == survey.Operating && b.spec.Chains[c.Sensor.V] != nil {
 				b.margin(x, limit, c)
 				break
 			}

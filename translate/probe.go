@@ -26,7 +26,7 @@ type Probe struct {
 	Value           *logic.Var // median of the last three believable samples
 	Low             int64      // lowest and highest believable count
 	High            int64
-	lowest, highest *logic.Const // the same, as the program has them
+	lowest, highest *logic.Expr // the same, as the program has them
 
 	Cold    *Probe   // measures its cold junction, or nil
 	reading *Reading // its temperature, once something has asked for it
@@ -87,11 +87,13 @@ func (b *builder) probe(s *survey.Sensor) *Probe {
 		raw.Range, raw.Signed = logic.Int16, true
 	}
 	p.Raw = b.input(raw)
-	low := b.constant(b.edge(id+"_lowest", p.Low, s, "lowest believable count"))
-	high := b.constant(b.edge(id+"_highest", p.High, s, "highest believable count"))
-	p.lowest, p.highest = low, high
-	p.Bad = b.local(b.name(id, "bad"), what+": this sample cannot be believed",
-		logic.Or(logic.Lt(logic.Use(p.Raw), logic.C(low)), logic.Gt(logic.Use(p.Raw), logic.C(high))))
+	p.lowest, p.highest = logic.Lit(p.Low), b.edge(id+"_highest", p.High, s, "highest believable count")
+	beyond := logic.Gt(logic.Use(p.Raw), p.highest)
+	if p.Low > p.Raw.Range.Lo { // an input for V or A reads 0 in ordinary service
+		p.lowest = b.edge(id+"_lowest", p.Low, s, "lowest believable count")
+		beyond = logic.Or(logic.Lt(logic.Use(p.Raw), p.lowest), beyond)
+	}
+	p.Bad = b.local(b.name(id, "bad"), what+": this sample cannot be believed", beyond)
 
 	after := b.steps(id+"_fault_after", s.FaultAfter.V, s.FaultAfter.Source, "not good for")
 	run := b.constant(logic.Const{

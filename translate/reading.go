@@ -74,7 +74,7 @@ func (b *builder) conversions() {
 // spanOf is what all the parts that need a sensor's temperature ask for.
 func (b *builder) spanOf(s *survey.Sensor) (need span, any bool) {
 	for _, c := range b.survey.Controls {
-		if c.Sensor.V != s.ID.V || !b.translated(c) {
+		if c.Sensor.V != s.ID.V || c.Plan.V != survey.Replace || !b.translated(c) {
 			continue
 		}
 		if n, ok := b.spanFor(c); ok {

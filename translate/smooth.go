@@ -40,7 +40,7 @@ func (b *builder) smoothed(c *survey.Control, p *Probe) (reads *logic.Var, scale
 	})
 	parts := &logic.Var{Name: b.name(id, "parts"), What: "reading in parts of a count", Kind: logic.Int, Range: y.Range, Start: y.Start}
 	b.add(
-		&logic.Define{Var: parts, As: logic.Mul(logic.Clamp(logic.Use(p.Value), logic.C(p.lowest), logic.C(p.highest)), logic.C(one))},
+		&logic.Define{Var: parts, As: logic.Mul(logic.Clamp(logic.Use(p.Value), p.lowest, p.highest), logic.C(one))},
 		&logic.Set{Var: y, To: logic.Select(p.failed(), logic.Use(parts), logic.Toward(logic.Prev(y), logic.Use(parts), logic.C(divisor))),
 			Why: "a lag as the old element had one"},
 	)

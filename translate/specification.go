@@ -61,6 +61,8 @@ type Plan struct {
 	Regulators  map[string]*Regulator  // by control: what gives an output between none and all
 	Valves      map[string]*Valve      // by load: what takes one
 	Loads       map[string]*Switched   // by load
+	Pulsers     map[string]*Pulser     // by control
+	Monitors    map[string]*Monitored  // by control: what stays and is watched
 	Indications map[string]*Indication // by control
 	Signals     map[string]*logic.Var
 	Timers      map[string]*logic.Var

@@ -55,8 +55,12 @@ func (b *builder) chains() {
 // translated reports whether a control becomes part of the program.
 func (b *builder) translated(c *survey.Control) bool {
 	switch {
+	case c.Plan.V == survey.Monitor:
+		return b.monitors(c)
 	case c.Plan.V != survey.Replace:
 		return false
+	case c.Action.V == survey.Pulses:
+		return pulses(c)
 	case c.Switching():
 		return c.BreaksAt.Set && c.MakesAt.Set
 	case c.Modulating():
@@ -78,13 +82,13 @@ func (b *builder) refuse() {
 
 func whyNot(c *survey.Control) string {
 	if c.Plan.V == survey.Monitor {
-		return "watching a part that stays is not translated"
+		return "neither a signal (read_by) shows its trip, nor does a sensor look on"
 	}
 	switch c.Action.V {
 	case survey.ClosesOnRise, survey.OpensOnRise:
 		return "no load follows it, or neither its band nor a set point with want: pid is known"
 	case survey.Pulses:
-		return "a pulsing device is not translated"
+		return "its rate or period, or what is on of it (on_share, dial_shares), is not known"
 	case survey.HoldsWhileHot:
 		return "flame supervision is never moved into the program"
 	case survey.Indicates:
@@ -108,6 +112,7 @@ func (b *builder) program() {
 			b.control(c, w)
 		}
 	}
+	b.pulsers(w)
 	for _, id := range b.order() {
 		if t := timer(b.survey, id); t != nil {
 			w.known[id] = b.clock(t, w)
@@ -130,7 +135,7 @@ func (b *builder) program() {
 	b.settle()
 	b.faultWord()
 	b.must(w)
-	if b.diags.HasErrors() || len(b.plan.Loads)+len(b.plan.Valves)+len(b.plan.Indications) == 0 {
+	if b.diags.HasErrors() || len(b.plan.Loads)+len(b.plan.Valves)+len(b.plan.Indications)+len(b.plan.Monitors) == 0 {
 		return
 	}
 	b.prune()
@@ -149,6 +154,11 @@ func (b *builder) control(c *survey.Control, w *wiring) {
 	p, id := b.plan.Sensors[c.Sensor.V], c.ID.V
 	var k *Contact
 	switch {
+	case c.Plan.V == survey.Monitor:
+		b.plan.Monitors[id] = b.monitor(c, w)
+		return
+	case c.Action.V == survey.Pulses:
+		return // once all contacts are known: see pulsers
 	case c.Action.V == survey.Indicates:
 		b.plan.Indications[id] = b.indication(c, p)
 		return
@@ -179,6 +189,22 @@ func (b *builder) control(c *survey.Control, w *wiring) {
 	b.plan.Contacts[id] = k
 	made := b.local(b.name(id, "contact"), c.What.V+": its contact is made", k.Made)
 	w.known[id] = logic.Use(made)
+}
+
+// pulsers builds the pulsing devices, which begin when what they switch is
+// called for.
+func (b *builder) pulsers(w *wiring) {
+	for _, c := range b.survey.Controls {
+		if !pulses(c) {
+			continue
+		}
+		g := b.pulser(c, w)
+		b.plan.Pulsers[c.ID.V] = g
+		if g.Made == nil {
+			return // has been said
+		}
+		w.known[c.ID.V] = g.Made
+	}
 }
 
 // continuous reports whether a control becomes a PID control: it is wanted, and

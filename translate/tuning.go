@@ -57,7 +57,7 @@ func (b *builder) tune(c *survey.Control, l *survey.Load, tr thermal.Transfer, f
 // known.
 func (b *builder) tunings() {
 	for _, c := range b.survey.Controls {
-		if c.Duty.V != survey.Operating || !b.translated(c) || !c.Switching() && !c.Modulating() || c.Reset.V != survey.ResetAutomatic {
+		if c.Duty.V != survey.Operating || c.Plan.V != survey.Replace || !b.translated(c) || !c.Switching() && !c.Modulating() || c.Reset.V != survey.ResetAutomatic {
 			continue
 		}
 		l := b.runBy(c)
