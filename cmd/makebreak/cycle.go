@@ -7,6 +7,7 @@ import (
 	"math"
 	"os"
 	"path/filepath"
+	"strconv"
 	"strings"
 
 	"github.com/guptarohit/asciigraph"
@@ -108,8 +109,11 @@ func (f cycleFigure) text(s translate.Side) string {
 // printCycles prints old beside new, how both were worked out, and on the
 // screen a plot.
 func printCycles(out io.Writer, as string, spec *translate.Specification) error {
-	if as == "json" {
+	switch as {
+	case "json":
 		return printCyclesJSON(out, spec)
+	case "csv":
+		return printCyclesCSV(out, spec)
 	}
 	var rows [][]string
 	for _, c := range spec.Cycles {
@@ -117,7 +121,7 @@ func printCycles(out io.Writer, as string, spec *translate.Specification) error 
 			rows = append(rows, []string{c.Control.ID.V, f.name, f.text(c.Old), f.text(c.New), change(f, c)})
 		}
 	}
-	if err := printTable(out, as, []string{"control", "figure", "old", "new", "change"}, rows); err != nil || as == "csv" {
+	if err := printTable(out, as, []string{"control", "figure", "old", "new", "change"}, rows); err != nil {
 		return err
 	}
 	escape := visible
@@ -180,6 +184,28 @@ func cycleWorking(spec *translate.Specification, c *translate.ControlCycle) []st
 		lines = append(lines, fmt.Sprintf("%s, contact life: %s.", id, f.Working))
 	}
 	return lines
+}
+
+// printCyclesCSV prints plain numbers, so that a spreadsheet can go on with
+// them. Where there is none, the cell is empty and why says the reason.
+func printCyclesCSV(out io.Writer, spec *translate.Specification) error {
+	var rows [][]string
+	cell := func(f cycleFigure, s translate.Side) string {
+		if v, ok := f.value(s); ok {
+			return strconv.FormatFloat(v, 'g', 10, 64)
+		}
+		return ""
+	}
+	for _, c := range spec.Cycles {
+		for _, f := range cycleFigures {
+			why := c.Old.Why
+			if why == "" {
+				why = c.New.Why
+			}
+			rows = append(rows, []string{c.Control.ID.V, f.key, cell(f, c.Old), cell(f, c.New), why})
+		}
+	}
+	return printTable(out, "csv", []string{"control", "figure", "old", "new", "why"}, rows)
 }
 
 type cyclesJSON struct {

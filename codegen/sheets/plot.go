@@ -206,7 +206,7 @@ func tick(v float64) string { return strconv.FormatFloat(v, 'g', 6, 64) }
 func (p Plot) SVG() []byte {
 	var c svg
 	fmt.Fprintf(&c, `<svg xmlns="http://www.w3.org/2000/svg" viewBox="0 0 %g %g" role="img" aria-labelledby="title about" font-family="sans-serif" fill="%s">`+"\n", plotWidth, plotHeight, ink)
-	fmt.Fprintf(&c, "<title id=\"title\">%s</title>\n<desc id=\"about\">%s</desc>\n", xml(p.Title), xml(p.About))
+	fmt.Fprintf(&c, "<title id=\"title\">%s</title>\n<desc id=\"about\">%s</desc>\n", xmlText(p.Title), xmlText(p.About))
 	p.draw(&c)
 	c.WriteString("</svg>\n")
 	return []byte(c.String())
@@ -236,8 +236,8 @@ func (c *svg) rect(x, y, width, height float64, colour string) {
 }
 
 func (c *svg) text(x, y, size float64, side anchor, s string) {
-	fmt.Fprintf(c, `<text x="%.1f" y="%.1f" font-size="%g" text-anchor="%s">%s</text>`+"\n", x, y, size, side, xml(s))
+	fmt.Fprintf(c, `<text x="%.1f" y="%.1f" font-size="%g" text-anchor="%s">%s</text>`+"\n", x, y, size, side, xmlText(s))
 }
 
-// xml makes text stand for itself in a picture; hidden characters are shown.
-func xml(s string) string { return html.EscapeString(Visible(s)) }
+// xmlText makes text stand for itself in a picture; hidden characters are shown.
+func xmlText(s string) string { return html.EscapeString(Visible(s)) }
