@@ -1,9 +1,11 @@
 package sheets
 
 import (
+	"cmp"
 	"fmt"
 	"html"
 	"math"
+	"slices"
 	"strconv"
 	"strings"
 	"unicode/utf8"
@@ -100,20 +102,16 @@ func ticks(low, high float64, n int) []float64 {
 
 // apart moves labels that would lie on each other apart, keeping their order.
 func apart(at []float64, least float64) []float64 {
-	out := append([]float64(nil), at...)
-	for range 4 * len(out) {
-		for i := range out {
-			for j := range out {
-				if i == j || math.Abs(out[i]-out[j]) >= least-1e-9 {
-					continue
-				}
-				up, down := i, j
-				if out[i] > out[j] || out[i] == out[j] && i > j {
-					up, down = j, i
-				}
-				push := (least - math.Abs(out[i]-out[j])) / 2
-				out[up] -= push
-				out[down] += push
+	out, order := slices.Clone(at), make([]int, len(at))
+	for i := range order {
+		order[i] = i
+	}
+	slices.SortStableFunc(order, func(a, b int) int { return cmp.Compare(at[a], at[b]) })
+	for range 40 * len(at) { // each pass halves what is left to do
+		for i := 1; i < len(order); i++ {
+			upper, lower := &out[order[i-1]], &out[order[i]]
+			if short := least - (*lower - *upper); short > 0 {
+				*upper, *lower = *upper-short/2, *lower+short/2
 			}
 		}
 	}
