@@ -72,6 +72,7 @@ var cycleFigures = []cycleFigure{
 	{"mean", "mean_degc", "degC", func(s translate.Side) float64 { return s.Figures.Mean }},
 	{"operations a year", "operations_per_year", "", func(s translate.Side) float64 { return s.Figures.OperationsPerYear }},
 	{"operations a year, busiest", "operations_per_year_busiest", "", func(s translate.Side) float64 { return s.Busiest.Operations }},
+	{"mean, busiest", "mean_degc_busiest", "degC", func(s translate.Side) float64 { return s.Busiest.Mean }},
 	{"hours on a year", "hours_on_per_year", "h", func(s translate.Side) float64 { return 8760 * s.Figures.Duty() }},
 	{"hours on a year, busiest", "hours_on_per_year_busiest", "h", func(s translate.Side) float64 { return s.Busiest.HoursOn }},
 	{"energy share", "energy_share", "", func(s translate.Side) float64 { return s.Figures.Duty() }},
@@ -84,7 +85,7 @@ func (f cycleFigure) value(s translate.Side) (float64, bool) {
 		return 0, false
 	}
 	v := f.of(s)
-	return v, !math.IsNaN(v) && !math.IsInf(v, 0) && (v != 0 || !strings.HasSuffix(f.key, "_busiest"))
+	return v, !math.IsNaN(v) && !math.IsInf(v, 0) && (s.Busiest.Operations > 0 || !strings.HasSuffix(f.key, "_busiest"))
 }
 
 func (f cycleFigure) text(s translate.Side) string {
