@@ -58,13 +58,13 @@
  * practice): CABINET_PROBE_FAULT_AFTER + CABINET_PROBE_GOOD_RUN
  */
 #define PROVER2_CABINET_PROBE_PROVE_WITHIN 12u
-/* steps: software lag 59.9 s (controls[0].match, line 51): first-order lag in the program: each
- * step of 250 ms goes 1/240 of the way to 2048 times the reading, which is 59.9 s (+0.13 % of what
- * was solved for); it comes to within 0.117 counts of a constant reading
+/* steps: software lag 56.4 s (controls[0].match, line 51): first-order lag in the program: each
+ * step of 250 ms goes 1/226 of the way to 2048 times the reading, which is 56.4 s (-0.1 % of what
+ * was solved for); it comes to within 0.11 counts of a constant reading
  */
-#define PROVER2_CABINET_STAT_LAG 240
+#define PROVER2_CABINET_STAT_LAG 226
 /* parts a count: as fine as the lag keeps a reading (controls[0].match, line 51): the smallest
- * power of two with which (240 − 1)/2048 counts is no more than the error allowed
+ * power of two with which (226 − 1)/2048 counts is no more than the error allowed
  */
 #define PROVER2_CABINET_STAT_COUNT 2048
 /* 1/2048 counts: 36 degC (controls[0].makes_at, line 45): the sheet has make 36 degC and break 38
