@@ -318,15 +318,37 @@ func crossing(f func(float64) float64, start, scale, times float64) (float64, bo
 		}
 		low, high = high, start+2*(high-start)
 	}
-	for range 200 {
+	// False position of the Illinois kind where both ends have a value, halves
+	// otherwise, and whenever it gains less than half in two steps.
+	vLow, vHigh := f(low), f(high)
+	side, width := 0, math.Inf(1)
+	for i := range 200 {
 		middle := (low + high) / 2
-		if middle == low || middle == high {
+		if high-low <= 1e-13*math.Abs(high) || middle == low || middle == high {
 			break
 		}
-		if f(middle) >= 0 {
-			high = middle
+		if straight := (low*vHigh - high*vLow) / (vHigh - vLow); straight > low && straight < high && (i%3 != 2 || high-low < width/2) {
+			middle = straight
+		}
+		if i%3 == 2 {
+			width = high - low
+		}
+		v := f(middle)
+		if v >= 0 {
+			high, vHigh = middle, v
+			if side > 0 {
+				vLow /= 2
+			}
+			side = 1
 		} else {
-			low = middle
+			low, vLow = middle, v
+			if side < 0 {
+				vHigh /= 2
+			}
+			side = -1
+		}
+		if v == 0 {
+			break
 		}
 	}
 	return high, true
