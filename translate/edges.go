@@ -57,7 +57,7 @@ func (b *builder) edges(c *survey.Control, p *Probe, acts bool, scale int64) (ma
 			Origin: origin(from), Working: b.matchWorking(c) + h.Working,
 		}
 		if scale > 1 {
-			k.Value, k.Unit = smoothedEdge(h.Counts, h.AtLeast, scale), fmt.Sprintf("parts of a count, %d each", scale)
+			k.Value, k.Unit = smoothedEdge(h.Counts, h.AtLeast, scale), fmt.Sprintf("1/%d counts", scale)
 			k.Working += fmt.Sprintf("; its edge, half a count on, in parts: %d", k.Value)
 		}
 		return &edge{Const: b.constant(k), AtLeast: h.AtLeast, At: h.SwitchesAt}

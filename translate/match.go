@@ -83,34 +83,45 @@ func (b *builder) matchRequest(c *survey.Control, chain *sensing.Chain, keep the
 
 // edgeLimits are how low and how high a new threshold may lie: inside what the
 // probe can be believed in, short of every danger, and short of where a limit
-// that stays might trip, with its tolerance and the worst error of the new
-// chain. The sheet's own thresholds are always allowed; where they are too near
-// to a limit, a finding says so.
+// might trip, with its tolerance and the worst error of the new chain. The
+// sheet's own thresholds are always allowed; where they are too near to a
+// limit, a finding says so.
 func (b *builder) edgeLimits(c *survey.Control, chain *sensing.Chain) (low, high float64) {
-	low, high = chain.Valid()
 	worst := 0.0
 	if budget, err := chain.Budget(c.BreaksAt.V); err == nil {
 		worst = budget.WorstCase
 	}
+	low, high = chain.Valid()
+	floor, ceiling := b.ends(c, worst, 1)
+	low, high = math.Max(low, floor), math.Min(high, ceiling)
+	return math.Min(low, math.Min(c.MakesAt.V, c.BreaksAt.V)), math.Max(high, math.Max(c.MakesAt.V, c.BreaksAt.V))
+}
+
+// ends are the nearest dangers and limits below and above a control, less an
+// error in K and so many times the limits' own tolerances; infinite where
+// there is none.
+func (b *builder) ends(c *survey.Control, less, tolerances float64) (floor, ceiling float64) {
+	floor, ceiling = math.Inf(-1), math.Inf(1)
 	for _, d := range b.survey.Dangers {
 		if d.Above.Set {
-			high = math.Min(high, d.Above.V-worst)
+			ceiling = math.Min(ceiling, d.Above.V-less)
 		}
 		if d.Below.Set {
-			low = math.Max(low, d.Below.V+worst)
+			floor = math.Max(floor, d.Below.V+less)
 		}
 	}
 	load := b.driven(c)
 	for _, x := range b.survey.Controls {
+		tolerance := less + tolerances*x.Tolerance.V
 		switch {
 		case x == c || !x.Switching() || !x.BreaksAt.Set || x.Duty.V == survey.Operating, x.Plan.V != survey.Replace && !x.Cuts.Has(load.ID.V):
 		case x.Action.V == survey.BreaksOnRise:
-			high = math.Min(high, x.BreaksAt.V-x.Tolerance.V-worst)
+			ceiling = math.Min(ceiling, x.BreaksAt.V-tolerance)
 		default:
-			low = math.Max(low, x.BreaksAt.V+x.Tolerance.V+worst)
+			floor = math.Max(floor, x.BreaksAt.V+tolerance)
 		}
 	}
-	return math.Min(low, math.Min(c.MakesAt.V, c.BreaksAt.V)), math.Max(high, math.Max(c.MakesAt.V, c.BreaksAt.V))
+	return floor, ceiling
 }
 
 // matched notes the new control that was found, and the nearest one that the
@@ -119,6 +130,7 @@ func (b *builder) matched(c *survey.Control, l *survey.Load, chain *sensing.Chai
 	fs, from := &b.spec.Figures, c.Match.Path
 	m := Match{Keep: r.Keep, Make: found.Switching.Make, Break: found.Switching.Break, Kept: found.Feasible, Working: found.Because, Costs: found.Costs}
 	if found.Filter > 0 {
+		found.Filter = b.lagAfterRounding(c, chain, r, found.Filter)
 		plan, err := b.lagInIntegers(c, chain, found.Filter)
 		if err != nil {
 			m.Kept = false
@@ -147,6 +159,22 @@ func (b *builder) matched(c *survey.Control, l *survey.Load, chain *sensing.Chai
 	b.nearest(c, l, r, found)
 }
 
+// lagAfterRounding solves for the software lag anew with the thresholds at
+// which the program will really switch.
+func (b *builder) lagAfterRounding(c *survey.Control, chain *sensing.Chain, r thermal.MatchRequest, lag float64) float64 {
+	said := len(b.diags)
+	t, ok := b.thresholds(c, chain)
+	b.diags = b.diags[:said] // it will be said when the thresholds are worked out for good
+	if !ok {
+		return lag
+	}
+	again, err := thermal.LagAt(r, t.Make.SwitchesAt, t.Break.SwitchesAt)
+	if err != nil || !again.Feasible || again.Filter == 0 {
+		return lag
+	}
+	return again.Filter
+}
+
 // nearest notes the control next to a found one whose contact lives for
 // leastYears, where the found one's does not.
 func (b *builder) nearest(c *survey.Control, l *survey.Load, r thermal.MatchRequest, found thermal.Matched) {
@@ -161,15 +189,37 @@ func (b *builder) nearest(c *survey.Control, l *survey.Load, r thermal.MatchRequ
 	if found.New.OperationsPerYear <= r.MostOperations {
 		return
 	}
+	b.nearestDifferential(c, r, found)
 	near, err := thermal.Match(r)
 	if err != nil || near.New.OperationsPerYear > r.MostOperations*(1+1e-6) {
 		fs.open(c.ID.V, "nearest_software_lag", "s", from, fmt.Sprintf("no software lag brings it to the %.0f operations a year that the contact's life allows", r.MostOperations))
+		return
+	}
+	if floor, ceiling := b.ends(c, 0, 0); near.New.High >= ceiling || near.New.Low <= floor {
+		fs.open(c.ID.V, "nearest_software_lag", "s", from, fmt.Sprintf("none: a software lag of %s would bring it to %.0f operations a year, but the medium would swing from %s to %s, into a limit or a danger",
+			Span(near.Filter), r.MostOperations, Degrees(near.New.Low), Degrees(near.New.High)))
 		return
 	}
 	near.Because += fmt.Sprintf(", with which the medium swings by %s", Kelvins(near.New.Swing()))
 	fs.add(c.ID.V, "nearest_software_lag", near.Filter, "s", from, near.Because)
 	fs.add(c.ID.V, "nearest_operations_per_year", near.New.OperationsPerYear, "1/year", from, near.Because)
 	fs.add(c.ID.V, "nearest_swing", near.New.Swing(), "K", from, near.Because)
+}
+
+// nearestDifferential is the same with a wider differential instead of a lag.
+func (b *builder) nearestDifferential(c *survey.Control, r thermal.MatchRequest, found thermal.Matched) {
+	fs, from := &b.spec.Figures, c.Match.Path
+	wide, err := thermal.Widened(r, found.Switching, found.Filter)
+	switch {
+	case err != nil:
+		fs.open(c.ID.V, "nearest_differential", "K", from, "not determined: "+err.Error())
+	case !wide.Feasible:
+		fs.open(c.ID.V, "nearest_differential", "K", from, "none: "+wide.Because)
+	default:
+		s := wide.Switching
+		fs.add(c.ID.V, "nearest_differential", math.Abs(s.Break-s.Make), "K", from, fmt.Sprintf("%s, make %s and break %s, with which the contact lives for %d years and the medium swings by %s",
+			wide.Because, Degrees(s.Make), Degrees(s.Break), leastYears, Kelvins(wide.New.Swing())))
+	}
 }
 
 // life is how many operations the contact that drives a load lives; reason

@@ -31,7 +31,7 @@ func (b *builder) smoothed(c *survey.Control, p *Probe) (reads *logic.Var, scale
 		Working: lagText(m, b.step),
 	})
 	one := b.constant(logic.Const{
-		Name: id + "_count", Value: f.Scale, Unit: "parts", Means: "parts of a count that the lag keeps", Origin: origin(c.Match.Source),
+		Name: id + "_count", Value: f.Scale, Unit: "parts a count", Means: "as fine as the lag keeps a reading", Origin: origin(c.Match.Source),
 		Working: fmt.Sprintf("the smallest power of two with which (%d − 1)/%d counts is no more than the error allowed", f.Divisor, f.Scale),
 	})
 	y := b.state(logic.Var{

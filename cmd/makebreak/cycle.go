@@ -7,6 +7,7 @@ import (
 	"math"
 	"os"
 	"path/filepath"
+	"strconv"
 	"strings"
 
 	"github.com/guptarohit/asciigraph"
@@ -71,6 +72,7 @@ var cycleFigures = []cycleFigure{
 	{"mean", "mean_degc", "degC", func(s translate.Side) float64 { return s.Figures.Mean }},
 	{"operations a year", "operations_per_year", "", func(s translate.Side) float64 { return s.Figures.OperationsPerYear }},
 	{"operations a year, busiest", "operations_per_year_busiest", "", func(s translate.Side) float64 { return s.Busiest.Operations }},
+	{"mean, busiest", "mean_degc_busiest", "degC", func(s translate.Side) float64 { return s.Busiest.Mean }},
 	{"hours on a year", "hours_on_per_year", "h", func(s translate.Side) float64 { return 8760 * s.Figures.Duty() }},
 	{"hours on a year, busiest", "hours_on_per_year_busiest", "h", func(s translate.Side) float64 { return s.Busiest.HoursOn }},
 	{"energy share", "energy_share", "", func(s translate.Side) float64 { return s.Figures.Duty() }},
@@ -83,7 +85,7 @@ func (f cycleFigure) value(s translate.Side) (float64, bool) {
 		return 0, false
 	}
 	v := f.of(s)
-	return v, !math.IsNaN(v) && !math.IsInf(v, 0) && (v != 0 || !strings.HasSuffix(f.key, "_busiest"))
+	return v, !math.IsNaN(v) && !math.IsInf(v, 0) && (s.Busiest.Operations > 0 || !strings.HasSuffix(f.key, "_busiest"))
 }
 
 func (f cycleFigure) text(s translate.Side) string {
@@ -108,8 +110,11 @@ func (f cycleFigure) text(s translate.Side) string {
 // printCycles prints old beside new, how both were worked out, and on the
 // screen a plot.
 func printCycles(out io.Writer, as string, spec *translate.Specification) error {
-	if as == "json" {
+	switch as {
+	case "json":
 		return printCyclesJSON(out, spec)
+	case "csv":
+		return printCyclesCSV(out, spec)
 	}
 	var rows [][]string
 	for _, c := range spec.Cycles {
@@ -117,7 +122,7 @@ func printCycles(out io.Writer, as string, spec *translate.Specification) error 
 			rows = append(rows, []string{c.Control.ID.V, f.name, f.text(c.Old), f.text(c.New), change(f, c)})
 		}
 	}
-	if err := printTable(out, as, []string{"control", "figure", "old", "new", "change"}, rows); err != nil || as == "csv" {
+	if err := printTable(out, as, []string{"control", "figure", "old", "new", "change"}, rows); err != nil {
 		return err
 	}
 	escape := visible
@@ -180,6 +185,28 @@ func cycleWorking(spec *translate.Specification, c *translate.ControlCycle) []st
 		lines = append(lines, fmt.Sprintf("%s, contact life: %s.", id, f.Working))
 	}
 	return lines
+}
+
+// printCyclesCSV prints plain numbers, so that a spreadsheet can go on with
+// them. Where there is none, the cell is empty and why says the reason.
+func printCyclesCSV(out io.Writer, spec *translate.Specification) error {
+	var rows [][]string
+	cell := func(f cycleFigure, s translate.Side) string {
+		if v, ok := f.value(s); ok {
+			return strconv.FormatFloat(v, 'g', 10, 64)
+		}
+		return ""
+	}
+	for _, c := range spec.Cycles {
+		for _, f := range cycleFigures {
+			why := c.Old.Why
+			if why == "" {
+				why = c.New.Why
+			}
+			rows = append(rows, []string{c.Control.ID.V, f.key, cell(f, c.Old), cell(f, c.New), why})
+		}
+	}
+	return printTable(out, "csv", []string{"control", "figure", "old", "new", "why"}, rows)
 }
 
 type cyclesJSON struct {

@@ -120,8 +120,12 @@ func contacts(spec *translate.Specification) []check {
 		expect := func(edge, does string, at float64, counts int64) string {
 			return fmt.Sprintf("%s at %s%s (%d counts)", does, degrees(at), budgeted(spec, c.ID.V, edge), counts)
 		}
+		slowly := " the probe slowly, in a bath, beside a reference thermometer"
+		if lag := spec.Matches[c.ID.V].Filter.Lag; lag > 0 {
+			slowly += fmt.Sprintf(" and behind a software lag of %s: wait %s at each step", span(lag), span(5*lag))
+		}
 		cs = append(cs,
-			check{c.ID.V, off + " the probe slowly, in a bath, beside a reference thermometer", expect("break", "breaks", t.Break.SwitchesAt, t.Break.Counts)},
+			check{c.ID.V, off + slowly, expect("break", "breaks", t.Break.SwitchesAt, t.Break.Counts)},
 			check{c.ID.V, on + " it slowly", expect("make", "makes", t.Make.SwitchesAt, t.Make.Counts)})
 		if k.Latches {
 			cs = append(cs, latches(spec, c, k)...)

@@ -1,9 +1,11 @@
 package sheets
 
 import (
+	"cmp"
 	"fmt"
 	"html"
 	"math"
+	"slices"
 	"strconv"
 	"strings"
 	"unicode/utf8"
@@ -100,20 +102,16 @@ func ticks(low, high float64, n int) []float64 {
 
 // apart moves labels that would lie on each other apart, keeping their order.
 func apart(at []float64, least float64) []float64 {
-	out := append([]float64(nil), at...)
-	for range 4 * len(out) {
-		for i := range out {
-			for j := range out {
-				if i == j || math.Abs(out[i]-out[j]) >= least-1e-9 {
-					continue
-				}
-				up, down := i, j
-				if out[i] > out[j] || out[i] == out[j] && i > j {
-					up, down = j, i
-				}
-				push := (least - math.Abs(out[i]-out[j])) / 2
-				out[up] -= push
-				out[down] += push
+	out, order := slices.Clone(at), make([]int, len(at))
+	for i := range order {
+		order[i] = i
+	}
+	slices.SortStableFunc(order, func(a, b int) int { return cmp.Compare(at[a], at[b]) })
+	for range 40 * len(at) { // each pass halves what is left to do
+		for i := 1; i < len(order); i++ {
+			upper, lower := &out[order[i-1]], &out[order[i]]
+			if short := least - (*lower - *upper); short > 0 {
+				*upper, *lower = *upper-short/2, *lower+short/2
 			}
 		}
 	}
@@ -206,7 +204,7 @@ func tick(v float64) string { return strconv.FormatFloat(v, 'g', 6, 64) }
 func (p Plot) SVG() []byte {
 	var c svg
 	fmt.Fprintf(&c, `<svg xmlns="http://www.w3.org/2000/svg" viewBox="0 0 %g %g" role="img" aria-labelledby="title about" font-family="sans-serif" fill="%s">`+"\n", plotWidth, plotHeight, ink)
-	fmt.Fprintf(&c, "<title id=\"title\">%s</title>\n<desc id=\"about\">%s</desc>\n", xml(p.Title), xml(p.About))
+	fmt.Fprintf(&c, "<title id=\"title\">%s</title>\n<desc id=\"about\">%s</desc>\n", xmlText(p.Title), xmlText(p.About))
 	p.draw(&c)
 	c.WriteString("</svg>\n")
 	return []byte(c.String())
@@ -236,8 +234,8 @@ func (c *svg) rect(x, y, width, height float64, colour string) {
 }
 
 func (c *svg) text(x, y, size float64, side anchor, s string) {
-	fmt.Fprintf(c, `<text x="%.1f" y="%.1f" font-size="%g" text-anchor="%s">%s</text>`+"\n", x, y, size, side, xml(s))
+	fmt.Fprintf(c, `<text x="%.1f" y="%.1f" font-size="%g" text-anchor="%s">%s</text>`+"\n", x, y, size, side, xmlText(s))
 }
 
-// xml makes text stand for itself in a picture; hidden characters are shown.
-func xml(s string) string { return html.EscapeString(Visible(s)) }
+// xmlText makes text stand for itself in a picture; hidden characters are shown.
+func xmlText(s string) string { return html.EscapeString(Visible(s)) }

@@ -142,7 +142,7 @@ func (a *assessor) bring(load string, want bool) (*bench, bool) {
 	}
 	choices := make([][]float64, len(sensors))
 	for i, s := range sensors {
-		choices[i] = temperatures(spec.Survey, s)
+		choices[i] = temperatures(spec, s)
 	}
 	temps := map[string]float64{}
 	var try func(i int) (*bench, bool)
@@ -163,9 +163,9 @@ func (a *assessor) bring(load string, want bool) (*bench, bool) {
 
 // temperatures lists what is worth trying for a sensor: just beyond each edge
 // of each control that it serves.
-func temperatures(s *survey.Survey, sensor string) []float64 {
+func temperatures(spec *translate.Specification, sensor string) []float64 {
 	var ts []float64
-	for _, c := range s.Controls {
+	for _, c := range spec.Survey.Controls {
 		if c.Sensor.V != sensor || !c.BreaksAt.Set || !c.MakesAt.Set {
 			continue
 		}
@@ -173,7 +173,11 @@ func temperatures(s *survey.Survey, sensor string) []float64 {
 		if c.Action.V == survey.BreaksOnRise {
 			beyond = -1
 		}
-		ts = append(ts, c.MakesAt.V+beyond, c.BreaksAt.V-beyond)
+		makes, breaks := c.MakesAt.V, c.BreaksAt.V
+		if t, ok := spec.Thresholds[c.ID.V]; ok { // those of the program, which may have been matched
+			makes, breaks = t.Make.SwitchesAt, t.Break.SwitchesAt
+		}
+		ts = append(ts, makes+beyond, breaks-beyond)
 	}
 	if len(ts) == 0 {
 		ts = []float64{20}
@@ -185,7 +189,7 @@ func attempt(b *bench, load string, want bool, temps map[string]float64) (*bench
 	spec := b.spec
 	for _, s := range spec.Survey.Electronics.Sensors {
 		if _, given := temps[s.ID.V]; !given && spec.Plan.Sensors[s.ID.V] != nil {
-			b.warm(s.ID.V, temperatures(spec.Survey, s.ID.V)[0])
+			b.warm(s.ID.V, temperatures(spec, s.ID.V)[0])
 		}
 	}
 	for s, t := range temps {

@@ -43,7 +43,7 @@ func (a *assessor) positionWith(v *translate.Valve, f sensorFault) (end, string)
 	b := newBench(a.spec, a.run.Fork())
 	for _, s := range a.spec.Survey.Electronics.Sensors {
 		if a.spec.Plan.Sensors[s.ID.V] != nil {
-			b.warm(s.ID.V, temperatures(a.spec.Survey, s.ID.V)[0])
+			b.warm(s.ID.V, temperatures(a.spec, s.ID.V)[0])
 		}
 	}
 	sensor := v.By.Probe.Sensor.ID.V
@@ -161,7 +161,7 @@ func (a *assessor) indication(n *translate.Indication) {
 	before := end{unsure, "unknown: what the old pointer does when its element fails is not on the sheet"}
 	b := newBench(a.spec, a.run.Fork())
 	open, _, _ := circuits(a.spec, n.Probe.Sensor)
-	b.warm(n.Probe.Sensor.ID.V, temperatures(a.spec.Survey, n.Probe.Sensor.ID.V)[0])
+	b.warm(n.Probe.Sensor.ID.V, temperatures(a.spec, n.Probe.Sensor.ID.V)[0])
 	b.steps(settling(a.spec))
 	now := end{unsure, "unknown: what it reads then is not on the sheet"}
 	if open.known {

@@ -4,6 +4,7 @@ import (
 	"fmt"
 	"math"
 	"slices"
+	"strings"
 
 	"makebreak/survey"
 )
@@ -184,7 +185,7 @@ func (j *judge) overshoot(c *survey.Control) (k float64, why string) {
 	case !ok:
 		return math.NaN(), "no process is stated"
 	case f.Value == nil:
-		return math.NaN(), f.Reason
+		return math.NaN(), strings.TrimPrefix(f.Reason, "not determined: ")
 	}
 	return math.Max(0, *f.Value), ""
 }

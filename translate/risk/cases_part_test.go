@@ -129,6 +129,9 @@ var partCases = []ruleCase{
 	{rule: "contact_life", about: "heater", grade: Act, base: "tank",
 		given:      figures{{"heater", "years_to_endurance"}: 12, {"heater", "years_to_endurance_busiest"}: 8, {"heater", "operations_per_year"}: 8000},
 		givenQuiet: figures{{"heater", "years_to_endurance"}: 12, {"heater", "years_to_endurance_busiest"}: 11, {"heater", "operations_per_year"}: 8000}},
+	// The measured rise may count against a limit: 85 + 4 K tolerance + 8 K is past 95 degC.
+	{rule: "limit_beyond_danger", about: "high_limit/boiling", grade: Stop, base: "tank",
+		given: figures{{"high_limit", "overshoot_as_measured"}: 8}, givenQuiet: figures{{"high_limit", "overshoot_as_measured"}: 5}},
 	{rule: "match_not_kept", about: "tank_stat", grade: Act, base: "tank",
 		given: figures{{"tank_stat", "match_kept"}: 0}, givenQuiet: figures{{"tank_stat", "match_kept"}: 1}},
 	{rule: "match_beyond_contact_life", about: "tank_stat", grade: Note, base: "tank",

@@ -90,6 +90,12 @@ func (k *course) zeros(level int, until float64, into []float64) []float64 {
 	if level >= k.levels-1 {
 		return into
 	}
+	if level == 1 && k.chain.n == 2 && k.chain.warmerRate == 0 {
+		if t, found := k.turn(); found && t < until {
+			into = append(into, t)
+		}
+		return into
+	}
 	var buffer [maxModes]float64
 	marks := append(k.zeros(level+1, until, buffer[:0]), until)
 	before, vBefore := 0.0, k.at(level, 0)
@@ -103,6 +109,26 @@ func (k *course) zeros(level int, until float64, into []float64) []float64 {
 		}
 	}
 	return into
+}
+
+// turn is the time at which a medium and one lag behind it stand equal, which
+// is where the sensed temperature turns. With deviations x and y at the start
+// and rates a and b, x·e^(−at) = (y − x·b/(b−a))·e^(−bt) + x·b/(b−a)·e^(−at); it
+// follows
+//
+//	(e^((b−a)t) − 1)/(b − a) = (1 − y/x)/a,
+//
+// which needs no special case for equal lags.
+func (k *course) turn() (t float64, found bool) {
+	x, y, apart := k.from[0], k.from[1], k.chain.rate[1]-k.chain.rate[0]
+	u := (1 - y/x) / k.chain.rate[0]
+	switch {
+	case !(u > 0) || apart*u <= -1: // never, or behind
+		return 0, false
+	case math.Abs(apart*u) < 1e-300:
+		return u, true
+	}
+	return math.Log1p(apart*u) / apart, true
 }
 
 // first is the first time in [0, until] at which the sensed temperature has

@@ -75,7 +75,8 @@ func (l Loop) Steady() (Figures, error) {
 			return r.plainFigures(on, off), nil
 		}
 	}
-	p, no := r.periodic()
+	general := r // the closed form above needs no memory of its own
+	p, no := general.periodic()
 	if no != nil {
 		return Figures{}, no
 	}

@@ -76,6 +76,59 @@ func Match(r MatchRequest) (Matched, error) {
 	return m.within(out)
 }
 
+// LagAt finds the software lag with which a control with the given thresholds,
+// in degC, keeps the swing or the rate: for thresholds that were rounded since
+// Match chose a lag. Feasible is false where none does. Errors are those of
+// Match.
+func LagAt(r MatchRequest, makes, breaks float64) (Matched, error) {
+	old, err := r.Old.Steady()
+	if err != nil {
+		return Matched{}, err
+	}
+	m := matching{MatchRequest: r, old: old}
+	m.Old.Switching.Make, m.Old.Switching.Break = makes, breaks // what bySoftwareLag keeps
+	if err := m.Old.Validate(); err != nil {
+		return Matched{}, err
+	}
+	miss := func(f Figures) float64 { return f.Period() - old.Period() }
+	if r.Keep == KeepSwing {
+		miss = func(f Figures) float64 { return f.Swing() - old.Swing() }
+	}
+	return m.bySoftwareLag("with rounded thresholds", miss)
+}
+
+// Widened widens the differential of a new control about its middle, with its
+// software lag as it is, until it operates no oftener than r.MostOperations a
+// year. Feasible is false, with the reason, where no differential within the
+// limits of the request does. Errors are those of Match.
+func Widened(r MatchRequest, s Switching, filter float64) (Matched, error) {
+	old, err := r.Old.Steady()
+	if err != nil {
+		return Matched{}, err
+	}
+	if err := positive("operations a year", r.MostOperations); err != nil {
+		return Matched{}, err
+	}
+	m := matching{MatchRequest: r, old: old}
+	middle, half := (s.Make+s.Break)/2, (s.Break-s.Make)/2
+	slower := func(factor float64) float64 {
+		f, err := m.loop(middle+factor*half, middle-factor*half, filter).Steady()
+		if err != nil {
+			return math.NaN()
+		}
+		return f.Period() - secondsPerYear/r.MostOperations
+	}
+	factor, found := crossing(slower, 1, 0.1, 1e3)
+	if !found || half == 0 {
+		return Matched{Old: old, Because: fmt.Sprintf("no differential brings it to %.0f operations a year", r.MostOperations)}, nil
+	}
+	makes, breaks := middle-factor*half, middle+factor*half
+	if why := m.allowed(makes, breaks); why != "" {
+		return Matched{Old: old, Because: why}, nil
+	}
+	return m.matched(m.loop(breaks, makes, filter), "a differential of %.3g K about the same middle", 2*factor*math.Abs(half))
+}
+
 type matching struct {
 	MatchRequest
 	old Figures
@@ -266,15 +319,37 @@ func crossing(f func(float64) float64, start, scale, times float64) (float64, bo
 		}
 		low, high = high, start+2*(high-start)
 	}
-	for range 200 {
+	// False position of the Illinois kind where both ends have a value, halves
+	// otherwise, and whenever it gains less than half in two steps.
+	vLow, vHigh := f(low), f(high)
+	side, width := 0, math.Inf(1)
+	for i := range 200 {
 		middle := (low + high) / 2
-		if middle == low || middle == high {
+		if high-low <= 1e-13*math.Abs(high) || middle == low || middle == high {
 			break
 		}
-		if f(middle) >= 0 {
-			high = middle
+		if straight := (low*vHigh - high*vLow) / (vHigh - vLow); straight > low && straight < high && (i%3 != 2 || high-low < width/2) {
+			middle = straight
+		}
+		if i%3 == 2 {
+			width = high - low
+		}
+		v := f(middle)
+		if v >= 0 {
+			high, vHigh = middle, v
+			if side > 0 {
+				vLow /= 2
+			}
+			side = 1
 		} else {
-			low = middle
+			low, vLow = middle, v
+			if side < 0 {
+				vHigh /= 2
+			}
+			side = -1
+		}
+		if v == 0 {
+			break
 		}
 	}
 	return high, true

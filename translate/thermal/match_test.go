@@ -98,6 +98,25 @@ func TestMatchKeepsItsLimits(t *testing.T) {
 	}
 }
 
+// A wider differential that keeps to a number of operations does keep to it,
+// and is refused where an edge may not go there.
+func TestWidened(t *testing.T) {
+	r := MatchRequest{Old: tank(45), Keep: KeepThresholds, NewLag: 8, MostOperations: 8000}
+	m, err := Widened(r, r.Old.Switching, 0)
+	if err != nil || !m.Feasible {
+		t.Fatalf("%+v, %v", m, err)
+	}
+	agrees(t, "operations", m.New.OperationsPerYear, 8000, 1e-9)
+	isNear(t, "middle", (m.Switching.Make+m.Switching.Break)/2, 57, 1e-9)
+	if m.Switching.Break-m.Switching.Make <= 6 {
+		t.Errorf("not wider: %+v", m.Switching)
+	}
+	r.HighestEdge = Given(60.2)
+	if m, err = Widened(r, r.Old.Switching, 0); err != nil || m.Feasible {
+		t.Errorf("past the highest edge: %+v, %v", m, err)
+	}
+}
+
 func TestMatchOfCooling(t *testing.T) {
 	old := Loop{Process{-30, 25, 3600, 30}, Sensing{Lag: 60}, Switching{Make: -16, Break: -20}}
 	m := matched(t, MatchRequest{Old: old, Keep: KeepSwing, NewLag: 10})

@@ -362,7 +362,7 @@ func (p *periodic) begin() run {
 	m, _ := p.phases()
 	st := p.at(&o, m)
 	st.warmer, _ = p.warmers()
-	s := run{relay: p.relay, state: st}
+	s := run{relay: p.relay, state: st, changes: make([]float64, 0, 4)}
 	for k := math.Ceil(p.dead/period) + 1; k >= 1; k-- {
 		for i, t := range [2]float64{-k * period, -k*period + p.onTime} {
 			if at := t + p.dead; at > 0 {

@@ -59,28 +59,28 @@
  * practice): CABINET_PROBE_FAULT_AFTER + CABINET_PROBE_GOOD_RUN
  */
 #define PROVER2_CABINET_PROBE_PROVE_WITHIN 12u
-/* steps: software lag 59.9 s (controls[0].match, line 51): first-order lag in the program: each
- * step of 250 ms goes 1/240 of the way to 2048 times the reading, which is 59.9 s (+0.13 % of what
- * was solved for); it comes to within 0.117 counts of a constant reading
+/* steps: software lag 56.4 s (controls[0].match, line 51): first-order lag in the program: each
+ * step of 250 ms goes 1/226 of the way to 2048 times the reading, which is 56.4 s (-0.1 % of what
+ * was solved for); it comes to within 0.11 counts of a constant reading
  */
-#define PROVER2_CABINET_STAT_LAG 240
-/* parts: parts of a count that the lag keeps (controls[0].match, line 51): the smallest power of
- * two with which (240 − 1)/2048 counts is no more than the error allowed
+#define PROVER2_CABINET_STAT_LAG 226
+/* parts a count: as fine as the lag keeps a reading (controls[0].match, line 51): the smallest
+ * power of two with which (226 − 1)/2048 counts is no more than the error allowed
  */
 #define PROVER2_CABINET_STAT_COUNT 2048
-/* parts of a count, 2048 each: 36 degC (controls[0].makes_at, line 45): the sheet has make 36 degC
- * and break 38 degC; match cycle_rate: a threshold would be at 38.99 degC, above the highest
- * allowed, 38 degC; thresholds as they were, with a software lag instead; 36 degC is 513.700 counts
- * by thermistor (beta); rounded to the nearest edge of a count: at least 514, which changes at
- * 35.9716 degC; one count is 0.0945 K; moved by 1 counts, so that the differential is not below the
- * one asked for: 515, which changes at 35.8772 degC; its edge, half a count on, in parts: 1053696
+/* 1/2048 counts: 36 degC (controls[0].makes_at, line 45): the sheet has make 36 degC and break 38
+ * degC; match cycle_rate: a threshold would be at 38.99 degC, above the highest allowed, 38 degC;
+ * thresholds as they were, with a software lag instead; 36 degC is 513.700 counts by thermistor
+ * (beta); rounded to the nearest edge of a count: at least 514, which changes at 35.9716 degC; one
+ * count is 0.0945 K; moved by 1 counts, so that the differential is not below the one asked for:
+ * 515, which changes at 35.8772 degC; its edge, half a count on, in parts: 1053696
  */
 #define PROVER2_CABINET_STAT_MAKE UINT32_C(1053696)
-/* parts of a count, 2048 each: 38 degC (controls[0].breaks_at, line 46): the sheet has make 36 degC
- * and break 38 degC; match cycle_rate: a threshold would be at 38.99 degC, above the highest
- * allowed, 38 degC; thresholds as they were, with a software lag instead; 38 degC is 492.684 counts
- * by thermistor (beta); rounded to the nearest edge of a count: at most 492, which changes at
- * 37.9697 degC; one count is 0.0959 K; its edge, half a count on, in parts: 1008640
+/* 1/2048 counts: 38 degC (controls[0].breaks_at, line 46): the sheet has make 36 degC and break 38
+ * degC; match cycle_rate: a threshold would be at 38.99 degC, above the highest allowed, 38 degC;
+ * thresholds as they were, with a software lag instead; 38 degC is 492.684 counts by thermistor
+ * (beta); rounded to the nearest edge of a count: at most 492, which changes at 37.9697 degC; one
+ * count is 0.0959 K; its edge, half a count on, in parts: 1008640
  */
 #define PROVER2_CABINET_STAT_BREAK UINT32_C(1008640)
 /* steps: an effect is expected within 3 min 4 s (controls[0].observed.on): 3 times the slowest

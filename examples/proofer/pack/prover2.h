@@ -89,7 +89,7 @@ struct prover2 {
     uint16_t cabinet_probe_last; /* thermistor bead in the air stream: last believable sample */
     /* thermistor bead in the air stream: the believable sample before that */
     uint16_t cabinet_probe_before;
-    uint32_t cabinet_stat_smoothed; /* reading behind a lag of 59.9 s, in parts of a count */
+    uint32_t cabinet_stat_smoothed; /* reading behind a lag of 56.4 s, in parts of a count */
     uint8_t cabinet_stat; /* enum prover2_cabinet_stat: snap disc behind the back panel */
     uint8_t heater; /* enum prover2_heater: 1.2 kW heating mat */
     uint16_t heater_effect_from; /* reading furthest back since heater came on */
