@@ -75,8 +75,8 @@ func (b *builder) flicker(l *survey.Load, o *survey.Output) {
 func (b *builder) failures() {
 	for _, s := range b.survey.Electronics.Sensors {
 		chain := b.spec.Chains[s.ID.V]
-		if chain == nil {
-			continue
+		if chain == nil || s.Kind.V == "millivolt" || s.Kind.V == "current" {
+			continue // nothing at all is an ordinary reading there
 		}
 		var unseen []string
 		for _, f := range chain.Failures() {

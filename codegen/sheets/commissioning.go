@@ -59,6 +59,8 @@ func checks(spec *translate.Specification, a *risk.Assessment) []check {
 	cs = append(cs, contacts(spec)...)
 	cs = append(cs, regulators(spec)...)
 	cs = append(cs, indications(spec)...)
+	cs = append(cs, pulsers(spec)...)
+	cs = append(cs, monitors(spec)...)
 	cs = append(cs, loads(spec)...)
 	cs = append(cs, runs(spec)...)
 	return append(cs, clocks(spec)...)

@@ -26,6 +26,9 @@ func Assess(spec *translate.Specification, view *risk.View) []Row {
 			}
 		}
 		for _, c := range spec.Survey.Controls {
+			if m := spec.Plan.Monitors[c.ID.V]; m != nil {
+				a.monitored(m)
+			}
 			if n := spec.Plan.Indications[c.ID.V]; n != nil {
 				a.indication(n)
 			}
@@ -80,6 +83,9 @@ func (a *assessor) load(l *translate.Switched) {
 	for _, n := range l.Load.RunsWhen.V.Tree.Names() {
 		if k := a.spec.Plan.Contacts[n]; k != nil {
 			a.contact(l, k)
+		}
+		if g := a.spec.Plan.Pulsers[n]; g != nil {
+			a.pulser(l, g)
 		}
 	}
 	for _, g := range a.spec.Survey.Signals {

@@ -36,6 +36,11 @@ func newBench(spec *translate.Specification, run *logic.Run) *bench {
 			b.set(k.Dial.Raw.Name, k.Dial.Marked)
 		}
 	}
+	for _, g := range spec.Plan.Pulsers {
+		if g.Dial != nil {
+			b.set(g.Dial.Raw.Name, g.Dial.Marked)
+		}
+	}
 	for _, g := range spec.Plan.Regulators {
 		if g.Dial != nil {
 			b.set(g.Dial.Raw.Name, g.Dial.Marked)

@@ -1,5 +1,7 @@
 package risk
 
+import "strings"
+
 const (
 	tankBothReplaced = "runs_when: tank_stat and high_limit and flow_proven"
 	tankThermocouple = "kind: type_k\n      class: 2\n      gain: 100\n      open_reads: floats\n"
@@ -44,6 +46,22 @@ var partCases = []ruleCase{
 	{rule: "pid_follows_counts", about: "tank_stat", grade: Act, base: "tank", fire: change{"plan: replace", "plan: replace\n    want: pid"},
 		given: figures{{"tank_stat", "sample"}: 2, {"tank_stat", "output_per_count"}: 22}, quiet: change{"plan: replace", "plan: replace\n    want: pid"},
 		givenQuiet: figures{{"tank_stat", "sample"}: 2, {"tank_stat", "output_per_count"}: 4}},
+	{rule: "flash_rate_regulated", about: "tank_stat", grade: Stop, base: "tank", fire: change{"    action: breaks_on_rise\n    senses: point\n    set_point: 60 degC\n    marks: break\n    differential: 6 K\n", "    action: pulses\n    rate: 90 /min\n    on_share: 50 %\n    road_vehicle: true\n    lamps: {count: 2, each: 21 W, supply: [11 V, 15 V], out_rate: 180 /min}\n",
+		"    min_on: 30 s\n    min_off: 60 s\n    observed: {on: 16 min 8 s, off: 34 min 18 s, high: 60.3 degC, low: 53.9 degC}\n    match: thresholds\n", ""}, given: figures{{"tank_stat", "rate"}: 130, {"tank_stat", "first_light"}: 0.02},
+		quiet: change{"    action: breaks_on_rise\n    senses: point\n    set_point: 60 degC\n    marks: break\n    differential: 6 K\n", "    action: pulses\n    rate: 90 /min\n    on_share: 50 %\n    road_vehicle: true\n    lamps: {count: 2, each: 21 W, supply: [11 V, 15 V], out_rate: 180 /min}\n",
+			"    min_on: 30 s\n    min_off: 60 s\n    observed: {on: 16 min 8 s, off: 34 min 18 s, high: 60.3 degC, low: 53.9 degC}\n    match: thresholds\n", ""}, givenQuiet: figures{{"tank_stat", "rate"}: 119, {"tank_stat", "first_light"}: 0.02}},
+	{rule: "lamp_failure_unseen", about: "tank_stat", grade: Stop, base: "tank", fire: change{"    action: breaks_on_rise\n    senses: point\n    set_point: 60 degC\n    marks: break\n    differential: 6 K\n", "    action: pulses\n    rate: 90 /min\n    on_share: 50 %\n    road_vehicle: true\n    lamps: {count: 2, each: 21 W, supply: [11 V, 15 V], out_rate: 180 /min}\n",
+		"    min_on: 30 s\n    min_off: 60 s\n    observed: {on: 16 min 8 s, off: 34 min 18 s, high: 60.3 degC, low: 53.9 degC}\n    match: thresholds\n", ""}, given: figures{{"tank_stat", "lamps_apart"}: 0.9},
+		quiet: change{"    action: breaks_on_rise\n    senses: point\n    set_point: 60 degC\n    marks: break\n    differential: 6 K\n", "    action: pulses\n    rate: 90 /min\n    on_share: 50 %\n    road_vehicle: true\n    lamps: {count: 2, each: 21 W, supply: [11 V, 15 V], out_rate: 180 /min}\n",
+			"    min_on: 30 s\n    min_off: 60 s\n    observed: {on: 16 min 8 s, off: 34 min 18 s, high: 60.3 degC, low: 53.9 degC}\n    match: thresholds\n", ""}, givenQuiet: figures{{"tank_stat", "lamps_apart"}: 1.3}},
+	{rule: "lamps_of_another_kind", about: "tank_stat", grade: Note, base: "tank", fire: change{"    action: breaks_on_rise\n    senses: point\n    set_point: 60 degC\n    marks: break\n    differential: 6 K\n", "    action: pulses\n    rate: 90 /min\n    on_share: 50 %\n    road_vehicle: true\n    lamps: {count: 2, each: 21 W, supply: [11 V, 15 V], out_rate: 180 /min}\n",
+		"    min_on: 30 s\n    min_off: 60 s\n    observed: {on: 16 min 8 s, off: 34 min 18 s, high: 60.3 degC, low: 53.9 degC}\n    match: thresholds\n", ""}},
+	{rule: "share_no_longer_moves", about: "tank_stat", grade: Note, base: "tank", fire: change{"    action: breaks_on_rise\n    senses: point\n    set_point: 60 degC\n    marks: break\n    differential: 6 K\n", "    action: pulses\n    rate: 90 /min\n    on_share: 50 %\n    road_vehicle: true\n    lamps: {count: 2, each: 21 W, supply: [11 V, 15 V], out_rate: 180 /min}\n",
+		"    min_on: 30 s\n    min_off: 60 s\n    observed: {on: 16 min 8 s, off: 34 min 18 s, high: 60.3 degC, low: 53.9 degC}\n    match: thresholds\n", "", "rate: 90 /min", "period: 40 s"}},
+	{rule: "renewed_flame_supervision", about: "flame_guard", grade: Note, base: "gas", fire: change{gasGuardKept, strings.Replace(gasGuardKept, "plan: keep", "plan: renew", 1)}},
+	{rule: "watched_not_guarded", about: "high_limit", grade: Note, base: "tank", fire: change{"    plan: keep\n", "    plan: monitor\n"}},
+	{rule: "watched_by_voltage_alone", about: "flame_guard", grade: Act, base: "gas", fire: change{gasGuardKept, strings.Replace(gasGuardKept, "plan: keep", "plan: monitor\n    sensor: water_probe", 1), "    releases_at: 3 mV\n", ""},
+		quiet: change{gasGuardKept, strings.Replace(gasGuardKept, "plan: keep", "plan: monitor\n    sensor: water_probe", 1)}},
 	{rule: "proof_due", about: "high_limit", grade: Note, base: "tank", quiet: change{"2026-09-14", "2025-11-01"}},
 	{rule: "latch_lost", about: "high_limit", grade: Stop, base: "tank",
 		fire:  change{tankLimitKept, tankLimitReplaced, "nonvolatile: true", "nonvolatile: false"},

@@ -37,14 +37,14 @@
 /* Constants. What the program below can reach was worked out for these values: after a change in
  * the plant, change the sheet and print the program anew.
  */
-/* counts: lowest believable count, about -29.6 degC (electronics.sensors[0].valid, line 123):
- * platinum (IEC 60751)
- */
-#define WAH1_EXCHANGER_PROBE_LOWEST 293u
 /* counts: highest believable count, about 249 degC (electronics.sensors[0].valid, line 123):
  * platinum (IEC 60751)
  */
 #define WAH1_EXCHANGER_PROBE_HIGHEST 479u
+/* counts: lowest believable count, about -29.6 degC (electronics.sensors[0].valid, line 123):
+ * platinum (IEC 60751)
+ */
+#define WAH1_EXCHANGER_PROBE_LOWEST 293u
 /* steps: not good for 2 s (assumed for electronics.sensors[0].fault_after: common practice): 2 s /
  * 250 ms a step, rounded up
  */

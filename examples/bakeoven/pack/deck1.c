@@ -33,14 +33,14 @@
 /* Constants. What the program below can reach was worked out for these values: after a change in
  * the plant, change the sheet and print the program anew.
  */
-/* counts: lowest believable count, about -20.1 degC (electronics.sensors[0].valid, line 100):
- * platinum (IEC 60751)
- */
-#define DECK1_ROOF_PROBE_LOWEST 1429u
 /* counts: highest believable count, about 420 degC (electronics.sensors[0].valid, line 100):
  * platinum (IEC 60751)
  */
 #define DECK1_ROOF_PROBE_HIGHEST 3940u
+/* counts: lowest believable count, about -20.1 degC (electronics.sensors[0].valid, line 100):
+ * platinum (IEC 60751)
+ */
+#define DECK1_ROOF_PROBE_LOWEST 1429u
 /* steps: not good for 2 s (assumed for electronics.sensors[0].fault_after: common practice): 2 s /
  * 100 ms a step, rounded up
  */
@@ -409,14 +409,15 @@ void deck1_step(struct deck1 *m, const struct deck1_in *in, struct deck1_out *ou
         /* stays */
     }
 
+    /* dial of capillary stat with a knob, bulb in the roof of the chamber: is believed */
+    const bool oven_stat_dial_believed = m->oven_stat_dial_lost_for <
+        DECK1_OVEN_STAT_DIAL_FAULT_AFTER;
+
     if (!oven_stat_dial_bad) {
         /* the stops hold beyond them */
         m->oven_stat_set_point = deck1_oven_stat_dial_marks(in->oven_stat_dial);
     }
 
-    /* dial of capillary stat with a knob, bulb in the roof of the chamber: is believed */
-    const bool oven_stat_dial_believed = m->oven_stat_dial_lost_for <
-        DECK1_OVEN_STAT_DIAL_FAULT_AFTER;
     /* set point by the dial or, without it, by the sheet */
     const uint16_t oven_stat_wanted = (uint16_t)(oven_stat_dial_believed
                                                  ? m->oven_stat_set_point

@@ -38,7 +38,7 @@
 /* sheathed probe in the clips of the old bulb: not believed */
 #define DECK1_FAULT_ROOF_PROBE 0x0001u
 /* dial of capillary stat with a knob, bulb in the roof of the chamber: wiper, track or wire broken;
- * works at the set point of the sheet
+ * the set point of the sheet holds
  */
 #define DECK1_FAULT_OVEN_STAT_DIAL 0x0002u
 /* 3.2 kW elements of the upper deck: on for long without effect on roof_probe */

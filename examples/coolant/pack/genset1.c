@@ -33,14 +33,14 @@
 /* Constants. What the program below can reach was worked out for these values: after a change in
  * the plant, change the sheet and print the program anew.
  */
-/* counts: lowest believable count, about 140 degC (electronics.sensors[0].valid, line 110):
- * thermistor (beta)
- */
-#define GENSET1_OUTLET_PROBE_LOWEST 803u
 /* counts: highest believable count, about -34.7 degC (electronics.sensors[0].valid, line 110):
  * thermistor (beta)
  */
 #define GENSET1_OUTLET_PROBE_HIGHEST 4081u
+/* counts: lowest believable count, about 140 degC (electronics.sensors[0].valid, line 110):
+ * thermistor (beta)
+ */
+#define GENSET1_OUTLET_PROBE_LOWEST 803u
 /* steps: not good for 2 s (assumed for electronics.sensors[0].fault_after: common practice): 2 s /
  * 100 ms a step, rounded up
  */

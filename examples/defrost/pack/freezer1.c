@@ -38,14 +38,14 @@
 /* Constants. What the program below can reach was worked out for these values: after a change in
  * the plant, change the sheet and print the program anew.
  */
-/* counts: lowest believable count, about 40 degC (electronics.sensors[0].valid, line 144):
- * thermistor (beta)
- */
-#define FREEZER1_ROOM_PROBE_LOWEST 447u
 /* counts: highest believable count, about -45 degC (electronics.sensors[0].valid, line 144):
  * thermistor (beta)
  */
 #define FREEZER1_ROOM_PROBE_HIGHEST 3602u
+/* counts: lowest believable count, about 40 degC (electronics.sensors[0].valid, line 144):
+ * thermistor (beta)
+ */
+#define FREEZER1_ROOM_PROBE_LOWEST 447u
 /* steps: not good for 2 s (assumed for electronics.sensors[0].fault_after: common practice): 2 s /
  * 500 ms a step, rounded up
  */
@@ -63,14 +63,14 @@
  * practice): ROOM_PROBE_FAULT_AFTER + ROOM_PROBE_GOOD_RUN
  */
 #define FREEZER1_ROOM_PROBE_PROVE_WITHIN 8u
-/* counts: lowest believable count, about 60 degC (electronics.sensors[1].valid, line 157):
- * thermistor (beta)
- */
-#define FREEZER1_COIL_PROBE_LOWEST 488u
 /* counts: highest believable count, about -45 degC (electronics.sensors[1].valid, line 157):
  * thermistor (beta)
  */
 #define FREEZER1_COIL_PROBE_HIGHEST 3849u
+/* counts: lowest believable count, about 60 degC (electronics.sensors[1].valid, line 157):
+ * thermistor (beta)
+ */
+#define FREEZER1_COIL_PROBE_LOWEST 488u
 /* steps: not good for 2 s (assumed for electronics.sensors[1].fault_after: common practice): 2 s /
  * 500 ms a step, rounded up
  */

@@ -30,14 +30,14 @@
 /* Constants. What the program below can reach was worked out for these values: after a change in
  * the plant, change the sheet and print the program anew.
  */
-/* counts: lowest believable count, about -40 degC (electronics.sensors[0].valid, line 75):
- * thermistor (beta)
- */
-#define FROST7_LINE_PROBE_LOWEST 333u
 /* counts: highest believable count, about 80 degC (electronics.sensors[0].valid, line 75):
  * thermistor (beta)
  */
 #define FROST7_LINE_PROBE_HIGHEST 3808u
+/* counts: lowest believable count, about -40 degC (electronics.sensors[0].valid, line 75):
+ * thermistor (beta)
+ */
+#define FROST7_LINE_PROBE_LOWEST 333u
 /* steps: not good for 2 s (assumed for electronics.sensors[0].fault_after: common practice): 2 s /
  * 500 ms a step, rounded up
  */

@@ -34,14 +34,14 @@
 /* Constants. What the program below can reach was worked out for these values: after a change in
  * the plant, change the sheet and print the program anew.
  */
-/* counts: lowest believable count, about -30 degC (electronics.sensors[0].valid, line 101):
- * platinum (IEC 60751)
- */
-#define FLOOR2_FLOW_PROBE_LOWEST 1172u
 /* counts: highest believable count, about 109.9 degC (electronics.sensors[0].valid, line 101):
  * platinum (IEC 60751)
  */
 #define FLOOR2_FLOW_PROBE_HIGHEST 1608u
+/* counts: lowest believable count, about -30 degC (electronics.sensors[0].valid, line 101):
+ * platinum (IEC 60751)
+ */
+#define FLOOR2_FLOW_PROBE_LOWEST 1172u
 /* steps: not good for 2 s (assumed for electronics.sensors[0].fault_after: common practice): 2 s /
  * 200 ms a step, rounded up
  */

@@ -33,14 +33,14 @@
 /* Constants. What the program below can reach was worked out for these values: after a change in
  * the plant, change the sheet and print the program anew.
  */
-/* counts: lowest believable count, about 0.1 degC (electronics.sensors[0].valid, line 94): type K
- * (IEC 60584-1)
- */
-#define OVEN1_CHAMBER_PROBE_LOWEST 248u
 /* counts: highest believable count, about 482.3 degC (electronics.sensors[0].valid, line 94): type
  * K (IEC 60584-1)
  */
 #define OVEN1_CHAMBER_PROBE_HIGHEST 1729u
+/* counts: lowest believable count, about 0.1 degC (electronics.sensors[0].valid, line 94): type K
+ * (IEC 60584-1)
+ */
+#define OVEN1_CHAMBER_PROBE_LOWEST 248u
 /* steps: not good for 3 s (electronics.sensors[0].fault_after, line 95): 3 s / 500 ms a step,
  * rounded up
  */

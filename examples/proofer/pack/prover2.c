@@ -34,14 +34,14 @@
 /* Constants. What the program below can reach was worked out for these values: after a change in
  * the plant, change the sheet and print the program anew.
  */
-/* counts: lowest believable count, about 150.7 degC (assumed for electronics.sensors[0].valid: the
- * range of its kind, short of both rails): thermistor (beta)
- */
-#define PROVER2_CABINET_PROBE_LOWEST 31u
 /* counts: highest believable count, about -48.1 degC (assumed for electronics.sensors[0].valid: the
  * range of its kind, short of both rails): thermistor (beta)
  */
 #define PROVER2_CABINET_PROBE_HIGHEST 1015u
+/* counts: lowest believable count, about 150.7 degC (assumed for electronics.sensors[0].valid: the
+ * range of its kind, short of both rails): thermistor (beta)
+ */
+#define PROVER2_CABINET_PROBE_LOWEST 31u
 /* steps: not good for 2 s (assumed for electronics.sensors[0].fault_after: common practice): 2 s /
  * 250 ms a step, rounded up
  */

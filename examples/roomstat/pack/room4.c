@@ -32,14 +32,14 @@
 /* Constants. What the program below can reach was worked out for these values: after a change in
  * the plant, change the sheet and print the program anew.
  */
-/* counts: lowest believable count, about 60 degC (electronics.sensors[0].valid, line 96):
- * thermistor (beta)
- */
-#define ROOM4_ROOM_PROBE_LOWEST 940u
 /* counts: highest believable count, about -20 degC (electronics.sensors[0].valid, line 96):
  * thermistor (beta)
  */
 #define ROOM4_ROOM_PROBE_HIGHEST 3628u
+/* counts: lowest believable count, about 60 degC (electronics.sensors[0].valid, line 96):
+ * thermistor (beta)
+ */
+#define ROOM4_ROOM_PROBE_LOWEST 940u
 /* steps: not good for 10 s (electronics.sensors[0].fault_after, line 97): 10 s / 1 s a step,
  * rounded up
  */
@@ -404,14 +404,14 @@ void room4_step(struct room4 *m, const struct room4_in *in, struct room4_out *ou
         /* stays */
     }
 
+    /* dial of room control with a mercury bottle, in the hall: is believed */
+    const bool room_stat_dial_believed = m->room_stat_dial_lost_for <
+        ROOM4_ROOM_STAT_DIAL_FAULT_AFTER;
+
     if (!room_stat_dial_bad) {
         /* the stops hold beyond them */
         m->room_stat_set_point = room4_room_stat_dial_marks(in->room_stat_dial);
     }
-
-    /* dial of room control with a mercury bottle, in the hall: is believed */
-    const bool room_stat_dial_believed = m->room_stat_dial_lost_for <
-        ROOM4_ROOM_STAT_DIAL_FAULT_AFTER;
 
     /* warms and cools as the heater in the old part did */
     m->room_stat_warmth = (uint32_t)room4_toward_i32(

@@ -36,8 +36,8 @@
 /* Bits of fault in struct room4_out; 0 means none. */
 /* at the height of the old control, in moving air, away from the board: not believed */
 #define ROOM4_FAULT_ROOM_PROBE 0x0001u
-/* dial of room control with a mercury bottle, in the hall: wiper, track or wire broken; works at
- * the set point of the sheet
+/* dial of room control with a mercury bottle, in the hall: wiper, track or wire broken; the set
+ * point of the sheet holds
  */
 #define ROOM4_FAULT_ROOM_STAT_DIAL 0x0002u
 /* call for heat to the boiler's own burner control: on for long without effect on room_probe */

@@ -38,14 +38,14 @@
 /* Constants. What the program below can reach was worked out for these values: after a change in
  * the plant, change the sheet and print the program anew.
  */
-/* counts: lowest believable count, about 70 degC (electronics.sensors[0].valid, line 167):
- * thermistor (beta)
- */
-#define SHOP6_ROOM_PROBE_LOWEST 740u
 /* counts: highest believable count, about -30 degC (electronics.sensors[0].valid, line 167):
  * thermistor (beta)
  */
 #define SHOP6_ROOM_PROBE_HIGHEST 3814u
+/* counts: lowest believable count, about 70 degC (electronics.sensors[0].valid, line 167):
+ * thermistor (beta)
+ */
+#define SHOP6_ROOM_PROBE_LOWEST 740u
 /* steps: not good for 2 s (assumed for electronics.sensors[0].fault_after: common practice): 2 s /
  * 500 ms a step, rounded up
  */
