@@ -82,13 +82,21 @@ func sensors(spec *translate.Specification) []check {
 				cs = append(cs, check{x.ID.V, fmt.Sprintf("put it, or a substitute for it, at %s", degrees(t)), fmt.Sprintf("%d%s counts", count, spread(chain, t))})
 			}
 		}
-		clear := span(x.ClearAfter.V)
-		cs = append(cs,
-			check{x.ID.V, "pull one wire off", fmt.Sprintf("fault %s within %s (%s and two steps); its loads go to their safe state; they come back no sooner than %s after the wire is on again",
-				x.ID.V, span(x.FaultAfter.V+steps(spec, 2)), span(x.FaultAfter.V), clear)},
+		cs = append(cs, check{x.ID.V, "pull one wire off", wireOff(spec, x, chain)},
 			check{x.ID.V, "short it", "the same, unless a short reads inside the range of this sensor: then write down what it reads"})
 	}
 	return cs
+}
+
+// wireOff is what the program makes of a sensor's broken wire.
+func wireOff(spec *translate.Specification, x *survey.Sensor, chain *sensing.Chain) string {
+	for _, f := range chain.Failures() {
+		if (f.What == "open" || f.What == "wire off") && !f.Known {
+			return "not determined by its front end: write down what it reads"
+		}
+	}
+	return fmt.Sprintf("fault %s within %s (%s and two steps); its loads go to their safe state; they come back no sooner than %s after the wire is on again",
+		x.ID.V, span(x.FaultAfter.V+steps(spec, 2)), span(x.FaultAfter.V), span(x.ClearAfter.V))
 }
 
 // spread is by how many counts a sound chain may differ at a temperature: its
