@@ -48,9 +48,13 @@ func C(j Job) []File {
 		{Name: id + ".c", Data: []byte(src.Body())},
 		{Name: id + "_port.h", Data: []byte(src.PortHeader())},
 		{Name: id + "_port.c", Data: []byte(src.PortBody()), Yours: true},
-		{Name: id + "_check.c", Data: []byte(src.Check(vectors(j.Tour), missed(j.Tour)))},
+		{Name: id + "_check.c", Data: []byte(Check(src, j.Tour))},
 	}
 }
+
+// Check prints <id>_check.c from the inputs that a tour through the program
+// recorded.
+func Check(src csource.Source, t prove.Tour) string { return src.Check(vectors(t), missed(t)) }
 
 func vectors(t prove.Tour) []csource.Vector {
 	var out []csource.Vector

@@ -18,7 +18,10 @@ import (
 // everywhere. Every so often the power is cut; the record is good, or gone.
 func (s Source) Harness(steps int) string {
 	w := s.printer()
-	w.line("#include \"%s.h\"\n\n#include <stddef.h>\n#include <stdio.h>\n#include <string.h>\n", w.lo)
+	w.line("#include \"%s.h\"\n\n#include <stddef.h>\n#ifdef BARE\n#include \"plat.h\"\n#else\n#include <stdio.h>\n#endif\n", w.lo)
+	w.line("#ifndef STEPS\n#define STEPS %s\n#endif\n", natural(int64(steps)))
+	w.line("static void fill(void *at, size_t size, unsigned char with)\n{\n    unsigned char *p = (unsigned char *)at;\n    size_t i;\n\n    for (i = 0u; i < size; i++) {\n        p[i] = with;\n    }\n}\n")
+	w.line("static void show(uint32_t v)\n{\n#ifdef BARE\n    int shift;\n\n    plat_putc('s');\n    plat_putc('u');\n    plat_putc('m');\n    plat_putc(' ');\n    for (shift = 28; shift >= 0; shift -= 4) {\n        plat_putc(\"0123456789abcdef\"[(v >> shift) & 15u]);\n    }\n    plat_putc('\\n');\n    plat_exit();\n#else\n    (void)printf(\"%%08lx\\n\", (unsigned long)v);\n#endif\n}\n")
 	w.line("static uint32_t sum = UINT32_C(2166136261);\n")
 	if len(w.p.Inputs) > 0 {
 		w.line("static uint32_t seed = UINT32_C(%d);", uint32(harnessSeed))
@@ -29,7 +32,7 @@ func (s Source) Harness(steps int) string {
 	w.line("static const int32_t value[] = {%s};\n", strings.Join(numerals(values), ", "))
 	w.line("static const uint32_t mask[3] = {3u, 63u, 1023u};\n")
 	w.line("int main(void)\n{\n    struct %s m;\n    struct %s_in in;\n    struct %s_out out;\n    struct %s_remembered kept;\n    uint32_t i;\n    uint32_t r = 0u;\n", w.lo, w.lo, w.lo, w.lo)
-	w.line("    (void)memset(&m, 0xA5, sizeof m);\n    (void)memset(&in, 0, sizeof in);\n    (void)memset(&kept, 0, sizeof kept);\n    %s_start(&m, NULL);\n    (void)mask;\n    (void)value;\n    for (i = 0u; i < %s; i++) {", w.lo, natural(int64(steps)))
+	w.line("    fill(&m, sizeof m, 0xA5u);\n    fill(&in, sizeof in, 0u);\n    fill(&kept, sizeof kept, 0u);\n    %s_start(&m, NULL);\n    (void)mask;\n    (void)value;\n    for (i = 0u; i < STEPS; i++) {", w.lo)
 	for _, v := range w.p.Inputs {
 		w.line("        r = draw();\n        if ((r & mask[(i >> 11) %% 3u]) == 0u) {")
 		name := w.vars[v]
@@ -50,9 +53,9 @@ func (s Source) Harness(steps int) string {
 	for _, v := range w.p.State {
 		w.line("        add((int32_t)m.%s);", w.vars[v])
 	}
-	w.line("        if ((i %% %du) == %du) {\n            add(%s_remember(&m, &kept) ? 1 : 0);\n            add((int32_t)kept.check);\n            (void)memset(&m, 0x5A, sizeof m);", powerCut, powerCut-1, w.lo)
+	w.line("        if ((i %% %du) == %du) {\n            add(%s_remember(&m, &kept) ? 1 : 0);\n            add((int32_t)kept.check);\n            fill(&m, sizeof m, 0x5Au);", powerCut, powerCut-1, w.lo)
 	w.line("            %s_start(&m, ((i & 1u) == 0u) ? &kept : NULL);\n        }", w.lo)
-	w.line("    }\n    (void)printf(\"%%08lx\\n\", (unsigned long)sum);\n    return 0;\n}")
+	w.line("    }\n    show(sum);\n    return 0;\n}")
 	return w.String()
 }
 
