@@ -129,12 +129,12 @@ func (w *printer) proofNames(properties []*logic.Property) {
 
 func (w *printer) proofNotes(unable []string) {
 	w.comment("", "One step: any state inside the invariant, any inputs. Nothing undefined happens, the invariant holds again and no property is broken:",
-		"- cbmc "+w.lo+"_proof.c "+w.lo+".c "+checks)
+		"- cbmc "+w.lo+"_proof.c "+w.lo+".c "+ModelChecks)
 	w.comment("", "With more on the command line:",
 		"-DBASE: every start, with any record or none, gives a state inside the invariant.",
 		"-DSTEPS=n: the property is only asked for after n steps without a breach of it (for one that a single step does not carry); with -DBASE the first n - 1 steps from a start.",
 		"-DFALSE_PROPERTY: claims that are false on purpose. Each has to FAIL, or the others would say nothing: the end of a step is never reached, and every property with one of its conditions left out.",
-		"-DSAME: another file holds the program under names that begin with "+w.lo+"_other_ (start, step, remember); both do the same from any state inside the invariant.",
+		"-DSAME: another file holds the program under names that begin with "+w.lo+"_other_ (start, step, remember); both do the same, step by step. With -DSTEPS=n: in the first n - 1 steps from a start, and from any state that n - 1 steps lead to from one inside the invariant.",
 		"Add --16 (with a stdint.h for it), --32, --64: an int of that width.")
 	w.comment("", "Value analysis, from any start, inputs that change for ever: frama-c -eva -eva-precision 3 -machdep x86_16 -warn-signed-downcast -warn-unsigned-downcast "+w.lo+"_proof.c "+w.lo+".c")
 	if len(unable) > 0 {
@@ -146,9 +146,9 @@ func (w *printer) proofNotes(unable []string) {
 	}
 }
 
-// checks are the options under which the model checker looks for what is
+// ModelChecks are the options under which the model checker looks for what is
 // undefined in C. A loop that is cut short is a failure.
-const checks = "--unwind 17 --unwinding-assertions --bounds-check --pointer-check --div-by-zero-check --signed-overflow-check --conversion-check --undefined-shift-check"
+const ModelChecks = "--unwind 17 --unwinding-assertions --bounds-check --pointer-check --div-by-zero-check --signed-overflow-check --conversion-check --undefined-shift-check"
 
 // tools prints what the tools call an assumption, a claim and any value.
 func (w *printer) tools() {
@@ -504,14 +504,18 @@ func (w *printer) same() {
 		w.statement("    ", "", call("CLAIM", atom("a->"+w.vars[v]+" == b->"+w.vars[v]), atom(String("same: "+v.Name))), ";")
 	}
 	w.line("    (void)a;\n    (void)b;\n}\n")
-	w.line("static void same(void)\n{\n    struct %s m;\n    struct %s n;\n    struct %s_in in;\n    struct %s_out out;\n    struct %s_out other;\n    struct %s_remembered r;\n    struct %s_remembered s;\n    bool changed;\n",
-		w.lo, w.lo, w.lo, w.lo, w.lo, w.lo, w.lo)
-	w.line("    any_state(&m);\n    any_state(&n);\n    any_remembered(&r);\n    if (nondet_u8() == 0u) {\n        %s_start(&m, NULL);\n        %sstart(&n, NULL);\n    } else {\n        %s_start(&m, &r);\n        %sstart(&n, &r);\n    }\n    same_state(&m, &n);\n", w.lo, other, w.lo, other)
-	w.line("    any_state(&m);\n    assume_invariant(&m);\n    n = m;\n    any_in(&in);\n    any_out(&out);\n    other = out;\n    %s_step(&m, &in, &out);\n    %sstep(&n, &in, &other);\n    same_state(&m, &n);", w.lo, other)
+	w.line("static void same_step(struct %s *m, struct %s_out *out)\n{\n    struct %s n = *m;\n    struct %s_out other = *out;\n    struct %s_in in;\n", w.lo, w.lo, w.lo, w.lo, w.lo)
+	w.line("    any_in(&in);\n    %s_step(m, &in, out);\n    %sstep(&n, &in, &other);\n    same_state(m, &n);", w.lo, other)
 	for _, v := range w.p.Outputs {
-		w.statement("    ", "", call("CLAIM", atom("out."+w.vars[v]+" == other."+w.vars[v]), atom(String("same: output "+v.Name))), ";")
+		w.statement("    ", "", call("CLAIM", atom("out->"+w.vars[v]+" == other."+w.vars[v]), atom(String("same: output "+v.Name))), ";")
 	}
-	w.line("\n    any_remembered(&r);\n    s = r;\n    changed = %s_remember(&m, &r);\n    CLAIM(changed == %sremember(&n, &s), \"same: record changed\");", w.lo, other)
+	w.line("}\n")
+	w.line("static void same(void)\n{\n    struct %s m;\n    struct %s n;\n    struct %s_in in;\n    struct %s_out out;\n    struct %s_remembered r;\n    struct %s_remembered s;\n    uint8_t i;\n    bool changed;\n",
+		w.lo, w.lo, w.lo, w.lo, w.lo, w.lo)
+	w.line("    any_state(&m);\n    any_state(&n);\n    any_remembered(&r);\n    any_out(&out);\n    if (nondet_u8() == 0u) {\n        %s_start(&m, NULL);\n        %sstart(&n, NULL);\n    } else {\n        %s_start(&m, &r);\n        %sstart(&n, &r);\n    }\n    same_state(&m, &n);", w.lo, other, w.lo, other)
+	w.line("    for (i = 1u; i < STEPS; i++) {\n        same_step(&m, &out);\n    }\n")
+	w.line("    any_state(&m);\n    assume_invariant(&m);\n    for (i = 1u; i < STEPS; i++) {\n        any_in(&in);\n        %s_step(&m, &in, &out);\n    }\n    same_step(&m, &out);\n", w.lo)
+	w.line("    any_remembered(&r);\n    s = r;\n    changed = %s_remember(&m, &r);\n    CLAIM(changed == %sremember(&m, &s), \"same: record changed\");", w.lo, other)
 	for _, v := range w.p.Survivors() {
 		w.statement("    ", "", call("CLAIM", atom("r."+w.kept[v]+" == s."+w.kept[v]), atom(String("same: record of "+v.Name))), ";")
 	}
