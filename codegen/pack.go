@@ -34,6 +34,7 @@ type Job struct {
 	Risks     *risk.Assessment
 	Functions []faults.Row
 	Tour      prove.Tour // what _check.c replays
+	Proof     bool       // with the harness for a model checker
 }
 
 // C gives the files of C, or none where a stop is open or no program came out.
@@ -43,13 +44,17 @@ func C(j Job) []File {
 	}
 	src := csource.Source{Program: j.Spec.Program, Facts: Facts(j.Spec, sheets.CautionsFor(j.Risks))}
 	id := j.Spec.Program.ID
-	return []File{
+	files := []File{
 		{Name: id + ".h", Data: []byte(src.Header())},
 		{Name: id + ".c", Data: []byte(src.Body())},
 		{Name: id + "_port.h", Data: []byte(src.PortHeader())},
 		{Name: id + "_port.c", Data: []byte(src.PortBody()), Yours: true},
 		{Name: id + "_check.c", Data: []byte(Check(src, j.Tour))},
 	}
+	if j.Proof {
+		files = append(files, File{Name: id + "_proof.c", Data: []byte(src.Proof())})
+	}
+	return files
 }
 
 // Check prints <id>_check.c from the inputs that a tour through the program
@@ -94,7 +99,7 @@ func OnlyC(j Job) ([]File, error) {
 // run. The user's own is not among them.
 func withheld(id string) []File {
 	var files []File
-	for _, end := range []string{".h", ".c", "_port.h", "_check.c"} {
+	for _, end := range []string{".h", ".c", "_port.h", "_check.c", "_proof.c"} {
 		files = append(files, File{Name: id + end, Withheld: true})
 	}
 	return files

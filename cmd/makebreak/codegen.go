@@ -9,6 +9,7 @@ import (
 
 func newCodegen(out, errw io.Writer) *cobra.Command {
 	var dir string
+	var proof bool
 	var o options
 	cmd := &cobra.Command{
 		Use:   "codegen SHEET -o DIR",
@@ -23,7 +24,7 @@ func newCodegen(out, errw io.Writer) *cobra.Command {
 				fmt.Fprintln(errw, w.verdict(""))
 				return err
 			}
-			if err := w.writeC(dir); err != nil {
+			if err := w.writeC(dir, proof); err != nil {
 				return err
 			}
 			fmt.Fprintln(errw, "The C is in", visible(dir)+"; it is a skeleton to start from. The risks are part of the job: makebreak retrofit.")
@@ -32,6 +33,7 @@ func newCodegen(out, errw io.Writer) *cobra.Command {
 	}
 	o.bindRules(cmd)
 	cmd.Flags().StringVarP(&dir, "output", "o", "", "folder for the C (needed)")
+	cmd.Flags().BoolVar(&proof, "proof", false, "with a harness for a model checker and a value analysis")
 	_ = cmd.MarkFlagRequired("output")
 	return cmd
 }

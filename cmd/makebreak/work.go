@@ -191,8 +191,10 @@ func (w *work) writePack(dir string) error {
 	return nil
 }
 
-func (w *work) writeC(dir string) error {
-	files, err := codegen.OnlyC(w.job())
+func (w *work) writeC(dir string, proof bool) error {
+	job := w.job()
+	job.Proof = proof
+	files, err := codegen.OnlyC(job)
 	if err != nil {
 		return exit{exitOutside, err}
 	}

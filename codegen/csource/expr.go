@@ -26,7 +26,7 @@ func (w *printer) boolean(e *logic.Expr) piece {
 	case logic.OpLit:
 		return atom(numeral(e.Value, "bool"))
 	case logic.OpUse, logic.OpPrev:
-		return atom(w.read(e.Var))
+		return atom(w.operand(e))
 	case logic.OpNot:
 		return w.boolean(e.Args[0]).prefixed("!")
 	case logic.OpSelect:
@@ -83,7 +83,7 @@ func (w *printer) state(e *logic.Expr) piece {
 	case logic.OpSelect:
 		return choice(w.term(e.Args[0]), w.storedState(e.Args[1]), w.storedState(e.Args[2]))
 	}
-	return atom(w.read(e.Var))
+	return atom(w.operand(e))
 }
 
 // storedState is a state as it is kept in a variable.
@@ -122,7 +122,7 @@ func (w *printer) plain(e *logic.Expr) piece {
 	case logic.OpConst:
 		return atom(w.asUnsigned(e.Const))
 	case logic.OpUse, logic.OpPrev:
-		return atom(w.read(e.Var))
+		return atom(w.operand(e))
 	}
 	return w.helperCall(e)
 }
@@ -185,7 +185,7 @@ func (w *printer) number(e *logic.Expr, k width) piece {
 	case logic.OpConst:
 		return w.asSigned(e.Const, k)
 	case logic.OpUse, logic.OpPrev:
-		return widened(atom(w.read(e.Var)), w.typeOf(e.Var), k)
+		return widened(atom(w.operand(e)), w.typeOf(e.Var), k)
 	case logic.OpSelect:
 		return choice(w.term(e.Args[0]), w.number(e.Args[1], k).bracketed(), w.number(e.Args[2], k).bracketed())
 	}

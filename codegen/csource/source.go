@@ -64,7 +64,8 @@ type printer struct {
 	lo    string        // lower-case prefix of everything but macros
 
 	uses
-	used uses // of the whole program, known from a first printing
+	used  uses // of the whole program, known from a first printing
+	proof view
 }
 
 // uses is what the printed C makes use of.

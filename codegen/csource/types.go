@@ -82,7 +82,19 @@ func (w *printer) read(v *logic.Var) string {
 	case w.isOutput(v):
 		return "out->" + name
 	}
+	if w.proof.watched[v] {
+		return "watch->" + name
+	}
 	return "m->" + name
+}
+
+// operand prints what a Use or a Prev reads. Inside a step both stand in the
+// same place; seen from behind the step, what was is kept apart.
+func (w *printer) operand(e *logic.Expr) string {
+	if e.Op == logic.OpPrev && w.proof.after && !w.proof.watched[e.Var] {
+		return "before->" + w.vars[e.Var]
+	}
+	return w.read(e.Var)
 }
 
 // literal is a signed integer constant: an int where it fits 16 bits and no
