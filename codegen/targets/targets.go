@@ -47,7 +47,6 @@ type Target struct {
 	Steps    int      // of the harness
 	Check    bool     // <id>_check.c fits and is run too
 	Size     string   // tool that counts bytes
-	State    bool     // state is counted by a probe object
 	Object   string   // how an object file's name ends
 	Compiled bool     // never run: there is no simulator
 }

@@ -156,20 +156,21 @@ func (p *Piece) sizes(t Target, dir string) (flash, state int, err error) {
 		data, _ := strconv.Atoi(m[2])
 		flash = text + data
 	}
-	probe := fmt.Sprintf("#include \"%s.h\"\nextern struct %s probe;\nstruct %s probe;\n", p.ID, p.ID, p.ID)
+	probe := fmt.Sprintf("#include \"%s.h\"\nchar probe[sizeof(struct %s)] = {1};\n", p.ID, p.ID)
 	if err := os.WriteFile(filepath.Join(dir, "probe.c"), []byte(probe), 0o666); err != nil {
 		return 0, 0, err
 	}
-	if err := t.CompileC(dir, "probe.c"); err != nil {
+	if len(t.Stub) == 0 {
+		return flash, 0, nil
+	}
+	if _, err := command(dir, time.Minute, with(t.Stub, "-c", "probe.c", "-o", t.object("probe.c"))...); err != nil {
 		return 0, 0, err
 	}
 	if out, err = command(dir, time.Minute, t.Size, t.object("probe.c")); err != nil {
 		return 0, 0, err
 	}
 	if m := sizeRow.FindStringSubmatch(out); m != nil {
-		data, _ := strconv.Atoi(m[2])
-		bss, _ := strconv.Atoi(m[3])
-		state = data + bss
+		state, _ = strconv.Atoi(m[2])
 	}
 	return flash, state, nil
 }
