@@ -11,7 +11,7 @@ import (
 // dialled is what to test of a dial that the user keeps; without tells what the
 // control does without it.
 func dialled(c *survey.Control, d *translate.Dial, without string) []check {
-	width := kelvins(d.Layout.Width())
+	width := fmt.Sprintf("%.2g K", d.Layout.Width())
 	return []check{
 		{c.ID.V, fmt.Sprintf("turn the dial to its stops, and to the mark of %s", degrees(c.DialMark().V)),
 			fmt.Sprintf("%d counts at the stop of %s, %d at that of %s, %d at the mark; one count is %s", d.Layout.Bottom, degrees(d.Layout.Low), d.Layout.Top, degrees(d.Layout.High), d.Marked, width)},
@@ -47,7 +47,7 @@ func regulators(spec *translate.Specification) []check {
 
 // held is what to test of a PID control.
 func held(spec *translate.Specification, c *survey.Control, g *translate.Regulator) []check {
-	expect := fmt.Sprintf("comes to %s and stays within %s of it once the load is steady", degrees(c.DialMark().V), kelvins(1/gain(spec, c)))
+	expect := fmt.Sprintf("comes to %s and stays there once the load is steady%s", degrees(c.DialMark().V), heldWithin(spec, c))
 	i := slices.IndexFunc(spec.Tunings, func(t translate.Tuning) bool { return t.Control == c.ID.V })
 	wait := ""
 	if i >= 0 {
@@ -64,12 +64,13 @@ func held(spec *translate.Specification, c *survey.Control, g *translate.Regulat
 	return cs
 }
 
-func gain(spec *translate.Specification, c *survey.Control) float64 {
-	v, ok := spec.Figures.Value(c.ID.V, "gain")
-	if !ok || v == 0 {
-		return 1
+// heldWithin is how far a sound chain may hold from the set point.
+func heldWithin(spec *translate.Specification, c *survey.Control) string {
+	b, err := spec.Chains[c.Sensor.V].Budget(c.DialMark().V)
+	if err != nil {
+		return ""
 	}
-	return v
+	return fmt.Sprintf(", within %s by a reference thermometer (worst error of the chain)", kelvins(b.WorstCase))
 }
 
 // valves is what to test of a load that takes any position.

@@ -162,7 +162,7 @@ func runs(spec *translate.Specification) []check {
 	var cs []check
 	for _, k := range spec.Cycles {
 		id := k.Control.ID.V
-		if spec.Plan.Contacts[id] == nil {
+		if c := spec.Plan.Contacts[id]; c == nil || c.PID != nil {
 			continue
 		}
 		const do = "let the plant settle, then take two cycles or more with a stopwatch, and a reference thermometer in the medium"

@@ -3,7 +3,7 @@
  * Equipment: Standby engine 1, coolant circuit
  * Site: Harbour Lane Laundry
  * Printed by makebreak 0.1.0 from sheet.yaml
- * Sheet SHA-256: e411cde8741198e425c7ae361d5585aa2d4b1a62c21c3fae06d1c0f4492bbb37
+ * Sheet SHA-256: bcf8b9ec5ac6bc7c71efdeb2099586f05b6a7d4fa187b281a257f1b0da95d2f1
  *
  * Replaces:
  * - wax_valve: wax element in the coolant outlet
@@ -58,17 +58,17 @@
  * practice): OUTLET_PROBE_FAULT_AFTER + OUTLET_PROBE_GOOD_RUN
  */
 #define GENSET1_OUTLET_PROBE_PROVE_WITHIN 30u
-/* 0.01 K: 79 degC: below, it is shut (controls[0].starts_at, line 67): in steps of the reading */
-#define GENSET1_WAX_VALVE_BAND_FROM 7900
-/* 0.01 K: 92 degC: above, it is fully open (controls[0].full_at, line 68): in steps of the reading
+/* 0.01 K: 83 degC: below, it is shut (controls[0].starts_at, line 67): in steps of the reading */
+#define GENSET1_WAX_VALVE_BAND_FROM 8300
+/* 0.01 K: 95 degC: above, it is fully open (controls[0].full_at, line 68): in steps of the reading
  */
-#define GENSET1_WAX_VALVE_BAND_TO 9200u
-/* 0.01 K: 13 K (controls[0].full_at, line 68): WAX_VALVE_BAND_TO - WAX_VALVE_BAND_FROM */
-#define GENSET1_WAX_VALVE_BAND 1300
+#define GENSET1_WAX_VALVE_BAND_TO 9500u
+/* 0.01 K: 12 K (controls[0].full_at, line 68): WAX_VALVE_BAND_TO - WAX_VALVE_BAND_FROM */
+#define GENSET1_WAX_VALVE_BAND 1200
 /* permille: half of the hysteresis of 2 K (controls[0].hysteresis, line 69): 1000 × hysteresis / 2
  * / band
  */
-#define GENSET1_WAX_VALVE_PLAY 77
+#define GENSET1_WAX_VALVE_PLAY 83
 /* permille: open (loads[0].safe_state, line 45): its safe state */
 #define GENSET1_RADIATOR_VALVE_SAFE 1000
 /* permille: most in one step (loads[0].actuator.travel, line 48): 1000 × 100 ms / 60 s of travel,
@@ -93,16 +93,16 @@ typedef char genset1_room_2[(GENSET1_OUTLET_PROBE_PROVE_WITHIN <= 255u) ? 1 : -1
 #define GENSET1_READ_U16(entry) (entry)
 #endif
 
-/* temperature of outlet_probe (0.01 K): thermistor (beta), counts 1839 to 2374: 2 pieces (proved to
- * be the fewest), 12 bytes, worst error 0.0272 K at count 2213 of 0.05 K allowed, in steps of 0.01
- * K; equal spacing needs 3 pieces, 8 bytes, worst 0.0386 K; straight between the points, the end
+/* temperature of outlet_probe (0.01 K): thermistor (beta), counts 1751 to 2245: 2 pieces (proved to
+ * be the fewest), 12 bytes, worst error 0.0312 K at count 2106 of 0.05 K allowed, in steps of 0.01
+ * K; equal spacing needs 3 pieces, 8 bytes, worst 0.0414 K; straight between the points, the end
  * values beyond them
  */
 static const uint16_t genset1_outlet_probe_temperature_x[3] GENSET1_FLASH = {
-    1839u, 2044u, 2374u
+    1751u, 1955u, 2245u
 };
 static const uint16_t genset1_outlet_probe_temperature_y[3] GENSET1_FLASH = {
-    9398u, 8729u, 7698u
+    9696u, 9015u, 8097u
 };
 
 static uint16_t genset1_outlet_probe_temperature(uint16_t x)

@@ -3,7 +3,7 @@
  * Equipment: Standby engine 1, coolant circuit
  * Site: Harbour Lane Laundry
  * Printed by makebreak 0.1.0 from sheet.yaml
- * Sheet SHA-256: e411cde8741198e425c7ae361d5585aa2d4b1a62c21c3fae06d1c0f4492bbb37
+ * Sheet SHA-256: bcf8b9ec5ac6bc7c71efdeb2099586f05b6a7d4fa187b281a257f1b0da95d2f1
  *
  * Replaces:
  * - wax_valve: wax element in the coolant outlet
