@@ -183,3 +183,18 @@ func TestWatchedGasHasNoOutput(t *testing.T) {
 		}
 	}
 }
+
+// A switch below the current of its load is refused; one that is merely not
+// known in full is not.
+func TestStageBelowItsLoadIsRefused(t *testing.T) {
+	enough := specOf(t, "pid")
+	if n := figure(t, enough, "heater", "stage_refused"); n != 0 {
+		t.Errorf("%g refusals of a switch of 25 A for 8 A", n)
+	}
+	if n := figure(t, enough, "heater", "stage_unsettled"); n == 0 {
+		t.Error("nothing is open about a switch of which only the current is known")
+	}
+	if n := figure(t, specOf(t, "pid", "rated_current: 25 A", "rated_current: 5 A"), "heater", "stage_refused"); n != 1 {
+		t.Errorf("%g refusals of a switch of 5 A for 8 A, want 1", n)
+	}
+}
